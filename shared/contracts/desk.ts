@@ -1,0 +1,125 @@
+import { z } from 'zod';
+import { figure, outcome, picture, uuid } from './common.ts';
+import { dayFigure, myCase, sharedBoardView, standingsBoard } from './member.ts';
+
+export const squadCell = z.strictObject({
+  setKey: z.string(),
+  /** null: does not answer for the set. */
+  figure: figure.nullable(),
+  /** Change of the figure over the last 28 days, in points; null when there was none. */
+  change: z.number().nullable(),
+});
+export const squadRow = z.strictObject({
+  memberId: uuid,
+  nickname: z.string(),
+  role: z.enum(['member', 'captain']),
+  cells: z.array(squadCell),
+  answers: z.int(),
+  lastTrained: z.string().nullable(),
+  minutesPerDay: z.number(),
+});
+export const squadView = z.strictObject({
+  sets: z.array(z.strictObject({ setKey: z.string(), name: z.string(), edition: z.int(), limitMs: z.int() })),
+  rows: z.array(squadRow),
+  lost: z.array(
+    z.strictObject({
+      setKey: z.string(),
+      setName: z.string(),
+      key: z.string(),
+      name: z.string(),
+      picture,
+      /** Share of the squad's solves lost to this case. */
+      share: z.number(),
+      mostly: z.string(),
+    }),
+  ),
+  board: standingsBoard.nullable(),
+});
+export type SquadView = z.infer<typeof squadView>;
+
+export const memberPageInput = z.strictObject({ memberId: uuid });
+export const memberPageView = z.strictObject({
+  memberId: uuid,
+  nickname: z.string(),
+  role: z.enum(['member', 'captain']),
+  lastTrained: z.string().nullable(),
+  sets: z.array(
+    z.strictObject({
+      setKey: z.string(),
+      name: z.string(),
+      edition: z.int(),
+      now: figure,
+      days: z.array(dayFigure),
+    }),
+  ),
+  cases: z.array(myCase),
+  lately: z.array(
+    z.strictObject({
+      id: uuid,
+      at: z.number(),
+      setName: z.string(),
+      name: z.string(),
+      named: z.string(),
+      outcome,
+      recognitionMs: z.int().nullable(),
+      lostBy: z.string().nullable(),
+    }),
+  ),
+  rates: z.strictObject({
+    answers: z.int(),
+    held: z.int(),
+    late: z.int(),
+    missed: z.int(),
+    left: z.int(),
+    misTaps: z.int(),
+  }),
+});
+export type MemberPageView = z.infer<typeof memberPageView>;
+
+export const standingsInput = z.strictObject({ setKey: z.string().max(60).optional() });
+export const standingsView = z.strictObject({
+  sets: z.array(z.strictObject({ setKey: z.string(), name: z.string() })),
+  board: standingsBoard.nullable(),
+  /** Members not on the board because they have not opted in: a count, for the captain. */
+  notOptedIn: z.int(),
+  sharedBoards: z.array(sharedBoardView),
+});
+export type StandingsView = z.infer<typeof standingsView>;
+
+const programmeRow = z.strictObject({
+  setKey: z.string(),
+  name: z.string(),
+  /** null: follows the newest. */
+  pinnedEdition: z.int().nullable(),
+  newestEdition: z.int().nullable(),
+  limitMs: z.int(),
+  asksAuf: z.boolean(),
+  forEveryone: z.boolean(),
+  memberIds: z.array(uuid),
+  version: z.int(),
+});
+export const programmeView = z.strictObject({
+  rows: z.array(programmeRow),
+  /** Sets that have an edition and are not in the programme. */
+  available: z.array(
+    z.strictObject({ setKey: z.string(), name: z.string(), editions: z.array(z.int()), cases: z.int() }),
+  ),
+  editions: z.record(z.string(), z.array(z.int())),
+  members: z.array(z.strictObject({ memberId: uuid, nickname: z.string() })),
+});
+export type ProgrammeView = z.infer<typeof programmeView>;
+
+/** Assigns a set, or changes how it is trained. `version` 0 for a set that is not in the programme yet. */
+export const assignSetInput = z.strictObject({
+  setKey: z.string().min(1).max(60),
+  pinnedEdition: z.int().min(1).nullable(),
+  limitMs: z.int().min(500, 'At least half a second.').max(60_000, 'At most 60 seconds.'),
+  asksAuf: z.boolean(),
+  forEveryone: z.boolean(),
+  memberIds: z.array(uuid).max(500),
+  version: z.int().min(0),
+});
+export type AssignSetInput = z.infer<typeof assignSetInput>;
+
+export const withdrawSetInput = z.strictObject({ setKey: z.string().max(60), version: z.int().min(1) });
+export type WithdrawSetInput = z.infer<typeof withdrawSetInput>;

@@ -1,0 +1,82 @@
+import type {
+  AssignSetInput,
+  MemberPageView,
+  ProgrammeView,
+  SquadView,
+  StandingsView,
+  WithdrawSetInput,
+} from './desk.ts';
+import { endpoint } from './endpoint.ts';
+import type {
+  CatalogueView,
+  DiscardInput,
+  DraftView,
+  EditionView,
+  IntakeView,
+  PublishInput,
+  SettleLineInput,
+  UploadInput,
+} from './intake.ts';
+import type { ClubView, FormView, MemberSettings, MyCasesView, MyCaseView } from './member.ts';
+import type { SessionView, SignedIn, SignInInput, SignInPage, SwitchClubInput } from './session.ts';
+import type { AnswersInput, AnswersResult, MisTapInput, TodayView } from './today.ts';
+
+type Nothing = Record<string, never>;
+
+/** Every endpoint of the API. The server's table (server/api/contract.ts) must list each of them. */
+export const endpoints = {
+  signInPage: endpoint<Nothing, SignInPage>('signInPage', 'GET', '/api/sign-in-page'),
+  signIn: endpoint<SignInInput, SignedIn>('signIn', 'POST', '/api/session'),
+  readSession: endpoint<Nothing, SessionView>('readSession', 'GET', '/api/session'),
+  refreshSession: endpoint<Nothing, SessionView>('refreshSession', 'POST', '/api/session/refresh'),
+  switchClub: endpoint<SwitchClubInput, SignedIn>('switchClub', 'POST', '/api/session/club'),
+  signOut: endpoint<Nothing, Nothing>('signOut', 'DELETE', '/api/session'),
+
+  today: endpoint<Nothing, TodayView>('today', 'GET', '/api/today'),
+  answer: endpoint<AnswersInput, AnswersResult>('answer', 'POST', '/api/today/answers'),
+  misTap: endpoint<MisTapInput, TodayView>('misTap', 'POST', '/api/today/mis-taps'),
+  myCases: endpoint<Nothing, MyCasesView>('myCases', 'GET', '/api/cases'),
+  myCase: endpoint<{ key: string }, MyCaseView>('myCase', 'GET', '/api/cases/:key'),
+  form: endpoint<Nothing, FormView>('form', 'GET', '/api/form'),
+  club: endpoint<Nothing, ClubView>('club', 'GET', '/api/club'),
+  changeSettings: endpoint<MemberSettings, MemberSettings>('changeSettings', 'PUT', '/api/settings'),
+
+  squad: endpoint<Nothing, SquadView>('squad', 'GET', '/api/desk/squad'),
+  memberPage: endpoint<{ memberId: string }, MemberPageView>(
+    'memberPage',
+    'GET',
+    '/api/desk/members/:memberId',
+  ),
+  standings: endpoint<{ setKey?: string }, StandingsView>('standings', 'GET', '/api/desk/standings'),
+  programme: endpoint<Nothing, ProgrammeView>('programme', 'GET', '/api/desk/programme'),
+  assignSet: endpoint<AssignSetInput, ProgrammeView>('assignSet', 'PUT', '/api/desk/programme/:setKey'),
+  withdrawSet: endpoint<WithdrawSetInput, ProgrammeView>(
+    'withdrawSet',
+    'DELETE',
+    '/api/desk/programme/:setKey',
+  ),
+
+  intake: endpoint<Nothing, IntakeView>('intake', 'GET', '/api/admin/intake'),
+  upload: endpoint<UploadInput, { draftId: string }>('upload', 'POST', '/api/admin/intake'),
+  draft: endpoint<{ draftId: string }, DraftView>('draft', 'GET', '/api/admin/intake/:draftId'),
+  settleLine: endpoint<SettleLineInput, DraftView>(
+    'settleLine',
+    'PATCH',
+    '/api/admin/intake/:draftId/lines/:line',
+  ),
+  publish: endpoint<PublishInput, { setKey: string; edition: number }>(
+    'publish',
+    'POST',
+    '/api/admin/intake/:draftId/publish',
+  ),
+  discard: endpoint<DiscardInput, IntakeView>('discard', 'POST', '/api/admin/intake/:draftId/discard'),
+  catalogue: endpoint<Nothing, CatalogueView>('catalogue', 'GET', '/api/admin/catalogue'),
+  edition: endpoint<{ setKey: string; number: number }, EditionView>(
+    'edition',
+    'GET',
+    '/api/admin/catalogue/:setKey/:number',
+  ),
+} as const;
+
+export type Endpoints = typeof endpoints;
+export type EndpointName = keyof Endpoints;
