@@ -1,0 +1,48 @@
+import { dehydrate, QueryClient } from '@tanstack/react-query';
+import { redirect, render } from 'vike/abort';
+import type { PageContextServer } from 'vike/types';
+import { type Call, callKey } from '#shared/contracts/endpoint.ts';
+import type { SessionView } from '#shared/contracts/session.ts';
+import { type Area, type AreaData, routeOf } from './area.tsx';
+
+/** Lets only these roles into an area; the signed-out go to the sign-in page and come back afterwards. */
+export async function guardArea(
+  pageContext: PageContextServer,
+  roles: readonly SessionView['role'][],
+): Promise<void> {
+  const session = await pageContext.server?.readSession();
+  if (!session) throw redirect(signInPath(pageContext));
+  if (!roles.includes(session.role)) throw render(403);
+}
+
+/**
+ * Makes the calls of the screen at this URL and hands over their answers. Ends the request with 404, 403 or the
+ * sign-in page where the server says so.
+ */
+export async function loadArea(area: Area, pageContext: PageContextServer): Promise<AreaData> {
+  const { server, urlParsed } = pageContext;
+  if (!server) throw new Error('loadArea runs on the server.');
+  const session = await server.readSession();
+  if (!session) throw redirect(signInPath(pageContext));
+  const found = routeOf(area, urlParsed.pathname);
+  if (!found) throw render(404);
+  const client = new QueryClient();
+  for (const call of found.route.calls(found.params, urlParsed.search)) {
+    const answer = await server.run(call as Call<unknown, unknown>);
+    if (!answer.ok) {
+      if (answer.status === 401) throw redirect(signInPath(pageContext));
+      throw render(
+        answer.status === 403 || answer.status === 404 || answer.status === 503 ? answer.status : 500,
+        answer.detail,
+      );
+    }
+    client.setQueryData(callKey(call as Call<unknown, unknown>), answer.data);
+  }
+  return { title: found.route.title, session, queries: dehydrate(client) };
+}
+
+/** The sign-in page, coming back here afterwards. */
+function signInPath(pageContext: PageContextServer): string {
+  const { pathnameOriginal, searchOriginal } = pageContext.urlParsed;
+  return `/sign-in?next=${encodeURIComponent(`${pathnameOriginal}${searchOriginal ?? ''}`)}`;
+}

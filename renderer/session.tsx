@@ -1,0 +1,15 @@
+import { createContext, type ReactNode, useContext } from 'react';
+import type { SessionView } from '#shared/contracts/session.ts';
+
+const Context = createContext<SessionView | null>(null);
+
+export function SessionProvider({ value, children }: { value: SessionView; children: ReactNode }) {
+  return <Context value={value}>{children}</Context>;
+}
+
+/** Who is signed in, and in which club. Only inside an area. */
+export function useSession(): SessionView {
+  const session = useContext(Context);
+  if (!session) throw new Error('useSession outside of an area.');
+  return session;
+}
