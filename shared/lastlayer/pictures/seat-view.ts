@@ -1,0 +1,135 @@
+import type { Colouring } from './colours.ts';
+import { type FaceMap, hatchPath, type Point, polygonPath, svgElement, tilePath } from './geometry.ts';
+import { PALETTES, type Palette } from './palettes.ts';
+import { type Site, type Stickers, stickerAt } from './stickers.ts';
+import { HATCH_PAPER, INK, type Tile, tileMarkup } from './tiles.ts';
+
+/** Which second side a person sees: the right one, or the left one. */
+export type Holding = 'right' | 'left';
+
+export interface SeatViewOptions {
+  readonly stickers: Stickers;
+  readonly colouring: Colouring;
+  readonly holding: Holding;
+  readonly palette?: Palette;
+  /** Lays each colour's letter on it. */
+  readonly letters?: boolean;
+  /** Text alternative; without one the drawing is hidden from assistive technology. */
+  readonly title?: string;
+}
+
+/** One piece is 100 units wide; depth k goes to (0.47 k, −0.42 k), a cabinet projection. */
+const CELL = 100;
+const SPAN = 3 * CELL;
+const DEPTH_X = 0.47;
+const DEPTH_Y = 0.42;
+const FOOT = 49;
+const WIDTH = SPAN * (1 + DEPTH_X);
+
+/** Room for the layer, the row of centres below it and their outlines. */
+export const SEAT_VIEW_BOX = `-8 -134 ${WIDTH + 16} 286`;
+
+interface Scene {
+  readonly rim: string;
+  readonly foot: string;
+  readonly tiles: readonly { site: Site; tile: Tile }[];
+  readonly centres: readonly { face: 'F' | 'R' | 'L'; tile: Tile }[];
+}
+
+/** All geometry of one way of holding and one kind of body; the left-front view is the mirror image. */
+function scene(holding: Holding, body: Palette['body']): Scene {
+  const place = (x: number, y: number): Point => (holding === 'left' ? [WIDTH - x, y] : [x, y]);
+  const front: FaceMap = (a, b) => place(a, b);
+  const top: FaceMap = (a, k) => place(a + DEPTH_X * k, -DEPTH_Y * k);
+  const side: FaceMap = (k, b) => place(SPAN + DEPTH_X * k, b - DEPTH_Y * k);
+  const [gap, radius] = body === 'black' ? [5, 8.5] : [1.6, 11];
+
+  const tile = (map: FaceMap, a: number, b: number, letterSize: number): Tile => ({
+    path: tilePath(map, a + gap, b + gap, a + CELL - gap, b + CELL - gap, radius),
+    hatch: hatchPath(map, a + gap + 3, b + gap + 3, a + CELL - gap - 3, b + CELL - gap - 3, 15),
+    middle: map(a + CELL / 2, b + CELL / 2),
+    letterSize,
+  });
+  const centre = (map: FaceMap, a: number, letterSize: number): Tile => ({
+    path: tilePath(map, a + 6.5, CELL + 10.5, a + CELL - 6.5, CELL + FOOT - 6.5, 4.5),
+    hatch: '',
+    middle: map(a + CELL / 2, CELL + 2 + FOOT / 2),
+    letterSize,
+  });
+
+  const columns = [0, 1, 2];
+  // Mirrored, what is drawn leftmost belongs to the other end of the row.
+  const column = (k: number) => (holding === 'left' ? 2 - k : k);
+  return {
+    rim: polygonPath([
+      front(0, 0),
+      top(0, SPAN),
+      top(SPAN, SPAN),
+      side(SPAN, CELL),
+      front(SPAN, CELL),
+      front(0, CELL),
+    ]),
+    foot: polygonPath([
+      front(0, CELL),
+      front(SPAN, CELL),
+      side(SPAN, CELL),
+      side(SPAN, CELL + FOOT),
+      front(SPAN, CELL + FOOT),
+      front(0, CELL + FOOT),
+    ]),
+    tiles: [
+      ...columns.flatMap((row) =>
+        columns.map((k) => ({
+          site: ['top', row * 3 + column(k)] as const,
+          tile: tile(top, k * CELL, (2 - row) * CELL, 30),
+        })),
+      ),
+      ...columns.map((k) => ({ site: ['front', column(k)] as const, tile: tile(front, k * CELL, 0, 44) })),
+      ...columns.map((k) => ({
+        site: holding === 'left' ? (['left', 2 - k] as const) : (['right', k] as const),
+        tile: tile(side, k * CELL, 0, 32),
+      })),
+    ],
+    centres: [
+      ...columns.map((k) => ({ face: 'F' as const, tile: centre(front, k * CELL, 26) })),
+      ...columns.map((k) => ({
+        face: holding === 'left' ? ('L' as const) : ('R' as const),
+        tile: centre(side, k * CELL, 24),
+      })),
+    ],
+  };
+}
+
+const scenes = new Map<string, Scene>();
+
+function sceneFor(holding: Holding, body: Palette['body']): Scene {
+  const key = `${holding} ${body}`;
+  const known = scenes.get(key) ?? scene(holding, body);
+  scenes.set(key, known);
+  return known;
+}
+
+/** The drawing inside the svg element of {@link seatViewSvg}. */
+export function seatViewInner(options: SeatViewOptions): string {
+  const { stickers, colouring, holding, palette = PALETTES.standard, letters = false } = options;
+  const { rim, foot, tiles, centres } = sceneFor(holding, palette.body);
+  const style = { colouring, palette, letters, kind: 'cube' } as const;
+  return [
+    `<path class="cube-rim" d="${rim}" fill="none" stroke="none" stroke-width="14" stroke-linejoin="round"/>`,
+    `<path class="cube-foot" d="${foot}" fill="${HATCH_PAPER}" stroke="${INK}" stroke-width="2" stroke-linejoin="round"/>`,
+    ...centres.map(({ face, tile }) => tileMarkup(tile, face, { ...style, pale: true })),
+    `<path class="cube-body" d="${rim}" fill="${INK}" stroke="${INK}" stroke-width="9" stroke-linejoin="round"/>`,
+    '<g stroke-width="1.6">',
+    ...tiles.map(({ site, tile }) => tileMarkup(tile, stickerAt(stickers, site), style)),
+    '</g>',
+  ].join('');
+}
+
+/**
+ * A last layer as it looks from the holder's seat: the front face square on, the top and one side in
+ * cabinet projection, and below it the front and side centres in pale, so that the AUF can be seen.
+ * The markup is the same for every state but for fills, strokes and letters of the stickers.
+ */
+export function seatViewSvg(options: SeatViewOptions): string {
+  return svgElement('seat-view', SEAT_VIEW_BOX, seatViewInner(options), options.title);
+}
