@@ -1,0 +1,99 @@
+/** What of a last layer is looked at or already done: aspects, entry conditions, and seeing through them. */
+import { FLIP_ACT, PERMUTATION_ACT, TWIST_ACT } from './action.ts';
+import { cornerRank, edgeRank, FLIPS, flipOf, TWISTS, twistOf } from './state.ts';
+
+/** Corner orientation, edge orientation, corner permutation, edge permutation. */
+export type Aspect = 'co' | 'eo' | 'cp' | 'ep';
+export const ASPECTS: readonly Aspect[] = ['co', 'eo', 'cp', 'ep'];
+
+/** Which states reach a step. "corners" are permuted up to AUF and oriented. */
+export type Entry = 'any' | 'eo' | 'co' | 'co+eo' | 'corners' | 'corners+eo';
+export const ENTRIES: readonly Entry[] = ['any', 'eo', 'co', 'co+eo', 'corners', 'corners+eo'];
+
+const FIXED: Readonly<Record<Entry, readonly Aspect[]>> = {
+  any: [],
+  eo: ['eo'],
+  co: ['co'],
+  'co+eo': ['co', 'eo'],
+  corners: ['co', 'cp'],
+  'corners+eo': ['co', 'eo', 'cp'],
+};
+
+export const isEntry = (word: string): word is Entry => (ENTRIES as readonly string[]).includes(word);
+export const isAspect = (word: string): word is Aspect => (ASPECTS as readonly string[]).includes(word);
+
+/** The aspects an entry condition has already solved (cp up to AUF). */
+export const fixedBy = (entry: Entry): readonly Aspect[] => FIXED[entry];
+
+/** Aspects in the order co, eo, cp, ep, each once. */
+export const inOrder = (aspects: Iterable<Aspect>): readonly Aspect[] => {
+  const wanted = new Set(aspects);
+  return ASPECTS.filter((aspect) => wanted.has(aspect));
+};
+
+/** What a case of a set is seen through: the aspects told apart together with those the entry fixes. */
+export const seenThrough = (entry: Entry, toldApart: readonly Aspect[]): readonly Aspect[] =>
+  inOrder([...FIXED[entry], ...toldApart]);
+
+/** Solved up to AUF: the four corner permutations that are turns of the top. */
+const isTurnOfTop = (rank: number): boolean =>
+  [0, 1, 2, 3].some((turn) => PERMUTATION_ACT[turn * 4] === rank);
+
+/** Whether a state reaches the step with this entry condition. `index` 0..62207. */
+export function isEntryState(entry: Entry, index: number): boolean {
+  return FIXED[entry].every((aspect) => {
+    if (aspect === 'co') return twistOf(index) === 0;
+    if (aspect === 'eo') return flipOf(index) === 0;
+    return isTurnOfTop(cornerRank(index));
+  });
+}
+
+/** Whether these aspects of a state are solved, permutations together up to one AUF after. */
+export function isSolvedIn(index: number, aspects: readonly Aspect[]): boolean {
+  if (aspects.includes('co') && twistOf(index) !== 0) return false;
+  if (aspects.includes('eo') && flipOf(index) !== 0) return false;
+  const corners = aspects.includes('cp');
+  const edges = aspects.includes('ep');
+  if (!corners && !edges) return true;
+  for (let turn = 0; turn < 4; turn++) {
+    const solved = PERMUTATION_ACT[turn * 4];
+    if ((!corners || cornerRank(index) === solved) && (!edges || edgeRank(index) === solved)) return true;
+  }
+  return false;
+}
+
+/** A state seen through some aspects only, as one number below 124,416; the rest counts as solved. */
+export type View = number;
+export const VIEWS = 24 * 24 * TWISTS * FLIPS;
+
+/** A reader of views for these aspects: state index to view. */
+export function viewer(aspects: readonly Aspect[]): (index: number) => View {
+  const [co, eo, cp, ep] = ASPECTS.map((aspect) => aspects.includes(aspect));
+  return (index) =>
+    (((cp ? cornerRank(index) : 0) * 24 + (ep ? edgeRank(index) : 0)) * TWISTS + (co ? twistOf(index) : 0)) *
+      FLIPS +
+    (eo ? flipOf(index) : 0);
+}
+
+/**
+ * The sixteen images of views through these aspects, as `(view, turn) => view` with turn = before·4 + after.
+ * An aspect not looked at stays solved.
+ */
+export function viewTurner(aspects: readonly Aspect[]): (view: View, turn: number) => View {
+  const cp = aspects.includes('cp');
+  const ep = aspects.includes('ep');
+  return (view, turn) => {
+    const permutations = Math.floor(view / 216);
+    const before = turn >> 2;
+    const corners = Math.floor(permutations / 24);
+    const edges = permutations % 24;
+    return (
+      (((cp ? PERMUTATION_ACT[corners * 16 + turn]! : 0) * 24 +
+        (ep ? PERMUTATION_ACT[edges * 16 + turn]! : 0)) *
+        TWISTS +
+        TWIST_ACT[(Math.floor(view / FLIPS) % TWISTS) * 4 + before]!) *
+        FLIPS +
+      FLIP_ACT[(view % FLIPS) * 4 + before]!
+    );
+  };
+}

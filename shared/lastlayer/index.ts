@@ -1,0 +1,24 @@
+export { AUFS, type Auf, act, canonical, inverse, mirror, product } from './action.ts';
+export {
+  ASPECTS,
+  type Aspect,
+  ENTRIES,
+  type Entry,
+  fixedBy,
+  isAspect,
+  isEntry,
+  isEntryState,
+  isSolvedIn,
+  seenThrough,
+} from './aspects.ts';
+export { buildCaseSet, type CaseOfSet, type CaseSet, caseSet } from './case-set.ts';
+export { OFFERED_WHOLE } from './clusters.ts';
+export { burnsideTable, type CaseCount, countCases, type FixedStates } from './counting.ts';
+export type { Move } from './moves.ts';
+export { type Expander, type ParsedAlgorithm, parseAlgorithm } from './notation.ts';
+export { type Reading, readAlgorithm } from './reading.ts';
+export { cancelledKey, sameAlgorithm } from './same-algorithm.ts';
+export { AlgorithmSyntaxError } from './scanner.ts';
+export { CASE_SETS, type CaseSetDefinition, caseKey } from './sets.ts';
+export { rightAufsAfter, rightAufsBefore, type Solves, solvesCase } from './solving.ts';
+export { type LastLayerState, STATES, stateAt, stateIndex } from './state.ts';
