@@ -1,5 +1,6 @@
 import { spawn } from 'node:child_process';
 import { createInterface } from 'node:readline';
+import { PlainError } from './plain-error.mjs';
 import { processBirth, signal, waitForEnd } from './processes.mjs';
 
 /**
@@ -9,6 +10,7 @@ import { processBirth, signal, waitForEnd } from './processes.mjs';
 export class Children {
   #alive = new Map();
   #onChange;
+  #closed = false;
 
   /** @param {(alive: {pid: number, birth: string}[]) => void} [onChange] Told whenever one begins or ends. */
   constructor(onChange = () => {}) {
@@ -17,6 +19,7 @@ export class Children {
 
   /** Starts a program. Options are those of node:child_process spawn. */
   start(command, args, options = {}) {
+    if (this.#closed) throw new PlainError('Stopping.');
     const child = spawn(command, args, { ...options, detached: true });
     if (child.pid !== undefined) {
       const { pid } = child;
@@ -55,9 +58,19 @@ export class Children {
     });
   }
 
+  /** From now on nothing more is started: `start` throws. */
+  close() {
+    this.#closed = true;
+  }
+
   /** Ends whatever still runs: asked first, after `grace` ms not asked any more. */
   async endAll(grace = 3_000) {
     await Promise.all([...this.#alive.values()].map((child) => endGroup(child, grace)));
+  }
+
+  /** Ends whatever still runs, at once. */
+  killAll() {
+    for (const { pid } of this.#alive.values()) signal(-pid, 'SIGKILL');
   }
 }
 

@@ -101,6 +101,8 @@ const boardRow = z.strictObject({
   rank: z.int().nullable(),
   nickname: z.string(),
   isMe: z.boolean(),
+  /** Days of the period the figure is the mean of. */
+  daysCounted: z.int(),
   figure,
 });
 export const standingsBoard = z.strictObject({

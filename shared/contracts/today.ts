@@ -124,8 +124,16 @@ export const verdict = z.strictObject({
 });
 export type Verdict = z.infer<typeof verdict>;
 
-/** Progress after the answers, and showings newly issued (a miss returns; the queue runs ahead). */
-export const answersResult = z.strictObject({ verdicts: z.array(verdict), today: todayView });
+/**
+ * Progress after the answers, and showings newly issued (a miss returns; the queue runs ahead). An answer that
+ * can never be taken is refused by itself, so that one does not hold up the others; when all are, the whole
+ * request is (422).
+ */
+export const answersResult = z.strictObject({
+  verdicts: z.array(verdict),
+  refused: z.array(z.strictObject({ id: uuid, detail: z.string() })),
+  today: todayView,
+});
 export type AnswersResult = z.infer<typeof answersResult>;
 
 export const misTapInput = z.strictObject({ reviewId: uuid, at: z.number() });

@@ -1,0 +1,79 @@
+import { and, eq, inArray } from 'drizzle-orm';
+import { type Transaction, tables } from '#database/client.ts';
+import { type CaseMemory, foldCase, type LogRow } from '#shared/memory/index.ts';
+import type { ClubActor } from '../context.ts';
+import { groupBy } from '../group-by.ts';
+import { logOfCases, type ReviewRow } from './day-counts.ts';
+
+/** A row of the log as the fold takes it. */
+export function logRow(row: ReviewRow, misTaps: ReadonlySet<string>): LogRow {
+  return {
+    id: row.reviewId,
+    answeredAt: row.answeredAt.getTime(),
+    localDay: row.localDay,
+    outcome: row.outcome,
+    scored: row.scored,
+    keysOffered: row.keysOffered,
+    misTapped: misTaps.has(row.reviewId),
+  };
+}
+
+/**
+ * Folds the whole log of these cases anew and writes what follows from it: the cases' memory and their first
+ * answers of each day. The same code serves an answer, a late answer, a mis-tap and a rebuild.
+ */
+export async function foldCases(
+  tx: Transaction,
+  actor: Pick<ClubActor, 'clubId' | 'memberId'>,
+  caseKeys: readonly string[],
+): Promise<Map<string, CaseMemory>> {
+  const { caseState, firstAnswer } = tables;
+  const folded = new Map<string, CaseMemory>();
+  if (caseKeys.length === 0) return folded;
+  const { rows, misTaps } = await logOfCases(tx, actor, caseKeys);
+  const byCase = groupBy(rows, (row) => row.caseKey);
+  const states: (typeof caseState.$inferInsert)[] = [];
+  const firsts: (typeof firstAnswer.$inferInsert)[] = [];
+  for (const [caseKey, log] of byCase) {
+    const setKey = log[0]?.setKey ?? '';
+    const onBoards = new Map(log.map((row) => [row.reviewId, row.onBoards && !row.carried]));
+    const fold = foldCase(log.map((row) => logRow(row, misTaps)));
+    if (fold.memory) {
+      folded.set(caseKey, fold.memory);
+      const { lastId, ...memory } = fold.memory;
+      states.push({
+        clubId: actor.clubId,
+        memberId: actor.memberId,
+        caseKey,
+        setKey,
+        ...memory,
+        lastReviewId: lastId,
+      });
+    }
+    for (const first of fold.firsts) {
+      firsts.push({
+        clubId: actor.clubId,
+        memberId: actor.memberId,
+        caseKey,
+        setKey,
+        localDay: first.localDay,
+        reviewId: first.id,
+        recallBefore: first.recallBefore,
+        keysOffered: first.keysOffered,
+        held: first.held,
+        onBoards: onBoards.get(first.id) ?? true,
+      });
+    }
+  }
+  const mine = (table: typeof caseState | typeof firstAnswer) =>
+    and(
+      eq(table.clubId, actor.clubId),
+      eq(table.memberId, actor.memberId),
+      inArray(table.caseKey, [...caseKeys]),
+    );
+  await tx.delete(caseState).where(mine(caseState));
+  await tx.delete(firstAnswer).where(mine(firstAnswer));
+  if (states.length > 0) await tx.insert(caseState).values(states);
+  if (firsts.length > 0) await tx.insert(firstAnswer).values(firsts);
+  return folded;
+}

@@ -1,0 +1,122 @@
+import { and, eq, max } from 'drizzle-orm';
+import { type Transaction, tables } from '#database/client.ts';
+import { colouringsFor } from '#shared/lastlayer/pictures/index.ts';
+import { DEFAULT_COSTS, newCaseCap, planQueue, type QueueItem } from '#shared/memory/index.ts';
+import type { Ctx } from '../context.ts';
+import { newId } from '../new-id.ts';
+import { BETA, cardsOf, type DayCard } from './cards.ts';
+import { type ReviewRow, spentMs } from './day-counts.ts';
+import { gridOf, gridsOf } from './grid.ts';
+import type { ShowingRow, TrainedSet, TrainingDay } from './training-day.ts';
+
+/** Seconds a showing is reckoned to take until a member's own are learned. */
+export const COSTS = DEFAULT_COSTS;
+
+/** This many showings are issued ahead of their answers. */
+const AHEAD = 12;
+
+/** Places between two showings of the queue, so that a missed case can come back in between. */
+export const STEP = 100;
+
+export interface DayPlan {
+  readonly cards: readonly DayCard[];
+  /** Seconds of the day's minutes already used. */
+  readonly spentSeconds: number;
+  /** What is still to be issued after the open showings, in order. */
+  readonly queue: readonly QueueItem[];
+  readonly open: readonly ShowingRow[];
+}
+
+/** What the rest of the member's minutes go to, given the day's answers and the showings already issued. */
+export function planRest(
+  day: TrainingDay,
+  open: readonly ShowingRow[],
+  answers: readonly ReviewRow[],
+): DayPlan {
+  const cards = cardsOf(day);
+  const spentSeconds = answers.reduce((sum, a) => sum + spentMs(a), 0) / 1000;
+  const returning = open.filter((s) => s.reason === 'retest').length * COSTS.retest;
+  const metToday = cards.filter((card) => card.memory?.firstDay === day.day).length;
+  const seconds = day.member.minutesPerDay * 60;
+  const issued = new Set(open.map((s) => s.caseKey));
+  // The plan is made over all cases each time, the issued ones among them: their share of the minutes is theirs.
+  const queue = planQueue({
+    cards,
+    day: day.day,
+    beta: BETA,
+    seconds: Math.max(0, seconds - spentSeconds - returning),
+    newCap: Math.max(0, newCaseCap(seconds, COSTS) - metToday),
+    costs: COSTS,
+  }).filter(({ key }) => !issued.has(key));
+  return { cards, spentSeconds, queue, open };
+}
+
+/** Issues the next showings of the plan, up to what is kept ahead. */
+export async function issueShowings(
+  ctx: Ctx,
+  tx: Transaction,
+  day: TrainingDay,
+  plan: DayPlan,
+): Promise<ShowingRow[]> {
+  const wanted = plan.queue.slice(0, Math.max(0, AHEAD - plan.open.length));
+  if (wanted.length === 0) return [];
+  const byKey = new Map(plan.cards.map((card) => [card.key, card]));
+  let position = Math.max(0, ...plan.open.map((s) => s.position), await lastPosition(tx, day));
+  const rows = wanted.flatMap(({ key, kind }) => {
+    const card = byKey.get(key);
+    if (!card) return [];
+    position += STEP;
+    return [makeShowing(ctx, day, card.trained, key, kind, position)];
+  });
+  return tx.insert(tables.showing).values(rows).returning();
+}
+
+/** Position of the day's last showing, answered or not; 0 before the first. */
+export async function lastPosition(tx: Transaction, day: TrainingDay): Promise<number> {
+  const { showing } = tables;
+  const [row] = await tx
+    .select({ last: max(showing.position) })
+    .from(showing)
+    .where(
+      and(
+        eq(showing.clubId, day.actor.clubId),
+        eq(showing.memberId, day.actor.memberId),
+        eq(showing.localDay, day.day),
+      ),
+    );
+  return row?.last ?? 0;
+}
+
+/** A showing of a case: a full state drawn uniformly from its weight, a colouring from the member's colours. */
+export function makeShowing(
+  ctx: Ctx,
+  day: TrainingDay,
+  trained: TrainedSet,
+  caseKey: string,
+  reason: ShowingRow['reason'],
+  position: number,
+): typeof tables.showing.$inferInsert {
+  const { entry, set, content } = trained;
+  const c = set.byKey(caseKey);
+  if (!c) throw new RangeError(`${caseKey} is no case of ${set.definition.name}.`);
+  const colourings = colouringsFor(day.member.crossColours);
+  const now = ctx.clock.now();
+  return {
+    clubId: day.actor.clubId,
+    memberId: day.actor.memberId,
+    showingId: newId(ctx),
+    setKey: entry.setKey,
+    caseKey,
+    editionNumber: entry.edition,
+    state: set.drawState(c, ctx.random),
+    colouring: colourings[Math.floor(ctx.random() * colourings.length)] ?? 0,
+    cluster: c.cluster,
+    keysOffered: gridsOf(set, content)[gridOf(c)]?.length ?? 1,
+    limitMs: entry.limitMs,
+    asksAuf: entry.asksAuf,
+    reason,
+    localDay: day.day,
+    position,
+    issuedAt: new Date(now),
+  };
+}
