@@ -29,12 +29,15 @@ export async function lockFolder(dataDir) {
     // Only the lock that was looked at is removed, not one that a third process has taken meanwhile.
     if (readJson(file)?.birth === other?.birth) rmSync(file, { force: true });
   }
+  let released = false;
   return {
     keep(children) {
+      if (released) return;
       mine.children = children;
       writeJson(file, mine);
     },
     release() {
+      released = true;
       if (readJson(file)?.birth === mine.birth) rmSync(file, { force: true });
     },
   };

@@ -1,5 +1,6 @@
 import type { AnswerKey } from '#shared/contracts/today.ts';
 import type { CaseOfSet, CaseSet } from '#shared/lastlayer/index.ts';
+import { todayWords } from '#shared/text/today-words.ts';
 import type { EditionContent } from '../catalogue/read-edition.ts';
 
 /** Up to this many cases a set offers every name, in a fixed grid (product.md's rule for answers). */
@@ -28,6 +29,7 @@ export function gridsOf(set: CaseSet, content: EditionContent): Record<string, A
     grids[grid].push({ key, label: name, algorithm: algorithms[0]?.algorithm ?? '' });
   }
   const all = grids.all;
-  if (all && set.cases.length <= ALL_NAMES) all.push({ key: SOLVED, label: '', algorithm: '' });
+  if (all && set.cases.length <= ALL_NAMES)
+    all.push({ key: SOLVED, label: todayWords.solved, algorithm: '' });
   return grids;
 }

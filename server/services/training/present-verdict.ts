@@ -1,9 +1,10 @@
 import type { Transaction } from '#database/client.ts';
 import type { Verdict } from '#shared/contracts/today.ts';
-import { caseSet, differsAt, nearestView, rightAufsBefore } from '#shared/lastlayer/index.ts';
+import { caseSet, differsAt, nearestView, rightAufsBefore, seenThrough } from '#shared/lastlayer/index.ts';
 import { stickersOf } from '#shared/lastlayer/pictures/index.ts';
 import { caseStateName, dueDay, wantedRecall } from '#shared/memory/index.ts';
 import { findingsText } from '#shared/text/findings.ts';
+import { todayWords } from '#shared/text/today-words.ts';
 import { readEditionContent } from '../catalogue/read-edition.ts';
 import { isoDate } from '../standing/local-date.ts';
 import { BETA, cardsOf, type DayCard } from './cards.ts';
@@ -41,7 +42,13 @@ async function presentVerdict(
   const content = await readEditionContent(tx, row.setKey, row.editionNumber);
   const algorithm = algorithmShown(content, row.caseKey);
   const named = row.caseRight ? undefined : row.named === 'solved' ? set.skip : set.byKey(row.named);
-  const view = named ? nearestView(set, row.state, named) : null;
+  const view = named ? nearestView(set, row.state, named, day.member.holding) : null;
+  const seen = seenThrough(set.definition.entry, set.definition.toldApart);
+  const difference = view === null ? null : differsAt(row.state, view, day.member.holding, seen);
+  const name = content.cases.get(row.caseKey)?.name ?? '';
+  const namedName = named?.skip
+    ? todayWords.solved
+    : (content.cases.get(named?.key ?? '')?.name ?? named?.name ?? '');
   const memory = day.memory.get(row.caseKey) ?? null;
   const wanted = card?.wanted ?? wantedRecall(1, 1, BETA);
   return {
@@ -56,7 +63,7 @@ async function presentVerdict(
     limitMs: row.limitMs,
     was: {
       key: row.caseKey,
-      name: content.cases.get(row.caseKey)?.name ?? '',
+      name,
       setName: set.definition.name,
       picture: { stickers: stickersOf(row.state), colouring: row.colouring },
       algorithm,
@@ -66,18 +73,11 @@ async function presentVerdict(
       named && view !== null
         ? {
             key: named.key,
-            name: named.skip ? findingsText.solved : (content.cases.get(named.key)?.name ?? named.name),
+            name: namedName,
             picture: { stickers: stickersOf(view), colouring: row.colouring },
           }
         : null,
-    differsAt:
-      named && view !== null
-        ? findingsText.differsAt(
-            differsAt(row.state, view, day.member.holding),
-            content.cases.get(row.caseKey)?.name ?? '',
-            named.skip ? findingsText.solved : (content.cases.get(named.key)?.name ?? named.name),
-          )
-        : null,
+    differsAt: difference ? findingsText.differs(difference, name, namedName) : null,
     lostBy: row.lostBy,
     back: { thisSitting: returns, date: memory ? isoDate(dueDay(memory, wanted)) : null },
     state: caseStateName(memory, day.day, wanted),
