@@ -20,7 +20,9 @@ export interface Column<Row> {
   /** This column names its row. */
   readonly rowHeader?: boolean;
   readonly sort?: ColumnSort;
-  /** Extra classes for the column's cells: widths, wrapping. */
+  /** Keeps its text on one line; the table scrolls sideways instead. */
+  readonly nowrap?: boolean;
+  /** Extra classes for the column's cells: widths. */
   readonly className?: string;
 }
 
@@ -101,7 +103,12 @@ export function DataTable<Row>(props: DataTableProps<Row>) {
 const SCROLLABLE = { tabIndex: 0, className: 'scroll-region overflow-x-auto' };
 
 function cell<Row>(column: Column<Row>): string {
-  return cx('pe-4 last:pe-0', column.align === 'end' ? 'text-end' : 'text-start', column.className);
+  return cx(
+    'pe-4 last:pe-0',
+    column.align === 'end' ? 'text-end' : 'text-start',
+    column.nowrap && 'whitespace-nowrap',
+    column.className,
+  );
 }
 
 const ARROWS: Readonly<Record<SortDirection, string>> = { ascending: '▲', descending: '▼', none: '' };

@@ -21,6 +21,12 @@ function percent(share: number): string {
   return `${(Math.min(1, Math.max(0, share)) * 100).toFixed(2)}%`;
 }
 
+/** The interval as drawn: inside the axis, and never so narrow that it vanishes. */
+function bar(low: number, high: number): { x: string; width: string } {
+  const width = Math.max(0.02, Math.min(1, high) - Math.max(0, low));
+  return { x: percent(Math.min(Math.max(0, low), 1 - width)), width: percent(width) };
+}
+
 /** A number; under it an axis from 0 to 1 with a tick (the figure) and a bar (its interval). */
 export function FigureBar(props: FigureBarProps) {
   const { figure, text, label, hollow = false, strong = false, delta, bare = false } = props;
@@ -38,8 +44,7 @@ export function FigureBar(props: FigureBarProps) {
         {figure && (
           <>
             <rect
-              x={percent(figure.low)}
-              width={percent(Math.max(0.02, Math.min(1, figure.high) - Math.max(0, figure.low)))}
+              {...bar(figure.low, figure.high)}
               y={hollow ? 5 : 5.5}
               height={hollow ? 6 : 5}
               strokeWidth={hollow ? 1 : 0}

@@ -69,7 +69,7 @@ export function KeyGrid(props: KeyGridProps) {
         role="toolbar"
         aria-labelledby={id}
         onKeyDown={onKeyDown}
-        className={cx('grid gap-[1.5px] border-[1.5px] border-ink bg-ink', COLUMNS[columns])}
+        className={cx('grid border-s-[1.5px] border-t-[1.5px] border-ink', COLUMNS[columns])}
       >
         {keys.map((key, index) => (
           <button
@@ -85,7 +85,7 @@ export function KeyGrid(props: KeyGridProps) {
             onFocus={() => setStop(index)}
             onClick={blocked ? undefined : () => onPick(key.value)}
             className={cx(
-              'flex items-center justify-center px-1 text-center leading-tight focus-visible:z-10',
+              'relative flex items-center justify-center border-b-[1.5px] border-e-[1.5px] border-ink px-1 text-center leading-tight focus-visible:z-10',
               height === 'tall' ? 'min-h-16' : 'min-h-12',
               key.span === 2 && 'col-span-2',
               key.plain ? 'text-[1.0625rem]' : 'text-lg font-bold',
@@ -95,7 +95,14 @@ export function KeyGrid(props: KeyGridProps) {
             {key.label}
           </button>
         ))}
-        {filler(keys, columns) > 0 && <span className={cx('bg-sheet', FILL[filler(keys, columns)])} />}
+        {filler(keys, columns) > 0 && (
+          <span
+            className={cx(
+              'border-b-[1.5px] border-e-[1.5px] border-ink bg-sheet',
+              FILL[filler(keys, columns)],
+            )}
+          />
+        )}
       </div>
     </fieldset>
   );

@@ -13,8 +13,8 @@ export interface RulerTicksProps {
   readonly className?: string;
 }
 
-/** Progress of a sitting as a ruler up the picture's edge: done ticks dark, every fifth longer. */
-export function RulerTicks({ done, total, label, text, className = 'h-full w-5' }: RulerTicksProps) {
+/** Progress of a sitting as a ruler up the picture's edge: done ticks dark, every fifth longer. Stands in a row. */
+export function RulerTicks({ done, total, label, text, className = 'w-5' }: RulerTicksProps) {
   const each = Math.max(1, Math.ceil(total / MOST_TICKS));
   const count = Math.max(1, Math.ceil(total / each));
   const ticks = Array.from({ length: count }, (_, k) => k + 1);
@@ -26,9 +26,15 @@ export function RulerTicks({ done, total, label, text, className = 'h-full w-5' 
       aria-valuemax={total}
       aria-valuenow={Math.min(done, total)}
       aria-valuetext={text}
-      className={className}
+      className={cx('relative self-stretch', className)}
     >
-      <svg aria-hidden="true" focusable="false" width="100%" height="100%" className="block overflow-visible">
+      <svg
+        aria-hidden="true"
+        focusable="false"
+        width="100%"
+        height="100%"
+        className="absolute inset-0 overflow-visible"
+      >
         {ticks.map((tick) => {
           const reached = tick * each <= done;
           const y = `${(100 - ((tick - 0.5) / count) * 100).toFixed(2)}%`;

@@ -29,7 +29,7 @@ const flat: FaceMap = (a, b) => [a, b];
 function tile(x: number, y: number, width: number, height: number): Tile {
   return {
     path: tilePath(flat, x, y, x + width, y + height, RADIUS),
-    hatch: hatchPath(flat, x + 1, y + 1, x + width - 1, y + height - 1, 4.6),
+    hatch: hatchPath(flat, x + 1, y + 1, x + width - 1, y + height - 1, 4),
     middle: [x + width / 2, y + height / 2],
     letterSize: Math.min(width, height) > BAR ? 14 : 8,
   };

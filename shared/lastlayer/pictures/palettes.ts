@@ -21,7 +21,7 @@ export const PALETTES: Readonly<Record<PaletteKey, Palette>> = {
       white: '#FFFFFF',
       yellow: '#F7D038',
       green: '#2E8B57',
-      blue: '#2C5FA8',
+      blue: '#3066B2',
       orange: '#E8762C',
       red: '#C8313A',
     },

@@ -40,9 +40,10 @@ export function colourOf(sticker: Sticker, colouring: Colouring): ColourName | n
 export function tileMarkup(tile: Tile, sticker: Sticker, style: TileStyle): string {
   const colour = colourOf(sticker, style.colouring);
   if (colour === null) {
+    const thin = `stroke="${HATCH_INK}" stroke-width="${style.kind === 'flat' ? 1.1 : 1.6}"`;
     return (
-      `<path class="${style.kind}-blank" d="${tile.path}" fill="${HATCH_PAPER}" stroke="${HATCH_INK}"/>` +
-      `<path class="${style.kind}-hatch" d="${tile.hatch}" fill="none" stroke="${HATCH_INK}"/>`
+      `<path class="${style.kind}-blank" d="${tile.path}" fill="${HATCH_PAPER}" ${thin}/>` +
+      `<path class="${style.kind}-hatch" d="${tile.hatch}" fill="none" ${thin}/>`
     );
   }
   const shade = style.pale ? pale(style.palette.colours[colour]) : style.palette.colours[colour];
