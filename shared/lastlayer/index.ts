@@ -11,14 +11,25 @@ export {
   isSolvedIn,
   seenThrough,
 } from './aspects.ts';
+export {
+  type CaseLine,
+  type Finding,
+  type ReadLine,
+  type ReadLines,
+  readCaseLines,
+} from './case-lines.ts';
 export { buildCaseSet, type CaseOfSet, type CaseSet, caseSet } from './case-set.ts';
 export { OFFERED_WHOLE } from './clusters.ts';
 export { burnsideTable, type CaseCount, countCases, type FixedStates } from './counting.ts';
+export { type Difference, differsAt } from './differs-at.ts';
+export { type LostBy, lostBy } from './lost-by.ts';
 export type { Move } from './moves.ts';
+export { nearestView } from './nearest-view.ts';
 export { type Expander, type ParsedAlgorithm, parseAlgorithm } from './notation.ts';
 export { type Reading, readAlgorithm } from './reading.ts';
 export { cancelledKey, sameAlgorithm } from './same-algorithm.ts';
 export { AlgorithmSyntaxError } from './scanner.ts';
+export type { Holding } from './seat-codes.ts';
 export { CASE_SETS, type CaseSetDefinition, caseKey } from './sets.ts';
 export { rightAufsAfter, rightAufsBefore, type Solves, solvesCase } from './solving.ts';
 export { type LastLayerState, STATES, stateAt, stateIndex } from './state.ts';
