@@ -1,4 +1,5 @@
 import type { EndpointName } from '#shared/contracts/endpoints.ts';
+import { deskRows } from './desk/rows.ts';
 import type { AnyRow } from './row.ts';
 import { sessionRows } from './session/rows.ts';
 import { todayRows } from './today/rows.ts';
@@ -6,5 +7,6 @@ import { todayRows } from './today/rows.ts';
 /** The whole API. Pages rendered on the server call the same rows in process. */
 export const contract: Partial<Record<EndpointName, AnyRow>> = {
   ...sessionRows,
+  ...deskRows,
   ...todayRows,
 };

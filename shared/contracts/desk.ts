@@ -2,37 +2,57 @@ import { z } from 'zod';
 import { figure, outcome, picture, uuid } from './common.ts';
 import { dayFigure, myCase, sharedBoardView, standingsBoard } from './member.ts';
 
-export const squadCell = z.strictObject({
-  setKey: z.string(),
+/** Without a set: members × sets. With one: members × that set's groups, and all of it in the last column. */
+export const squadInput = z.strictObject({ setKey: z.string().min(1).max(60).optional() });
+
+const squadCell = z.strictObject({
   /** null: does not answer for the set. */
   figure: figure.nullable(),
-  /** Change of the figure over the last 28 days, in points; null when there was none. */
+  /** Change of the figure over the last 28 days, in points; null when there was none 28 days ago. */
   change: z.number().nullable(),
 });
-export const squadRow = z.strictObject({
+const squadRow = z.strictObject({
   memberId: uuid,
   nickname: z.string(),
   role: z.enum(['member', 'captain']),
+  /** One for each column, in their order. */
   cells: z.array(squadCell),
+  /** Scored answers of the last 28 days, of what the columns show. */
   answers: z.int(),
+  /** Local date, ISO; null: never. */
   lastTrained: z.string().nullable(),
+  /** Mean over the last 28 days, or since joining if that is shorter. */
   minutesPerDay: z.number(),
 });
+export type SquadRow = z.infer<typeof squadRow>;
+
+const lostCase = z.strictObject({
+  setKey: z.string(),
+  setName: z.string(),
+  key: z.string(),
+  name: z.string(),
+  picture,
+  /** Share of the solves that reach the set which the squad loses to this case. */
+  share: z.number(),
+  /** What it is lost by most, in words. */
+  mostly: z.string(),
+});
 export const squadView = z.strictObject({
+  /** The programme: what can be chosen. */
   sets: z.array(z.strictObject({ setKey: z.string(), name: z.string(), edition: z.int(), limitMs: z.int() })),
-  rows: z.array(squadRow),
-  lost: z.array(
+  /** The set whose groups are the columns; null: the columns are the sets. */
+  setKey: z.string().nullable(),
+  columns: z.array(
     z.strictObject({
-      setKey: z.string(),
-      setName: z.string(),
+      /** A set's key, a group's name, or '' for all of the chosen set. */
       key: z.string(),
       name: z.string(),
-      picture,
-      /** Share of the squad's solves lost to this case. */
-      share: z.number(),
-      mostly: z.string(),
+      /** Share of the solves that reach the set which deal one of these cases; null for whole sets. */
+      dealt: z.number().nullable(),
     }),
   ),
+  rows: z.array(squadRow),
+  lost: z.array(lostCase),
   board: standingsBoard.nullable(),
 });
 export type SquadView = z.infer<typeof squadView>;

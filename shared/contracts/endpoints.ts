@@ -41,7 +41,7 @@ export const endpoints = {
   club: endpoint<Nothing, ClubView>('club', 'GET', '/api/club'),
   changeSettings: endpoint<MemberSettings, MemberSettings>('changeSettings', 'PUT', '/api/settings'),
 
-  squad: endpoint<Nothing, SquadView>('squad', 'GET', '/api/desk/squad'),
+  squad: endpoint<{ setKey?: string }, SquadView>('squad', 'GET', '/api/desk/squad'),
   memberPage: endpoint<{ memberId: string }, MemberPageView>(
     'memberPage',
     'GET',

@@ -1,0 +1,93 @@
+import { and, eq, inArray } from 'drizzle-orm';
+import { type Transaction, tables } from '#database/client.ts';
+import type { SquadView } from '#shared/contracts/desk.ts';
+import { caseSet } from '#shared/lastlayer/index.ts';
+import type { CaseMemory } from '#shared/memory/index.ts';
+import { casePicture } from '../catalogue/case-picture.ts';
+import { readEditionContent } from '../catalogue/read-edition.ts';
+import { type ProgrammeEntry, programmeOfMember } from '../training/read-programme.ts';
+import { memoryOfRow } from '../training/training-day.ts';
+import { explainLosses } from './explain-losses.ts';
+import { type Answering, costliest, type Loss, lossesOf } from './lost-cases.ts';
+import type { GroupSums } from './squad-figures.ts';
+import type { SquadMember } from './squad-members.ts';
+
+export interface LossesRequest {
+  readonly clubId: string;
+  readonly members: readonly SquadMember[];
+  readonly entries: readonly ProgrammeEntry[];
+  /** Newest rollup rows: the calibration and the day each member's figures stand under. */
+  readonly newest: readonly GroupSums[];
+  /** The captain's training day: for members without a rollup yet. */
+  readonly today: number;
+  /** First day of the answers that explain a loss. */
+  readonly fromDay: number;
+  readonly count: number;
+}
+
+/** The cases of these sets that cost the squad most, each with what is behind it. */
+export async function squadLosses(tx: Transaction, request: LossesRequest): Promise<SquadView['lost']> {
+  const { clubId, entries, count } = request;
+  const memories = await readMemories(
+    tx,
+    clubId,
+    entries.map((entry) => entry.setKey),
+  );
+  const all: Loss[] = [];
+  for (const entry of entries) {
+    const content = await readEditionContent(tx, entry.setKey, entry.edition);
+    all.push(...lossesOf(caseSet(entry.setKey), content, squadOf(request, entry, memories)));
+  }
+  const worst = costliest(all, count);
+  const mostly = await explainLosses(tx, request, worst);
+  return worst.map(({ set, content, case: c, share }) => {
+    const known = content.cases.get(c.key);
+    return {
+      setKey: content.setKey,
+      setName: content.setName,
+      key: c.key,
+      name: known?.name ?? c.name,
+      picture: casePicture(set, c, known?.algorithms[0]?.algorithm),
+      share,
+      mostly: mostly.get(c.key) ?? '',
+    };
+  });
+}
+
+function squadOf(
+  { members, newest, today }: LossesRequest,
+  entry: ProgrammeEntry,
+  memories: ReadonlyMap<string, ReadonlyMap<string, CaseMemory>>,
+): Answering[] {
+  return members
+    .filter(({ memberId }) => programmeOfMember([entry], memberId).length > 0)
+    .map(({ memberId }) => {
+      const row = newest.find((one) => one.memberId === memberId && one.setKey === entry.setKey);
+      return {
+        memory: memories.get(memberId) ?? new Map<string, CaseMemory>(),
+        shift: row?.shift ?? 0,
+        day: row?.day ?? today,
+      };
+    });
+}
+
+/** Memory of the club's members, by member and case. */
+async function readMemories(
+  tx: Transaction,
+  clubId: string,
+  setKeys: readonly string[],
+): Promise<Map<string, Map<string, CaseMemory>>> {
+  const { caseState } = tables;
+  const found = new Map<string, Map<string, CaseMemory>>();
+  if (setKeys.length === 0) return found;
+  const rows = await tx
+    .select()
+    .from(caseState)
+    .where(and(eq(caseState.clubId, clubId), inArray(caseState.setKey, [...setKeys])));
+  for (const row of rows) {
+    const own = found.get(row.memberId) ?? new Map<string, CaseMemory>();
+    own.set(row.caseKey, memoryOfRow(row));
+    found.set(row.memberId, own);
+  }
+  return found;
+}

@@ -1,0 +1,16 @@
+const MINUS = '−';
+
+/** Numbers as every page writes them: figures whole, a true minus, a unit a space away. */
+export const numberText = {
+  /** A share 0..1 in per cent. */
+  percent: (share: number, digits = 0) => `${(share * 100).toFixed(digits)}%`,
+  /** Milliseconds in seconds: `3 s`, `2.5 s`; with `digits`, always so many. */
+  seconds: (ms: number, digits?: number) =>
+    `${digits === undefined ? Number((ms / 1000).toFixed(2)) : (ms / 1000).toFixed(digits)} s`,
+  count: (n: number, one: string, many: string) => `${n} ${n === 1 ? one : many}`,
+  /** A change with its sign: `+2`, `−6`, `0`. */
+  points: (n: number) => {
+    const whole = Math.round(n);
+    return whole === 0 ? '0' : whole > 0 ? `+${whole}` : `${MINUS}${-whole}`;
+  },
+} as const;
