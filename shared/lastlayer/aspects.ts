@@ -35,8 +35,8 @@ export const inOrder = (aspects: Iterable<Aspect>): readonly Aspect[] => {
 export const seenThrough = (entry: Entry, toldApart: readonly Aspect[]): readonly Aspect[] =>
   inOrder([...FIXED[entry], ...toldApart]);
 
-/** Solved up to AUF: the four corner permutations that are turns of the top. */
-const isTurnOfTop = (rank: number): boolean =>
+/** Solved up to AUF: whether a permutation rank is one of the four turns of the top. */
+export const isTurnOfTop = (rank: number): boolean =>
   [0, 1, 2, 3].some((turn) => PERMUTATION_ACT[turn * 4] === rank);
 
 /** Whether a state reaches the step with this entry condition. `index` 0..62207. */
@@ -65,15 +65,6 @@ export function isSolvedIn(index: number, aspects: readonly Aspect[]): boolean {
 /** A state seen through some aspects only, as one number below 124,416; the rest counts as solved. */
 export type View = number;
 export const VIEWS = 24 * 24 * TWISTS * FLIPS;
-
-/** A reader of views for these aspects: state index to view. */
-export function viewer(aspects: readonly Aspect[]): (index: number) => View {
-  const [co, eo, cp, ep] = ASPECTS.map((aspect) => aspects.includes(aspect));
-  return (index) =>
-    (((cp ? cornerRank(index) : 0) * 24 + (ep ? edgeRank(index) : 0)) * TWISTS + (co ? twistOf(index) : 0)) *
-      FLIPS +
-    (eo ? flipOf(index) : 0);
-}
 
 /**
  * The sixteen images of views through these aspects, as `(view, turn) => view` with turn = before·4 + after.

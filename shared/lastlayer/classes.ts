@@ -1,6 +1,6 @@
 /** Partition of the entry states into cases: orbits of what is seen. */
-import { type Aspect, type Entry, isEntryState, seenThrough, VIEWS, viewer, viewTurner } from './aspects.ts';
-import { STATES } from './state.ts';
+import { type Aspect, type Entry, fixedBy, isTurnOfTop, seenThrough, VIEWS, viewTurner } from './aspects.ts';
+import { edgeRankOf, FLIPS, indexOf, PERMUTATIONS, STATES, TWISTS } from './state.ts';
 
 export interface Classes {
   /** For each of the 62,208 states the place of its case below, −1 if the state is no entry state. */
@@ -21,10 +21,14 @@ export interface Classes {
  * is seen (the AUF after is left out).
  */
 export function classify(entry: Entry, toldApart: readonly Aspect[]): Classes {
-  const aspects = seenThrough(entry, toldApart);
-  const view = viewer(aspects);
-  const turned = viewTurner(aspects);
-  const perAngle = aspects.includes('cp') || aspects.includes('ep') ? 4 : 1;
+  const seen = seenThrough(entry, toldApart);
+  const [cornersSeen, edgesSeen] = [seen.includes('cp'), seen.includes('ep')];
+  const [twistsSeen, flipsSeen] = [seen.includes('co'), seen.includes('eo')];
+  const turned = viewTurner(seen);
+  const perAngle = cornersSeen || edgesSeen ? 4 : 1;
+  const fixed = fixedBy(entry);
+  const twists = fixed.includes('co') ? 1 : TWISTS;
+  const flips = fixed.includes('eo') ? 1 : FLIPS;
 
   const caseOfView = new Int16Array(VIEWS).fill(-1);
   const caseOf = new Int16Array(STATES).fill(-1);
@@ -32,26 +36,40 @@ export function classify(entry: Entry, toldApart: readonly Aspect[]): Classes {
   const weight: number[] = [];
   const angles: (1 | 2 | 4)[] = [];
   let states = 0;
-  for (let index = 0; index < STATES; index++) {
-    if (!isEntryState(entry, index)) continue;
-    const seen = view(index);
-    let found = caseOfView[seen]!;
-    if (found < 0) {
-      found = canonical.length;
-      let orbit = 0;
-      for (let turn = 0; turn < 16; turn++) {
-        const image = turned(seen, turn);
-        if (caseOfView[image]! >= 0) continue;
-        caseOfView[image] = found;
-        orbit++;
-      }
-      canonical.push(index);
-      weight.push(0);
-      angles.push((orbit / perAngle) as 1 | 2 | 4);
+
+  const newCase = (view: number, index: number): number => {
+    const number = canonical.length;
+    let orbit = 0;
+    for (let turn = 0; turn < 16; turn++) {
+      const image = turned(view, turn);
+      if (caseOfView[image]! >= 0) continue;
+      caseOfView[image] = number;
+      orbit++;
     }
-    caseOf[index] = found;
-    weight[found]!++;
-    states++;
+    canonical.push(index);
+    weight.push(0);
+    angles.push((orbit / perAngle) as 1 | 2 | 4);
+    return number;
+  };
+
+  // In the order of the index, so that the first state met of a case is its smallest.
+  for (let corners = 0; corners < PERMUTATIONS; corners++) {
+    if (fixed.includes('cp') && !isTurnOfTop(corners)) continue;
+    for (let half = 0; half < PERMUTATIONS / 2; half++) {
+      const edges = edgeRankOf(corners, half);
+      const permutations = (cornersSeen ? corners : 0) * PERMUTATIONS + (edgesSeen ? edges : 0);
+      for (let twist = 0; twist < twists; twist++) {
+        for (let flip = 0; flip < flips; flip++) {
+          const index = indexOf(corners, twist, edges, flip);
+          const view = (permutations * TWISTS + (twistsSeen ? twist : 0)) * FLIPS + (flipsSeen ? flip : 0);
+          let found = caseOfView[view]!;
+          if (found < 0) found = newCase(view, index);
+          caseOf[index] = found;
+          weight[found]!++;
+          states++;
+        }
+      }
+    }
   }
   return { caseOf, canonical, weight, angles, states };
 }

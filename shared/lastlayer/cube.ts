@@ -40,23 +40,23 @@ function quarter(face: Face): { corners: Uint8Array; edges: Uint8Array } {
   return { corners, edges };
 }
 
-/** Cubies after each of 18 face turns: at turn·24 + cubie, turn = face · 3 + quarters − 1. */
-const [CORNERS_TO, EDGES_TO] = ((): [Uint8Array, Uint8Array] => {
-  const corners = new Uint8Array(18 * 24);
-  const edges = new Uint8Array(18 * 24);
+/** Edge cubies stand behind the 24 corner cubies in the table below. */
+const EDGES = 24;
+const CUBIES = 48;
+/** Cubies after each of 18 face turns: at turn·48 + cubie, turn = face · 3 + quarters − 1. */
+const AFTER_TURN: Uint8Array = (() => {
+  const after = new Uint8Array(18 * CUBIES);
   FACES.forEach((face, at) => {
     const once = quarter(face);
-    for (let cubie = 0; cubie < 24; cubie++) {
-      let [corner, edge] = [cubie, cubie];
+    for (let cubie = 0; cubie < CUBIES; cubie++) {
+      let place = cubie;
       for (let turn = at * 3; turn < at * 3 + 3; turn++) {
-        corner = once.corners[corner]!;
-        edge = once.edges[edge]!;
-        corners[turn * 24 + cubie] = corner;
-        edges[turn * 24 + cubie] = edge;
+        place = place < EDGES ? once.corners[place]! : EDGES + once.edges[place - EDGES]!;
+        after[turn * CUBIES + cubie] = place;
       }
     }
   });
-  return [corners, edges];
+  return after;
 })();
 
 /** The faces a quarter turn of the whole cube carries round: each goes where the next one was. */
@@ -120,26 +120,30 @@ HOLDS.forEach((hold, number) => {
 export type Track = Uint8Array;
 const HOME: Track = Uint8Array.from({ length: 20 }, (_, piece) => (piece < 8 ? piece * 3 : (piece - 8) * 2));
 
-function turnFace(track: Track, turn: number): void {
-  const base = turn * 24;
-  for (let piece = 0; piece < 8; piece++) track[piece] = CORNERS_TO[base + track[piece]!]!;
-  for (let piece = 8; piece < 20; piece++) track[piece] = EDGES_TO[base + track[piece]!]!;
-}
+/** Scratch list of face turns, as offsets into the table: following is synchronous, so one is enough. */
+let offsets = new Uint16Array(64);
 
 /**
  * Follows every piece of a solved cube through the moves, relative to the centres. Writes into `track`
  * (20 bytes) and returns the hold, 0..23, that the moves end in.
  */
 export function followMoves(moves: readonly Move[], track: Track): number {
-  track.set(HOME);
+  if (offsets.length < moves.length * 2) offsets = new Uint16Array(moves.length * 4);
   let hold = 0;
+  let turns = 0;
   for (let at = 0; at < moves.length; at++) {
     const place = hold * MOVE_COUNT + moves[at]!.code;
     const first = FIRST_TURN[place]!;
-    if (first !== NO_TURN) turnFace(track, first);
+    if (first !== NO_TURN) offsets[turns++] = first * CUBIES;
     const second = SECOND_TURN[place]!;
-    if (second !== NO_TURN) turnFace(track, second);
+    if (second !== NO_TURN) offsets[turns++] = second * CUBIES;
     hold = NEXT_HOLD[place]!;
+  }
+  for (let piece = 0; piece < 20; piece++) {
+    const base = piece < 8 ? 0 : EDGES;
+    let cubie = HOME[piece]! + base;
+    for (let turn = 0; turn < turns; turn++) cubie = AFTER_TURN[offsets[turn]! + cubie]!;
+    track[piece] = cubie - base;
   }
   return hold;
 }

@@ -18,7 +18,7 @@ export interface Move {
 }
 
 const SUFFIX = ['', '2', "'"] as const;
-export const AMOUNTS = [1, 2, 3] as const;
+const AMOUNTS = [1, 2, 3] as const;
 
 export const MOVES: readonly Move[] = FAMILIES.flatMap((family, at) =>
   AMOUNTS.map((amount) => ({
@@ -28,10 +28,6 @@ export const MOVES: readonly Move[] = FAMILIES.flatMap((family, at) =>
     text: family + SUFFIX[amount - 1],
   })),
 );
-
-export function moveOf(family: Family, amount: 1 | 2 | 3): Move {
-  return MOVES[FAMILIES.indexOf(family) * 3 + amount - 1]!;
-}
 
 /** What one clockwise quarter of a family does: face turns, signed, and a turn of the whole cube. */
 export interface Parts {

@@ -1,5 +1,5 @@
 /** One pass over an algorithm's text: every character is accounted for, or it is the error. */
-import { FAMILIES, type Family, type Move, moveOf } from './moves.ts';
+import { FAMILIES, MOVES, type Move } from './moves.ts';
 
 /** More than any last-layer algorithm has; keeps repeated repetitions from filling the memory. */
 export const MOST_MOVES = 500;
@@ -27,15 +27,11 @@ interface Group {
   separators: number;
 }
 
-const FAMILY_OF = new Map<string, Family>(FAMILIES.map((family) => [family, family]));
-const WIDE_OF = new Map<Family, Family>([
-  ['U', 'u'],
-  ['L', 'l'],
-  ['F', 'f'],
-  ['R', 'r'],
-  ['B', 'b'],
-  ['D', 'd'],
-]);
+/** Number of the move family that a letter stands for, and of the wide that a face letter with w stands for. */
+const FAMILY_OF = new Map<string, number>(FAMILIES.map((family, number) => [family, number]));
+const WIDE_OF = new Map<string, number>(
+  Array.from('ULFRBD', (face) => [face, FAMILY_OF.get(face.toLowerCase())!]),
+);
 /** Straight, curly, true prime, back tick, acute: what keyboards and word processors put there. */
 const PRIMES = "'’′`´‘";
 const BRACKETS = '()[],:';
@@ -97,15 +93,16 @@ export class AlgorithmScanner {
 
   private readMove(): void {
     const start = this.at;
-    let family = FAMILY_OF.get(this.peek());
-    if (!family) throw this.wrong(start);
+    const letter = this.peek();
+    let family = FAMILY_OF.get(letter);
+    if (family === undefined) throw this.wrong(start);
     this.at++;
     if (this.peek() === 'w') {
-      family = WIDE_OF.get(family);
-      if (!family) throw this.wrong(start);
+      family = WIDE_OF.get(letter);
+      if (family === undefined) throw this.wrong(start);
       this.at++;
     }
-    let amount: 1 | 2 | 3 = 1;
+    let amount = 1;
     if (this.peek() === '2') {
       amount = 2;
       this.at++;
@@ -116,7 +113,7 @@ export class AlgorithmScanner {
       this.at++;
     }
     if (isDigit(this.peek()) || isPrime(this.peek())) throw this.wrong(start);
-    this.moves.push(moveOf(family, amount));
+    this.moves.push(MOVES[family * 3 + amount - 1]!);
     this.length++;
   }
 

@@ -89,9 +89,11 @@ export function indexOf(cp: number, co: number, ep: number, eo: number): number 
   return ((cp * 12 + (ep >> 1)) * TWISTS + co) * FLIPS + eo;
 }
 export const cornerRank = (index: number): number => Math.floor(index / 2592);
+/** Edge rank number `half`, 0..11, among those that go with the corners' parity. */
+export const edgeRankOf = (corners: number, half: number): number => EDGE_RANK[PARITY[corners]! * 12 + half]!;
 export const edgeRank = (index: number): number => {
   const permutations = Math.floor(index / 216);
-  return EDGE_RANK[PARITY[Math.floor(permutations / 12)]! * 12 + (permutations % 12)]!;
+  return edgeRankOf(Math.floor(permutations / 12), permutations % 12);
 };
 export const twistOf = (index: number): number => Math.floor(index / FLIPS) % TWISTS;
 export const flipOf = (index: number): number => index % FLIPS;
