@@ -16,8 +16,8 @@ export function BottomNav({ label, items }: { label: string; items: readonly Nav
               href={item.href}
               aria-current={item.current ? 'page' : undefined}
               className={cx(
-                'flex min-h-14 items-center justify-center border-t-[5px] px-1 pb-1 text-center text-[0.9375rem]',
-                item.current ? 'border-ink font-bold text-ink' : 'border-transparent text-ink-2',
+                'flex min-h-14 items-center justify-center px-1 pb-1 text-center text-[0.9375rem]',
+                item.current ? 'border-t-[5px] border-ink font-bold text-ink' : 'pt-[5px] text-ink-2',
               )}
             >
               {item.label}

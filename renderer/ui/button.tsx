@@ -14,21 +14,22 @@ interface Look {
 }
 
 const SIZES: Readonly<Record<ButtonSize, string>> = {
-  small: 'min-h-9 px-3 text-sm',
+  small: 'min-h-12 px-3 text-sm sm:min-h-9',
   normal: 'min-h-12 px-5',
   wide: 'min-h-14 w-full px-5 text-lg',
   'half-screen': 'min-h-[11.5rem] w-full px-5 text-[1.75rem]',
 };
 
 function look({ kind = 'filled', size = 'normal', tone = 'ink' }: Look, blocked = false): string {
-  const shape = 'inline-flex flex-col items-center justify-center rounded-key text-center leading-tight';
+  const shape =
+    'screen-only inline-flex flex-col items-center justify-center rounded-key text-center leading-tight';
   if (blocked) {
     return cx(shape, SIZES[size], 'border-[1.5px] border-dashed border-ink-2 bg-sheet font-bold text-ink-2');
   }
   if (kind === 'plain') {
     return cx(
       shape,
-      size === 'small' ? 'min-h-9 text-sm' : 'min-h-12',
+      size === 'small' ? 'min-h-12 text-sm sm:min-h-9' : 'min-h-12',
       'text-ink-2 underline underline-offset-4 hover:text-ink',
     );
   }

@@ -15,6 +15,8 @@ export interface ColumnSort {
 export interface Column<Row> {
   readonly key: string;
   readonly header: ReactNode;
+  /** The header is for assistive technology only: over pictures and keys. */
+  readonly headerHidden?: boolean;
   readonly cell: (row: Row) => ReactNode;
   readonly align?: 'start' | 'end';
   /** This column names its row. */
@@ -115,6 +117,7 @@ const ARROWS: Readonly<Record<SortDirection, string>> = { ascending: '▲', desc
 
 function HeaderContent<Row>({ column }: { column: Column<Row> }) {
   const { sort, header } = column;
+  if (column.headerHidden) return <span className="sr-only">{header}</span>;
   if (!sort) return <>{header}</>;
   const inner = (
     <>
@@ -124,7 +127,10 @@ function HeaderContent<Row>({ column }: { column: Column<Row> }) {
       </span>
     </>
   );
-  const look = cx('min-h-6 text-start hover:underline', sort.direction !== 'none' && 'font-bold text-ink');
+  const look = cx(
+    'inline-flex min-h-12 items-end text-start hover:underline sm:min-h-6',
+    sort.direction !== 'none' && 'font-bold text-ink',
+  );
   return sort.href ? (
     <AppLink href={sort.href} className={look}>
       {inner}

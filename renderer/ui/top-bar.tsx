@@ -48,10 +48,10 @@ export function TopBar({ product, homeHref, navigationLabel, skipLabel, items, a
                     href={item.href}
                     aria-current={item.current ? 'page' : undefined}
                     className={cx(
-                      'flex min-h-12 items-center whitespace-nowrap border-y-4 border-transparent',
+                      'flex min-h-12 items-center whitespace-nowrap pt-1',
                       item.current
-                        ? 'border-b-ink font-bold text-ink'
-                        : 'text-ink-2 hover:text-ink hover:underline',
+                        ? 'border-b-4 border-ink font-bold text-ink'
+                        : 'pb-1 text-ink-2 hover:text-ink hover:underline',
                     )}
                   >
                     {item.label}
