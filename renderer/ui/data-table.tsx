@@ -120,12 +120,12 @@ function HeaderContent<Row>({ column }: { column: Column<Row> }) {
   if (column.headerHidden) return <span className="sr-only">{header}</span>;
   if (!sort) return <>{header}</>;
   const inner = (
-    <>
+    <span>
       {header}
       <span aria-hidden="true" className="ps-1 text-[0.6em]">
         {ARROWS[sort.direction]}
       </span>
-    </>
+    </span>
   );
   const look = cx(
     'inline-flex min-h-12 items-end text-start hover:underline sm:min-h-6',
