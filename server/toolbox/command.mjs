@@ -11,8 +11,8 @@ const HURRY_AFTER = 1_000;
 /**
  * Runs one of the product's commands: whatever way it ends (done, failed, Ctrl-C, a closed terminal), all that
  * it started is stopped, in reverse order, and nothing else; a failure is one sentence.
- * @param {{place: string, body: (command: Command) => Promise<number>}} what `place` is the folder to name when
- *   a disk is full; the body gives the exit code.
+ * @param {{place: string, body: (command: Command) => Promise<number>, stopped?: number}} what `place` is the folder
+ *   to name when a disk is full; the body gives the exit code; `stopped` is the exit code after Ctrl-C.
  *
  * @typedef {{steps: Steps, children: Children, onEnd: (stop: () => unknown) => void,
  *   onChildren: (listen: (alive: {pid: number, birth: string}[]) => void) => void,
@@ -20,7 +20,7 @@ const HURRY_AFTER = 1_000;
  *   `onEnd` adds what to undo; `onChildren` hears which programs run; `fail` ends the command from outside the
  *   body, with a sentence.
  */
-export async function runCommand({ place, body }) {
+export async function runCommand({ place, body, stopped = 0 }) {
   const steps = new Steps();
   const undo = [];
   const listeners = [];
@@ -52,7 +52,7 @@ export async function runCommand({ place, body }) {
       if (asked === undefined) {
         asked = Date.now();
         steps.line('\nStopping …');
-        end(0);
+        end(stopped);
       } else if (Date.now() - asked > HURRY_AFTER) {
         children.killAll();
         process.exit(1);
