@@ -3,7 +3,7 @@ import { figure, outcome, picture, uuid } from './common.ts';
 import { dayFigure, myCase, sharedBoardView, standingsBoard } from './member.ts';
 
 /** Without a set: members × sets. With one: members × that set's groups, and all of it in the last column. */
-export const squadInput = z.strictObject({ setKey: z.string().min(1).max(60).optional() });
+export const squadInput = z.strictObject({ setKey: z.string().optional() });
 
 const squadCell = z.strictObject({
   /** null: does not answer for the set. */
@@ -57,7 +57,8 @@ export const squadView = z.strictObject({
 });
 export type SquadView = z.infer<typeof squadView>;
 
-export const memberPageInput = z.strictObject({ memberId: uuid });
+/** Any text: what is no member's id is not found, like a member who is not there. */
+export const memberPageInput = z.strictObject({ memberId: z.string() });
 export const memberPageView = z.strictObject({
   memberId: uuid,
   nickname: z.string(),
@@ -96,7 +97,7 @@ export const memberPageView = z.strictObject({
 });
 export type MemberPageView = z.infer<typeof memberPageView>;
 
-export const standingsInput = z.strictObject({ setKey: z.string().max(60).optional() });
+export const standingsInput = z.strictObject({ setKey: z.string().optional() });
 export const standingsView = z.strictObject({
   sets: z.array(z.strictObject({ setKey: z.string(), name: z.string() })),
   board: standingsBoard.nullable(),

@@ -1,5 +1,6 @@
 import { and, eq, isNull } from 'drizzle-orm';
 import { type Transaction, tables } from '#database/client.ts';
+import { uuid } from '#shared/contracts/common.ts';
 import { caseSet } from '#shared/lastlayer/index.ts';
 import { notFound } from '../../http/problem.ts';
 import { readEditionContent } from '../catalogue/read-edition.ts';
@@ -7,6 +8,8 @@ import type { ClubActor, Ctx } from '../context.ts';
 import { dayOf } from '../standing/local-date.ts';
 import { programmeOfMember, readProgramme } from '../training/read-programme.ts';
 import { memoryOfRow, type TrainedSet, type TrainingDay } from '../training/training-day.ts';
+
+const NOT_HERE = 'There is no such member in your club.';
 
 /**
  * A member's day as their captain looks at it: the same as the member's own, but nothing is held and nothing
@@ -20,6 +23,7 @@ export async function readMemberDay(
   memberId: string,
 ): Promise<TrainingDay> {
   const { membership, caseState } = tables;
+  if (!uuid.safeParse(memberId).success) throw notFound(NOT_HERE);
   const [member] = await tx
     .select()
     .from(membership)
@@ -30,7 +34,7 @@ export async function readMemberDay(
         isNull(membership.leftAt),
       ),
     );
-  if (!member) throw notFound('There is no such member in your club.');
+  if (!member) throw notFound(NOT_HERE);
   const { accountId, role, nickname, timeZone, rolloverHour } = member;
   const actor: ClubActor = { ...captain, accountId, memberId, role, nickname, timeZone, rolloverHour };
   const sets: TrainedSet[] = [];
