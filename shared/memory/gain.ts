@@ -18,7 +18,7 @@ export interface ShowingCosts {
 export const DEFAULT_COSTS: ShowingCosts = Object.freeze({ held: 5, missed: 10, retest: 5, fresh: 12 });
 
 /** Share of new cases held at their first showing, as the policy simulations assume. */
-const FRESH_HELD = 0.5;
+export const FRESH_HELD = 0.5;
 
 /**
  * Mean recall from `from` to `from + horizon` days after an answer that left this stability:
@@ -30,11 +30,6 @@ export function meanRecall(model: MemoryModel, from: number, horizon: number, st
   const scale = stability / (horizon * factor * power);
   const until = (1 + (factor * (from + horizon)) / stability) ** power;
   return scale * (until - (from === 0 ? 1 : (1 + (factor * from) / stability) ** power));
-}
-
-/** State after a miss and the held retest that follows it the same day. */
-export function afterMissAndRetest(model: MemoryModel, trace: Trace | null, elapsedDays: number): Trace {
-  return model.next(model.next(trace, elapsedDays, false), 0, true);
 }
 
 /** Seconds a showing is expected to take when recall is `recall`. */

@@ -2,10 +2,11 @@
  * The memory model: what a member's log says about each case, what today's minutes are best spent on, how
  * an answer is judged, and which day it is. Pure: time, day numbers, weights and ids are arguments.
  */
-export { forecastSeconds, type LoadRequest, solveBeta } from './beta.ts';
+export { solveBeta } from './beta.ts';
 export { type BoundTimes, boundTimes, CLOCK_SLACK_MS, type ClaimedTimes } from './bound-times.ts';
 export { dayOfDate, dayStart, isoDate, localDay } from './calendar.ts';
 export { type CaseFold, compareRows, type FoldResult, foldCase, startFold } from './fold.ts';
+export { forecastSeconds, type LoadRequest } from './forecast-load.ts';
 export { DEFAULT_WEIGHTS, type MemoryModel, memoryModel, type Trace, type Weights } from './fsrs.ts';
 export {
   DEFAULT_COSTS,

@@ -1,4 +1,4 @@
-import { DEFAULT_WEIGHTS, type MemoryModel, memoryModel, type Weights } from './fsrs.ts';
+import { DEFAULT_WEIGHTS, type MemoryModel, memoryModel, round8, type Weights } from './fsrs.ts';
 import { expectedSeconds, gainOfNew, gainOfShowing, type ShowingCosts } from './gain.ts';
 import { chooseNew } from './new-cases.ts';
 import { quickSteps } from './quick-steps.ts';
@@ -56,7 +56,8 @@ function dueUnits({ cards, day, beta, costs, firstGroup }: QueueRequest, model: 
     const elapsed = day - memory.lastDay;
     if (elapsed <= 0) continue;
     const prior = mixedPrior(card.prior, cards.length);
-    const chance = quick.recall(elapsed, memory.stability);
+    // Rounded as `recall` is, so that the queue and the due day shown elsewhere agree.
+    const chance = round8(quick.recall(elapsed, memory.stability));
     if (chance > wantedOfMixed(prior, cards.length, beta)) continue;
     units.push({
       items: [{ key: card.key, kind: 'due', seconds: expectedSeconds(chance, costs) }],

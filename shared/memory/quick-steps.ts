@@ -1,8 +1,8 @@
 import { type MemoryModel, STABILITY_MAX, STABILITY_MIN } from './fsrs.ts';
 
 /**
- * The forgetting curve and the stability steps alone, not rounded and without the difficulty: for plans
- * that weigh thousands of cases at a time. What is stored always comes from the library (fsrs.ts); tests
+ * The forgetting curve and the steps without rounding or checks: for plans that weigh thousands of cases at
+ * a time. What is stored always comes from the library (fsrs.ts); tests
  * hold these to it within 1e-6. Formulas: FSRS-6.
  */
 export interface QuickSteps {
@@ -14,6 +14,8 @@ export interface QuickSteps {
   afterMissAndRetest(stability: number, difficulty: number, recall: number): number;
   /** S·max(1, S^(−w19)·e^(w17·w18)) */
   afterRetest(stability: number): number;
+  /** w7·D0(4) + (1 − w7)·[D − w6·(G − 3)·(10 − D)/9], clamped to 1..10 */
+  difficultyAfter(difficulty: number, held: boolean): number;
 }
 
 const built = new WeakMap<MemoryModel, QuickSteps>();
@@ -30,6 +32,7 @@ export function quickSteps(model: MemoryModel): QuickSteps {
 function build({ decay, factor, weights: w }: MemoryModel): QuickSteps {
   const growth = Math.exp(w[8]!);
   const cap = Math.exp(w[17]! * w[18]!);
+  const reverted = w[7]! * (w[4]! - Math.exp(3 * w[5]!) + 1);
   const afterRetest = (stability: number) => clamp(stability * Math.max(1, stability ** -w[19]! * cap));
   return {
     recall: (elapsedDays, stability) => (1 + (factor * elapsedDays) / stability) ** -decay,
@@ -44,6 +47,10 @@ function build({ decay, factor, weights: w }: MemoryModel): QuickSteps {
       return afterRetest(clamp(Math.min(forgotten, stability / cap)));
     },
     afterRetest,
+    difficultyAfter: (difficulty, held) => {
+      const moved = held ? difficulty : difficulty + (2 * w[6]! * (10 - difficulty)) / 9;
+      return Math.min(Math.max(reverted + (1 - w[7]!) * moved, 1), 10);
+    },
   };
 }
 

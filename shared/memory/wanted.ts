@@ -1,4 +1,4 @@
-import { DEFAULT_WEIGHTS, memoryModel, type Weights } from './fsrs.ts';
+import { DEFAULT_WEIGHTS, type MemoryModel, memoryModel, type Weights } from './fsrs.ts';
 import type { CaseMemory } from './types.ts';
 
 /** Bounds of wanted retention. */
@@ -36,10 +36,16 @@ export function recall(memory: CaseMemory, day: number, weights: Weights = DEFAU
   return memoryModel(weights).recall(Math.max(0, day - memory.lastDay), memory.stability);
 }
 
+/** Whole days, at least 1, after which recall is at or below what is wanted. */
+export function daysUntilDue(model: MemoryModel, stability: number, wanted: number): number {
+  const days = Math.max(1, Math.ceil(model.daysUntil(wanted, stability)));
+  // Where the curve meets the wanted recall on a whole day, rounding must not cost that day.
+  return days > 1 && model.recall(days - 1, stability) <= wanted ? days - 1 : days;
+}
+
 /** The first training day after the last answer on which recall is at or below what is wanted. */
 export function dueDay(memory: CaseMemory, wanted: number, weights: Weights = DEFAULT_WEIGHTS): number {
-  const days = memoryModel(weights).daysUntil(wanted, memory.stability);
-  return memory.lastDay + Math.max(1, Math.ceil(days));
+  return memory.lastDay + daysUntilDue(memoryModel(weights), memory.stability, wanted);
 }
 
 export type CaseStateName = 'unmet' | 'settling' | 'holding' | 'slipping';

@@ -21,8 +21,12 @@ describe('quick steps', () => {
         const quick = quickSteps(memoryModel(w));
         const recall = quick.recall(elapsed, trace.stability);
         expect(recall).toBeCloseTo(forgetting_curve(library.parameters.w, elapsed, trace.stability), 6);
-        const pass = library.next_state(trace, elapsed, 3).stability;
-        const fail = library.next_state(library.next_state(trace, elapsed, 1), 0, 3).stability;
+        const heldState = library.next_state(trace, elapsed, 3);
+        const missedState = library.next_state(trace, elapsed, 1);
+        expect(quick.difficultyAfter(trace.difficulty, true)).toBeCloseTo(heldState.difficulty, 6);
+        expect(quick.difficultyAfter(trace.difficulty, false)).toBeCloseTo(missedState.difficulty, 6);
+        const pass = heldState.stability;
+        const fail = library.next_state(missedState, 0, 3).stability;
         expect(quick.afterHeld(trace.stability, trace.difficulty, recall) / pass).toBeCloseTo(1, 6);
         expect(
           Math.abs(quick.afterMissAndRetest(trace.stability, trace.difficulty, recall) - fail),
