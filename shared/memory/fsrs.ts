@@ -1,11 +1,4 @@
-import {
-  computeDecayFactor,
-  default_w,
-  FSRSAlgorithm,
-  forgetting_curve,
-  generatorParameters,
-  Rating,
-} from 'ts-fsrs';
+import { computeDecayFactor, default_w, FSRSAlgorithm, forgetting_curve, generatorParameters } from 'ts-fsrs';
 
 /** The 21 weights of FSRS-6. */
 export type Weights = readonly number[];
@@ -38,6 +31,9 @@ export interface MemoryModel {
 }
 
 const WEIGHTS = 21;
+/** The two of the library's four grades that a timed answer can have: nobody is asked how it felt. */
+const GRADE_NOT_HELD = 1;
+const GRADE_HELD = 3;
 export const STABILITY_MIN = 0.001;
 export const STABILITY_MAX = 36500;
 const models = new WeakMap<Weights, MemoryModel>();
@@ -70,7 +66,7 @@ function build(weights: Weights): MemoryModel {
     factor,
     weights: w,
     next: (trace, elapsedDays, held) =>
-      algorithm.next_state(trace, elapsedDays, held ? Rating.Good : Rating.Again),
+      algorithm.next_state(trace, elapsedDays, held ? GRADE_HELD : GRADE_NOT_HELD),
     recall: (elapsedDays, stability) => forgetting_curve(w, elapsedDays, stability),
     daysUntil: (wanted, stability) => (stability / factor) * (wanted ** (-1 / decay) - 1),
     stabilityFor: (elapsedDays, recall) =>

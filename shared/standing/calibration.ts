@@ -46,6 +46,8 @@ export function logitCalibration(answers: readonly CalibrationAnswer[]): Calibra
     return [{ x: logit(recall), guess: 1 / keys, held }];
   });
   if (points.length === 0) return NO_CALIBRATION;
+  // Sums depend on the order of their terms in the last bits: with one order, a rebuild differs by zero.
+  points.sort((a, b) => a.x - b.x || a.guess - b.guess || Number(a.held) - Number(b.held));
   let b = 0;
   let here = score(points, b);
   for (let step = 0; step < 100; step += 1) {

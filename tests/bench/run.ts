@@ -5,6 +5,7 @@ import type { Bench } from './bench.ts';
 /** Every bench by name; each is loaded only when asked for. */
 const BENCHES: Readonly<Record<string, () => Promise<{ bench: Bench }>>> = {
   lastlayer: () => import('./lastlayer.ts'),
+  memory: () => import('./memory.ts'),
 };
 
 const { values, positionals } = parseArgs({
