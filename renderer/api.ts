@@ -93,7 +93,7 @@ export function useStore() {
     put<I, O>(endpoint: Endpoint<I, O>, input: I, output: O) {
       client.setQueryData(callKey(call(endpoint, input) as Call<unknown, unknown>), output);
     },
-    refresh(endpoint: Endpoint<never, unknown>) {
+    refresh(endpoint: Endpoint<unknown, unknown>) {
       return client.invalidateQueries({ queryKey: [endpoint.name] });
     },
   };

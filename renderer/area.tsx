@@ -20,7 +20,7 @@ export interface AreaRoute {
   calls(
     params: Readonly<Record<string, string>>,
     search: Readonly<Record<string, string>>,
-  ): readonly Call<never, unknown>[];
+  ): readonly Call<unknown, unknown>[];
 }
 
 export interface Area {

@@ -1,34 +1,56 @@
 import type { ReactNode } from 'react';
-import { useLocation } from 'react-router';
-import type { Area } from '#renderer/area.tsx';
-import { BottomNav } from '#renderer/ui/index.ts';
-import { shellText } from '#shared/text/shell.ts';
+import { type Area, type AreaRoute, routeOf } from '#renderer/area.tsx';
+import { call } from '#shared/contracts/endpoint.ts';
+import { endpoints } from '#shared/contracts/endpoints.ts';
+import { memberText } from '#shared/text/member.ts';
+import { todayText } from '#shared/text/today.ts';
+import { CasePage } from './cases/case-page.tsx';
+import { CasesPage } from './cases/cases-page.tsx';
+import { ClubPage } from './club/club-page.tsx';
+import { FormPage } from './form/form-page.tsx';
+import { MemberFrame } from './member-frame.tsx';
+import { TodayPage } from './today/today-page.tsx';
 
-const places = [
-  { href: '/today', label: shellText.places.today },
-  { href: '/cases', label: shellText.places.cases },
-  { href: '/form', label: shellText.places.form },
-  { href: '/club', label: shellText.places.club },
+const routes: readonly AreaRoute[] = [
+  {
+    path: '/today',
+    title: todayText.title,
+    Page: TodayPage,
+    calls: () => [call(endpoints.today, {})],
+  },
+  {
+    path: '/cases',
+    title: memberText.cases.title,
+    Page: CasesPage,
+    calls: () => [call(endpoints.myCases, {})],
+  },
+  {
+    path: '/cases/:key',
+    title: memberText.case.title,
+    Page: CasePage,
+    calls: ({ key = '' }) => [call(endpoints.myCase, { key })],
+  },
+  {
+    path: '/form',
+    title: memberText.form.title,
+    Page: FormPage,
+    calls: () => [call(endpoints.form, {})],
+  },
+  {
+    path: '/club',
+    title: memberText.club.title,
+    Page: ClubPage,
+    calls: () => [call(endpoints.club, {})],
+  },
 ];
 
 function Frame({ children }: { children: ReactNode }) {
-  const { pathname } = useLocation();
-  return (
-    <div className="flex min-h-dvh flex-col">
-      <main id="content" className="flex w-full flex-1 flex-col">
-        {children}
-      </main>
-      <BottomNav
-        label={shellText.navigation}
-        items={places.map(({ href, label }) => ({
-          href,
-          label,
-          current: pathname === href || pathname.startsWith(`${href}/`),
-        }))}
-      />
-    </div>
-  );
+  return <MemberFrame titleOf={titleOf}>{children}</MemberFrame>;
 }
 
 /** The member's screens: phone first. */
-export const memberArea: Area = { Frame, routes: [] };
+export const memberArea: Area = { Frame, routes };
+
+function titleOf(pathname: string): string {
+  return routeOf(memberArea, pathname)?.route.title ?? '';
+}

@@ -1,5 +1,7 @@
 import type { EndpointName } from '#shared/contracts/endpoints.ts';
+import { adminRows } from './admin/rows.ts';
 import { deskRows } from './desk/rows.ts';
+import { memberRows } from './member/rows.ts';
 import type { AnyRow } from './row.ts';
 import { sessionRows } from './session/rows.ts';
 import { todayRows } from './today/rows.ts';
@@ -9,4 +11,6 @@ export const contract: Partial<Record<EndpointName, AnyRow>> = {
   ...sessionRows,
   ...deskRows,
   ...todayRows,
+  ...memberRows,
+  ...adminRows,
 };

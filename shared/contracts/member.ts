@@ -22,6 +22,8 @@ export const myCase = z.strictObject({
 export type MyCase = z.infer<typeof myCase>;
 
 export const myCasesView = z.strictObject({
+  /** The member's local date, ISO: what 'today' and 'tomorrow' are said from. */
+  date: z.string(),
   sets: z.array(z.strictObject({ setKey: z.string(), name: z.string(), edition: z.int(), recall: figure })),
   cases: z.array(myCase),
 });
@@ -29,6 +31,7 @@ export type MyCasesView = z.infer<typeof myCasesView>;
 
 export const myCaseInput = z.strictObject({ key: z.string().max(120) });
 export const myCaseView = z.strictObject({
+  date: z.string(),
   case: myCase,
   /** One picture per really different angle. */
   angles: z.array(picture),

@@ -1,0 +1,62 @@
+import { useCall } from '#renderer/api.ts';
+import { Section } from '#renderer/ui/index.ts';
+import { endpoints } from '#shared/contracts/endpoints.ts';
+import { memberText } from '#shared/text/member.ts';
+import { Awaited, MemberScreen } from '../screen.tsx';
+import { Account } from './account.tsx';
+import { Board } from './board.tsx';
+import { People } from './people.tsx';
+import { SettingsForm } from './settings-form.tsx';
+import { SharedBoard } from './shared-board.tsx';
+
+const text = memberText.club;
+
+/** Club: standings, people, and what a member may set for themselves. */
+export function ClubPage() {
+  const query = useCall(endpoints.club, {});
+  return (
+    <MemberScreen title={text.title} aside={query.data?.name}>
+      <Awaited query={query}>
+        {(view) => (
+          <div className="flex flex-col gap-10 pt-5">
+            <Section title={text.boards}>
+              {view.boards.length === 0 ? (
+                <p className="text-ink-2">{text.noBoards}</p>
+              ) : (
+                <div className="flex flex-col gap-8">
+                  <p className="max-w-[38rem] text-[0.9375rem] text-ink-2">
+                    {text.boardsNote(view.boards[0]?.days ?? 0)}
+                  </p>
+                  {view.boards.map((board) => (
+                    <Board key={board.setKey} board={board} />
+                  ))}
+                </div>
+              )}
+            </Section>
+            <Section title={text.shared}>
+              {view.sharedBoards.length === 0 ? (
+                <p className="text-ink-2">{text.noShared}</p>
+              ) : (
+                <div className="flex flex-col gap-8">
+                  <p className="text-[0.9375rem] text-ink-2">{text.sharedNote}</p>
+                  {view.sharedBoards.map((board) => (
+                    <SharedBoard key={board.name} board={board} />
+                  ))}
+                </div>
+              )}
+            </Section>
+            <Section title={text.people}>
+              <People people={view.people} />
+            </Section>
+            <Section title={text.settings}>
+              <SettingsForm settings={view.settings} />
+            </Section>
+            <Section title={text.account}>
+              <Account />
+            </Section>
+          </div>
+        )}
+      </Awaited>
+    </MemberScreen>
+  );
+}

@@ -1,0 +1,166 @@
+import { useEffect, useRef, useState } from 'react';
+import { type GridKey, KeyGrid } from '#renderer/ui/index.ts';
+import type { AnswerKey } from '#shared/contracts/today.ts';
+import { aufText } from '#shared/text/auf.ts';
+import { todayText } from '#shared/text/today.ts';
+import { firstMoves } from './first-moves.ts';
+import { readTyped, type TypedName } from './type-ahead.ts';
+import type { Choice } from './use-sitting.ts';
+
+export interface NamingScreenProps {
+  readonly keys: readonly AnswerKey[];
+  /** 'all' names of a set, or those of one cluster. */
+  readonly grid: string;
+  readonly asksAuf: boolean;
+  readonly recognitionMs: number;
+  readonly onChoose: (choice: Choice) => void;
+}
+
+const SOLVED = 'solved';
+const LOST = 'lost';
+const SLOW_MS = 5_000;
+/** A pause longer than this begins a new name. */
+const TYPING_MS = 900;
+
+/** The fixed grid of names, then the AUF before. By touch, by arrows and Enter, or by typing. */
+export function NamingScreen({ keys, grid, asksAuf, recognitionMs, onChoose }: NamingScreenProps) {
+  const beganAt = useRef(0);
+  const chosen = useRef(false);
+  const typed = useRef({ letters: '', at: 0 });
+  const caseGrid = useRef<HTMLDivElement>(null);
+  const aufGrid = useRef<HTMLDivElement>(null);
+  const [picked, setPicked] = useState<AnswerKey | null>(null);
+  const slow = useSlow(SLOW_MS);
+  const whole = grid === 'all';
+  const gridKeys = whole ? wholeGrid(keys) : clusterGrid(keys);
+  const names: TypedName[] = gridKeys.map((key) => ({
+    value: key.value,
+    text: key.value === SOLVED || key.value === LOST ? (key.text ?? '') : labelOf(keys, key.value),
+    isName: !key.plain,
+  }));
+
+  useEffect(() => {
+    beganAt.current = performance.now();
+    focusKey(caseGrid.current, 0);
+  }, []);
+  useEffect(() => {
+    if (picked) focusKey(aufGrid.current, 0);
+  }, [picked]);
+
+  const send = (named: string, aufBefore: number | null) => {
+    if (chosen.current) return;
+    chosen.current = true;
+    const namingMs = Math.max(0, Math.round(performance.now() - beganAt.current));
+    onChoose({ named, aufBefore, recognitionMs, namingMs });
+  };
+  const pick = (value: string) => {
+    const key = keys.find((one) => one.key === value);
+    if (!asksAuf || value === SOLVED || value === LOST || !key) send(value, null);
+    else setPicked(key);
+  };
+
+  const onKey = useRef<(event: KeyboardEvent) => void>(() => {});
+  onKey.current = (event) => {
+    if (event.repeat || event.altKey || event.ctrlKey || event.metaKey) return;
+    if (!/^[\p{L}\p{N}]$/u.test(event.key)) return;
+    if (picked && /^[0-3]$/.test(event.key)) send(picked.key, Number(event.key));
+    else type(event.key, event.timeStamp);
+    // The grid's own jump to the next key with that letter would be a second meaning.
+    event.preventDefault();
+    event.stopPropagation();
+  };
+  const type = (letter: string, at: number) => {
+    const before = at - typed.current.at < TYPING_MS ? typed.current.letters : '';
+    const longer = readTyped(names, before + letter);
+    const letters = longer.kind === 'none' ? letter : before + letter;
+    const meant = longer.kind === 'none' ? readTyped(names, letter) : longer;
+    typed.current = { letters: meant.kind === 'pick' ? '' : letters, at };
+    if (meant.kind === 'none') return;
+    focusKey(caseGrid.current, meant.index);
+    if (meant.kind === 'pick') pick(names[meant.index]?.value ?? '');
+  };
+  useEffect(() => {
+    const listener = (event: KeyboardEvent) => onKey.current(event);
+    window.addEventListener('keydown', listener, true);
+    return () => window.removeEventListener('keydown', listener, true);
+  }, []);
+
+  return (
+    <div className="flex flex-1 flex-col gap-5 py-4">
+      <div ref={caseGrid}>
+        <KeyGrid
+          legend={todayText.caseLegend}
+          keys={gridKeys}
+          columns={whole ? 4 : 3}
+          value={picked?.key ?? null}
+          onPick={pick}
+        />
+      </div>
+      {picked && (
+        <div ref={aufGrid}>
+          <KeyGrid
+            legend={todayText.aufLegend}
+            hint={todayText.aufFor(firstMoves(picked.algorithm))}
+            keys={aufText.names.map((label, turns) => ({ value: String(turns), label }))}
+            columns={4}
+            value={null}
+            onPick={(turns) => send(picked.key, Number(turns))}
+          />
+        </div>
+      )}
+      <p role="status" className="text-[0.9375rem] text-ink-2">
+        {slow ? todayText.slowNaming : ''}
+      </p>
+      <p className="sr-only">{todayText.keysHint}</p>
+    </div>
+  );
+}
+
+function useSlow(afterMs: number): boolean {
+  const [slow, setSlow] = useState(false);
+  useEffect(() => {
+    const timer = setTimeout(() => setSlow(true), afterMs);
+    return () => clearTimeout(timer);
+  }, [afterMs]);
+  return slow;
+}
+
+/** All names of a set, four in a row, then "solved", and "lost it" over what is left of the last row. */
+function wholeGrid(keys: readonly AnswerKey[]): GridKey[] {
+  const rest = 4 - (keys.length % 4);
+  return [
+    ...keys.map((key) =>
+      key.key === SOLVED
+        ? { value: SOLVED, label: todayText.solved, text: todayText.solved, plain: true }
+        : { value: key.key, label: key.label },
+    ),
+    { value: LOST, label: todayText.lost, text: todayText.lost, plain: true, span: rest >= 2 ? 2 : 1 },
+  ];
+}
+
+/** The names of a cluster with the first moves of their algorithms, three in a row. */
+function clusterGrid(keys: readonly AnswerKey[]): GridKey[] {
+  return [
+    ...keys.map((key) => ({
+      value: key.key,
+      text: `${key.label}, ${firstMoves(key.algorithm)}`,
+      label: (
+        <span className="py-1">
+          <span className="block">{key.label}</span>
+          <span translate="no" className="block text-[0.8125rem] font-normal">
+            {firstMoves(key.algorithm)}
+          </span>
+        </span>
+      ),
+    })),
+    { value: LOST, label: todayText.lost, text: todayText.lost, plain: true },
+  ];
+}
+
+function labelOf(keys: readonly AnswerKey[], value: string): string {
+  return keys.find((key) => key.key === value)?.label ?? '';
+}
+
+function focusKey(grid: HTMLElement | null, index: number): void {
+  grid?.querySelectorAll('button')[index]?.focus({ preventScroll: true });
+}

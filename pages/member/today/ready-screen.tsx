@@ -1,0 +1,56 @@
+import { type ReactNode, useEffect, useRef } from 'react';
+import { Button, RulerTicks } from '#renderer/ui/index.ts';
+import { todayText } from '#shared/text/today.ts';
+import type { Progress } from './looking-screen.tsx';
+
+export interface ReadyScreenProps {
+  readonly setNames: readonly string[];
+  readonly progress: Progress;
+  readonly secondsLeft: number;
+  readonly note: ReactNode;
+  readonly onBegin: () => void;
+}
+
+/** Before the first picture: the clock must not start while the page is still arriving. */
+export function ReadyScreen({ setNames, progress, secondsLeft, note, onBegin }: ReadyScreenProps) {
+  const key = useRef<HTMLDivElement>(null);
+  const resumed = progress.answered > 0;
+  const count = Math.max(0, progress.planned - progress.answered);
+  useEffect(() => {
+    key.current?.querySelector('button')?.focus({ preventScroll: true });
+  }, []);
+  return (
+    <div className="flex flex-1 flex-col">
+      <div className="flex min-h-0 flex-1 items-stretch gap-5 py-5">
+        <RulerTicks
+          done={progress.answered}
+          total={progress.planned}
+          label={todayText.progressLabel}
+          text={todayText.progressText(progress.answered, progress.planned)}
+          className="w-[18px] shrink-0"
+        />
+        <div className="flex min-w-0 flex-1 flex-col justify-center gap-4">
+          <div>
+            <p className="text-[2.125rem] font-bold leading-tight">
+              {resumed ? todayText.ready.resumed(count) : todayText.ready.heading(count)}
+            </p>
+            <p className="text-lg text-ink-2">
+              {todayText.ready.setsAndTime(todayText.ready.sets(setNames), secondsLeft)}
+            </p>
+          </div>
+          <div className="max-w-[34rem] space-y-2 border-t border-line pt-4 text-ink-2">
+            {todayText.ready.how.map((sentence) => (
+              <p key={sentence}>{sentence}</p>
+            ))}
+          </div>
+          {note}
+        </div>
+      </div>
+      <div ref={key} className="mb-[4.5rem] flex min-h-[11.5rem] basis-[26%]">
+        <Button size="half-screen" hint={todayText.ready.hint} onClick={onBegin}>
+          {resumed ? todayText.ready.goOn : todayText.ready.begin}
+        </Button>
+      </div>
+    </div>
+  );
+}
