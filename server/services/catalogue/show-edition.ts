@@ -1,0 +1,46 @@
+import { desc, eq } from 'drizzle-orm';
+import { tables } from '#database/client.ts';
+import type { EditionView } from '#shared/contracts/intake.ts';
+import { caseSet } from '#shared/lastlayer/index.ts';
+import { asAdministrator, type Ctx } from '../context.ts';
+import { casePicture } from './case-picture.ts';
+import { readEditionContent } from './read-edition.ts';
+
+/** One edition: its cases in the order of their names, and what the set has beyond them. @throws Problem not-found. */
+export async function showEdition(
+  ctx: Ctx,
+  { setKey, number }: { setKey: string; number: number },
+): Promise<EditionView> {
+  return asAdministrator(ctx, async (tx) => {
+    const content = await readEditionContent(tx, setKey, number);
+    const { edition } = tables;
+    const numbers = await tx
+      .select({ number: edition.number })
+      .from(edition)
+      .where(eq(edition.setKey, setKey))
+      .orderBy(desc(edition.number));
+    const set = caseSet(setKey);
+    return {
+      setKey,
+      setName: content.setName,
+      number,
+      publishedAt: content.publishedAt.getTime(),
+      note: content.note,
+      numbers: numbers.map((row) => row.number),
+      cases: [...content.cases.values()].map(({ key, name, group, algorithms }) => {
+        const c = set.byKey(key);
+        if (!c) throw new Error(`Edition ${number} of ${setKey} holds ${key}, which is no case of the set.`);
+        return {
+          key,
+          name,
+          group,
+          picture: casePicture(set, c, algorithms[0]?.algorithm),
+          prior: { weight: c.weight, total: set.states },
+          angles: c.angles,
+          algorithms: algorithms.map(({ algorithm, note }) => ({ algorithm, note })),
+        };
+      }),
+      missing: set.cases.filter(({ key }) => !content.cases.has(key)).map(({ name }) => name),
+    };
+  });
+}
