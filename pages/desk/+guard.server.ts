@@ -1,5 +1,9 @@
+import { redirect } from 'vike/abort';
 import type { PageContextServer } from 'vike/types';
 import { guardArea } from '#renderer/load-area.ts';
 
 // https://vike.dev/guard
-export const guard = (pageContext: PageContextServer) => guardArea(pageContext, ['captain']);
+export async function guard(pageContext: PageContextServer) {
+  await guardArea(pageContext, ['captain']);
+  if (/^\/desk\/?$/.test(pageContext.urlPathname)) throw redirect('/desk/squad');
+}

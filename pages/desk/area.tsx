@@ -1,22 +1,48 @@
 import type { ReactNode } from 'react';
-import type { Area } from '#renderer/area.tsx';
-import { AreaFrame, type Place } from '#renderer/area-frame.tsx';
-import { shellText } from '#shared/text/shell.ts';
+import { type Area, type AreaRoute, routeOf } from '#renderer/area.tsx';
+import { call } from '#shared/contracts/endpoint.ts';
+import { endpoints } from '#shared/contracts/endpoints.ts';
+import { deskText } from '#shared/text/desk.ts';
+import { DeskFrame } from './desk-frame.tsx';
+import { MemberPage } from './member/member-page.tsx';
+import { ProgrammePage } from './programme/programme-page.tsx';
+import { SquadPage, squadInput } from './squad/squad-page.tsx';
+import { StandingsPage, standingsInput } from './standings/standings-page.tsx';
 
-const places: readonly Place[] = [
-  { href: '/desk/squad', label: shellText.places.squad },
-  { href: '/desk/standings', label: shellText.places.standings },
-  { href: '/desk/programme', label: shellText.places.programme },
-  { href: '/today', label: shellText.places.training },
+const routes: readonly AreaRoute[] = [
+  {
+    path: '/desk/squad',
+    title: deskText.squad.title,
+    Page: SquadPage,
+    calls: (_params, search) => [call(endpoints.squad, squadInput(search.setKey))],
+  },
+  {
+    path: '/desk/squad/:memberId',
+    title: deskText.member.title,
+    Page: MemberPage,
+    calls: ({ memberId = '' }) => [call(endpoints.memberPage, { memberId })],
+  },
+  {
+    path: '/desk/standings',
+    title: deskText.standings.title,
+    Page: StandingsPage,
+    calls: (_params, search) => [call(endpoints.standings, standingsInput(search.setKey))],
+  },
+  {
+    path: '/desk/programme',
+    title: deskText.programme.title,
+    Page: ProgrammePage,
+    calls: () => [call(endpoints.programme, {})],
+  },
 ];
 
 function Frame({ children }: { children: ReactNode }) {
-  return (
-    <AreaFrame home="/desk/squad" places={places}>
-      {children}
-    </AreaFrame>
-  );
+  return <DeskFrame titleOf={titleOf}>{children}</DeskFrame>;
 }
 
 /** The captain's screens. */
-export const deskArea: Area = { Frame, routes: [] };
+export const deskArea: Area = { Frame, routes };
+
+function titleOf(pathname: string): string {
+  return routeOf(deskArea, pathname)?.route.title ?? '';
+}

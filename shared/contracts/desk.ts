@@ -38,6 +38,8 @@ const lostCase = z.strictObject({
   mostly: z.string(),
 });
 export const squadView = z.strictObject({
+  /** The captain's local date, ISO. */
+  date: z.string(),
   /** The programme: what can be chosen. */
   sets: z.array(z.strictObject({ setKey: z.string(), name: z.string(), edition: z.int(), limitMs: z.int() })),
   /** The set whose groups are the columns; null: the columns are the sets. */
@@ -60,6 +62,10 @@ export type SquadView = z.infer<typeof squadView>;
 /** Any text: what is no member's id is not found, like a member who is not there. */
 export const memberPageInput = z.strictObject({ memberId: z.string() });
 export const memberPageView = z.strictObject({
+  /** The member's local date, ISO. */
+  date: z.string(),
+  /** The captain's time zone: instants are shown in it. */
+  timeZone: z.string(),
   memberId: uuid,
   nickname: z.string(),
   role: z.enum(['member', 'captain']),

@@ -6,6 +6,7 @@ const AUFS = { 1: 'U', 2: 'U2', 3: 'U′' } as const;
 /** The captain's desk. */
 export const deskText = {
   few: 'Hollow: fewer than 20 answers in 28 days.',
+  none: '–',
   never: 'never',
   today: 'today',
   yesterday: 'yesterday',
@@ -15,38 +16,37 @@ export const deskText = {
   cannotLoad: 'The figures could not be loaded',
   retry: 'Try again',
 
+  figureLabel: (figure: {
+    value: string;
+    low: string;
+    high: string;
+    answers: number;
+    change: string | null;
+  }) =>
+    `${figure.value}, between ${figure.low} and ${figure.high}, ${count(figure.answers, 'answer', 'answers')}${figure.change ? `, ${figure.change} points in 28 days` : ''}`,
+
   squad: {
     title: 'Squad',
-    titleOf: (set: string, byGroup: boolean) => `Squad, ${set}${byGroup ? ' by shape' : ''}`,
-    titleAll: 'Squad, all sets',
-    lead: (limit: string) =>
-      `Dealt recall now: the chance that the next case a solve deals is named${limit}. The tick is the figure, the bar its 90 % interval; beside it the change in points over 28 days.`,
-    inside: (limitMs: number, asksAuf: boolean) =>
-      `${asksAuf ? ', with its AUF,' : ''} inside ${seconds(limitMs)}`,
-    insideOwn: ' inside the limit of its set',
-    view: 'Columns',
+    titleOfGroups: (set: string) => `Squad, ${set} by group`,
+    lead: (limit: string | null) =>
+      `Dealt recall now: the chance that the next case a solve deals is named, with its AUF where it is asked, ${limit === null ? 'inside the limit of its set' : `inside ${limit}`}.`,
+    key: 'The tick is the figure in per cent, the bar its 90 % interval. Hollow: fewer than 20 answers in 28 days.',
+    limit: (limitMs: number) => seconds(limitMs),
+    view: 'Show',
     allSets: 'All sets',
-    tableCaption: 'Dealt recall by member',
     member: 'Member',
-    answers: 'Answers, 28 days',
+    change: '28 days',
+    changeOf: (name: string) => `${name}, change over`,
+    answers: 'Answers',
     lastTrained: 'Last trained',
-    minutes: 'Minutes a day',
+    minutes: 'Min a day',
+    minutesOf: (minutes: number) => minutes.toFixed(1),
     all: 'All',
     ungrouped: 'Other',
-    captain: 'captain',
-    dealt: (share: number) => `${percent(share)} of solves`,
-    notAnswering: 'does not answer for it',
-    mean: 'Squad, mean',
-    meanLabel: (name: string, value: string) => `${name}: ${value} on average`,
-    figureLabel: (figure: {
-      value: string;
-      low: string;
-      high: string;
-      answers: number;
-      change: string | null;
-    }) =>
-      `${figure.value}, between ${figure.low} and ${figure.high}, ${count(figure.answers, 'answer', 'answers')}${figure.change ? `, ${figure.change} points in 28 days` : ''}`,
-    figureFew: 'few answers',
+    dealt: (share: number) => percent(share),
+    dealtLong: (share: number) => `, ${percent(share)} of solves`,
+    mean: (value: number) => `mean ${Math.round(value * 100)}`,
+    notAnswering: 'not assigned',
     csv: 'Download CSV',
     csvFile: (set: string | null, date: string) => `squad${set ? `-${set}` : ''}-${date}.csv`,
     csvHead: {
@@ -54,8 +54,10 @@ export const deskText = {
       recall: (name: string) => `${name}, dealt recall %`,
       low: (name: string) => `${name}, from %`,
       high: (name: string) => `${name}, to %`,
-      answers: (name: string) => `${name}, answers in 28 days`,
-      change: (name: string) => `${name}, change in points`,
+      answersOf: (name: string) => `${name}, answers in 28 days`,
+      change: (name: string) => `${name}, change in points over 28 days`,
+      answers: 'Answers in 28 days',
+      minutes: 'Minutes a day over 28 days',
     },
     roles: { member: 'member', captain: 'captain' },
     empty: 'Nobody is in the club yet',
@@ -87,54 +89,49 @@ export const deskText = {
   },
 
   member: {
+    title: 'Member',
     back: 'Squad',
     lastTrained: (when: string) => `Last trained ${when}.`,
     neverTrained: 'Has not trained yet.',
-    captain: 'Captain; trains like the others.',
-    recallNow: 'Dealt recall by set',
+    captain: 'Captain, trains like the others.',
     trend: (set: string) => `${set}: dealt recall over 90 days`,
     trendTooShort: 'A line appears after two days of answers.',
+    interval: (low: string, high: string) => `${low} to ${high}`,
     now: 'now',
     date: 'Date',
+    recall: 'Dealt recall',
     from: 'from',
     to: 'to',
-    edition: (edition: number) => `edition ${edition}`,
+    edition: (edition: number) => `dealt recall, edition ${edition}`,
     answers: (answers: number) => `${count(answers, 'answer', 'answers')} in 28 days`,
     noSets: 'Answers for no set',
     noSetsLead: 'The programme says who answers for what.',
     outcomes: 'Outcomes, last 28 days',
     noAnswers: 'No answers in the last 28 days.',
-    rates: {
-      held: 'held',
-      late: 'late',
-      missed: 'missed',
-      left: 'left',
-      misTaps: 'mis-taps',
-    },
-    ofShown: (value: number) => String(value),
+    rates: { held: 'held', late: 'late', missed: 'missed', left: 'left', misTaps: 'mis-taps' },
+    rateOf: (name: string, of: number, all: number) => `${name}, ${of} of ${all}`,
     weakest: 'Weakest cases',
     weakestLead:
       'Most solves lost first: how often a solve deals the case, times the chance that it is not held.',
-    weakestCount: (shown: number, all: number) => `${shown} of ${all} cases`,
+    weakestCount: (shown: number, all: number) => `${shown} of ${count(all, 'case', 'cases')}`,
     showAll: 'Show all cases',
     showFewer: 'Show fewer',
     columns: {
       case: 'Case',
-      set: 'Set',
       state: 'State',
       recall: 'Recall',
       answers: 'Answers',
-      last: 'Last outcome',
-      lost: 'Solves lost',
+      last: 'Last',
+      lost: 'Lost',
       at: 'When',
       named: 'Named',
       outcome: 'Outcome',
-      time: 'Recognised in',
+      time: 'Time',
       lostBy: 'Lost by',
     },
-    states: { unmet: 'unmet', settling: 'settling', holding: 'holding', slipping: 'slipping' },
     outcome: { held: 'held', late: 'late', missed: 'missed', left: 'left' },
     lately: 'Latest answers',
+    latelyCaption: 'The newest 30, by when they were given; time to the moment of recognition.',
     latelyNone: 'No answers yet.',
     namedWords: {
       solved: 'solved',
@@ -143,17 +140,17 @@ export const deskText = {
       left: 'left',
     },
     misTap: 'mis-tap',
-    none: '–',
     seconds: (ms: number) => seconds(ms, 1),
-    perCent: (share: number) => percent(share),
   },
 
   standings: {
     title: 'Standings',
+    titleOf: (set: string) => `Standings, ${set}`,
     lead: (days: number) =>
-      `Mean dealt recall of the last ${days} days. Ranked by the low end of the interval, so a figure that rests on little stands lower until it rests on more.`,
+      `Dealt recall, mean of the last ${days} days. Ranked by the low end of the interval: a figure that rests on little stands lower until it rests on more.`,
     sets: 'Set',
-    conditions: (edition: number, limitMs: number) => `Edition ${edition} · limit ${seconds(limitMs)}`,
+    inClub: 'In the club',
+    conditions: (edition: number, limitMs: number) => `edition ${edition}, limit ${seconds(limitMs)}`,
     caption: (name: string) => `Standings, ${name}`,
     rank: 'Rank',
     member: 'Member',
@@ -167,19 +164,20 @@ export const deskText = {
     isMe: 'you',
     notOptedIn: (people: number) =>
       people === 1
-        ? '1 member who answers for this set has not opted in to boards.'
-        : `${people} members who answer for this set have not opted in to boards.`,
-    allOptedIn: 'Everyone who answers for this set is on the board.',
-    optInHow: 'Each member decides in their own settings, under Club.',
+        ? '1 who answers for this set is not shown.'
+        : `${people} who answer for this set are not shown.`,
+    optInHow: 'Each member opts in, or not, under Club.',
+    allOptedIn: 'Everyone who answers for this set has opted in.',
     empty: 'Nobody is on this board yet',
-    emptyLead: 'Members come onto boards when they opt in themselves, and are ranked from 20 answers on.',
+    emptyLead: 'Members come onto boards when they opt in under Club, and are ranked from 20 answers on.',
     noRanked: 'Nobody has 20 answers in these days yet.',
     none: 'No set is assigned yet',
     shared: 'Between clubs',
-    sharedLead: 'Figures of teams, never of people: the mean of the members active in the last 30 days.',
+    sharedLead:
+      'Figures of teams, never of people: the mean of the members active in 30 days, drawn towards the mean of all by as much as three members weigh.',
     sharedCaption: (name: string, set: string) => `${name}, ${set}`,
-    club: 'Club',
-    members: 'Members',
+    team: (members: number) => count(members, 'member', 'members'),
+    teamLabel: (value: string, low: string, high: string) => `${value}, between ${low} and ${high}`,
     mine: 'your club',
     noShared: 'Your club is on no shared board.',
     noTeams: 'No club has published a figure on this board yet.',
@@ -204,7 +202,7 @@ export const deskText = {
     asked: 'asked',
     notAsked: 'not asked',
     everyone: 'everyone',
-    chosen: (people: number) => count(people, 'member', 'members'),
+    nobody: 'nobody now',
     edit: 'Edit',
     editOf: (name: string) => `Edit ${name}`,
     withdraw: 'Withdraw',
@@ -216,19 +214,20 @@ export const deskText = {
     noneLeft: 'Every set that has an edition is on the programme.',
     set: 'Set',
     setOption: (name: string, cases: number) => `${name}, ${count(cases, 'case', 'cases')}`,
-    assign: 'Assign',
+    assignOf: (name: string) => `Assign ${name}`,
     save: 'Save',
     cancel: 'Cancel',
     saving: 'Saving',
     editTitle: (name: string) => `Change ${name}`,
     editionField: 'Edition',
-    followNewest: 'Follow the newest',
-    followHint: (edition: number | null) => (edition === null ? 'none yet' : `now edition ${edition}`),
+    followNewest: (edition: number | null) =>
+      edition === null ? 'Follow the newest' : `Follow the newest, now ${edition}`,
     pinTo: (edition: number) => `Stay on edition ${edition}`,
     limitField: 'Limit, in seconds',
     limitHint: 'Recognition up to this is held; later is late. From 0.5 to 60.',
     aufField: 'AUF before',
     aufAsk: 'Ask for it',
+    aufNot: 'Do not ask',
     aufHint: 'A right case with a wrong AUF counts as missed.',
     whoField: 'Who answers',
     whoEveryone: 'Everyone in the club',
@@ -260,5 +259,5 @@ export const deskText = {
       gone: 'That set is not on the programme.',
     },
   },
-  change: points,
+  points,
 } as const;

@@ -136,6 +136,8 @@ describe('a member’s page', () => {
   it('is empty, not broken, for somebody who answers for nothing', async () => {
     const captain = await api.factory.person({ role: 'captain' });
     expect(await read(captain, captain.memberId)).toEqual({
+      date: iso(londonDay(api.clock.now())),
+      timeZone: 'Europe/London',
       memberId: captain.memberId,
       nickname: captain.nickname,
       role: 'captain',

@@ -5,7 +5,7 @@ import { caseSet } from '#shared/lastlayer/index.ts';
 import type { Outcome } from '#shared/memory/index.ts';
 import { deskText } from '#shared/text/desk.ts';
 import { readEditionContent } from '../catalogue/read-edition.ts';
-import type { TrainingDay } from '../training/training-day.ts';
+import type { MemberDay } from '../training/member-day.ts';
 
 const words: Readonly<Record<string, string>> = deskText.member.namedWords;
 
@@ -25,7 +25,7 @@ interface AnswerRow extends Record<string, unknown> {
 /** A member's newest answers, newest first, each named as the edition of its showing names it. */
 export async function latestAnswers(
   tx: Transaction,
-  { actor }: TrainingDay,
+  { actor }: MemberDay,
   count: number,
 ): Promise<MemberPageView['lately']> {
   const { rows } = await tx.execute<AnswerRow>(sql`

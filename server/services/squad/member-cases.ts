@@ -5,10 +5,10 @@ import { caseStateName, dueDay, type Outcome, recall } from '#shared/memory/inde
 import { casePicture } from '../catalogue/case-picture.ts';
 import { isoDate } from '../standing/local-date.ts';
 import { cardsOf, type DayCard } from '../training/cards.ts';
-import type { TrainingDay } from '../training/training-day.ts';
+import type { MemberDay } from '../training/member-day.ts';
 
 /** Every case a member answers for, those that lose most solves first: prior × (1 − recall now). */
-export async function memberCases(tx: Transaction, day: TrainingDay): Promise<MyCase[]> {
+export async function memberCases(tx: Transaction, day: MemberDay): Promise<MyCase[]> {
   const last = await lastOutcomes(tx, day);
   return cardsOf(day)
     .map((card) => ({ card, lost: lossOf(card, day.day) }))
@@ -42,7 +42,7 @@ function presentCase(card: DayCard, day: number, lastOutcome: Outcome | null): M
   };
 }
 
-async function lastOutcomes(tx: Transaction, { actor }: TrainingDay): Promise<Map<string, Outcome>> {
+async function lastOutcomes(tx: Transaction, { actor }: MemberDay): Promise<Map<string, Outcome>> {
   const { rows } = await tx.execute<{ case_key: string; outcome: Outcome }>(sql`
     select distinct on (case_key) case_key, outcome from review
     where club_id = ${actor.clubId}::uuid and member_id = ${actor.memberId}::uuid

@@ -3,9 +3,9 @@ import { interval } from '#shared/standing/index.ts';
 import { asCaptain, type Ctx } from '../context.ts';
 import { isoDate } from '../standing/local-date.ts';
 import { type DayFigure, dayFigures, latestFigures, presentFigure } from '../standing/read-figures.ts';
+import { dayOfMember } from './day-of-member.ts';
 import { latestAnswers } from './latest-answers.ts';
 import { memberCases } from './member-cases.ts';
-import { readMemberDay } from './member-day.ts';
 import { periodAt } from './period.ts';
 import { lastTrainedDays } from './squad-figures.ts';
 
@@ -19,7 +19,7 @@ const LATEST = 30;
  */
 export async function readMemberPage(ctx: Ctx, { memberId }: { memberId: string }): Promise<MemberPageView> {
   return asCaptain(ctx, async (tx, captain) => {
-    const day = await readMemberDay(ctx, tx, captain, memberId);
+    const day = await dayOfMember(ctx, tx, captain, memberId);
     const { clubId } = captain;
     const { fromDay } = periodAt(day.day);
     const days = await dayFigures(tx, {
@@ -32,6 +32,8 @@ export async function readMemberPage(ctx: Ctx, { memberId }: { memberId: string 
     const newest = await latestFigures(tx, { clubId, memberId });
     const last = (await lastTrainedDays(tx, { clubId, memberIds: [memberId] })).get(memberId);
     return {
+      date: isoDate(day.day),
+      timeZone: captain.timeZone,
       memberId,
       nickname: day.member.nickname,
       role: day.member.role,

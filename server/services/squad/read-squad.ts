@@ -3,7 +3,7 @@ import { localDay } from '#shared/memory/index.ts';
 import { notFound } from '../../http/problem.ts';
 import { readEditionContent } from '../catalogue/read-edition.ts';
 import { asCaptain, type Ctx } from '../context.ts';
-import { dayOf } from '../standing/local-date.ts';
+import { dayOf, isoDate } from '../standing/local-date.ts';
 import { BOARD_DAYS, buildBoard } from '../standings/build-board.ts';
 import { readProgramme } from '../training/read-programme.ts';
 import { PERIOD_DAYS, periodAt } from './period.ts';
@@ -42,6 +42,7 @@ export async function readSquad(ctx: Ctx, input: { setKey?: string | undefined }
     const now = await newestSums(tx, whose, period.all);
     const board = entries[0] ?? null;
     return {
+      date: isoDate(today),
       sets: programme.map(({ setKey, setName, edition, limitMs }) => ({
         setKey,
         name: setName,
