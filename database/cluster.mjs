@@ -21,7 +21,7 @@ import { ADMIN, APP, addressOf, ensureDatabase, OWNER, resetAdmin } from './clus
  *   places?: {versioned: string[], path: string}}} wish
  *   `throwAway`: for tests, does not survive a power cut; `notice` hears what was repaired, a sentence each.
  * @returns {Promise<{adminUrl: string, ownerUrl: string, appUrl: string, port: number, version: number,
- *   id: string, made: boolean, logFile: string, server: import('node:child_process').ChildProcess,
+ *   id: string, made: boolean, pgdata: string, logFile: string, server: import('node:child_process').ChildProcess,
  *   stop: () => Promise<void>}>} `id` names this cluster for good; `made`: the database is new and has no tables.
  * @throws {PlainError} with one clear sentence when it cannot be had.
  */
@@ -66,6 +66,7 @@ export async function openCluster(wish) {
     version,
     id,
     made,
+    pgdata,
     logFile: at.logFile,
     server: child,
     stop: () => (isAlive(child) ? stopPostmaster(child.pid) : Promise.resolve()),
@@ -79,12 +80,12 @@ function read(file) {
 /** Removes a cluster that was never finished; moves aside one that is not known to be unfinished. */
 async function clearUnusable({ pgdata, markFile }, connection, notice) {
   if (existsSync(markFile)) return;
-  if (isEmpty(pgdata)) {
+  if (connection?.state === 'making') {
+    notice('An earlier first start was cut short. It is done again.');
+    rmSync(pgdata, { recursive: true, force: true });
+  } else if (isEmpty(pgdata)) {
     if (connection?.state === 'complete')
       notice("The database's folder was gone. A new one is made and filled again.");
-    rmSync(pgdata, { recursive: true, force: true });
-  } else if (connection?.state === 'making') {
-    notice('An earlier first start was cut short. It is done again.');
     rmSync(pgdata, { recursive: true, force: true });
   } else {
     notice(

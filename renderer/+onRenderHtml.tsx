@@ -18,6 +18,7 @@ export function onRenderHtml(pageContext: PageContextServer) {
     <title>${title ? `${title} · ${shellText.product}` : shellText.product}</title>
     <meta name="description" content="${shellText.description}">
     <link rel="icon" href="/icon.svg" type="image/svg+xml">
+    <link rel="apple-touch-icon" href="/apple-touch-icon.png">
   </head>
   <body>
     <div id="root">${dangerouslySkipEscape(body)}</div>

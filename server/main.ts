@@ -24,7 +24,7 @@ async function main(): Promise<void> {
   const { development, demo, secure } = settings;
   const mountPages = await (development ? livePages(demo) : builtPages(demo));
   const app = createApp({ deps, pool, keys, log, demo, secure, development, mountPages });
-  const jobs = await startJobs({ databaseUrl: settings.databaseOwnerUrl, log });
+  const jobs = await startJobs({ databaseUrl: settings.databaseOwnerUrl, clock: deps.clock, log });
 
   const server = app.listen(settings.port, settings.host);
   await new Promise<void>((resolve, reject) => {

@@ -218,6 +218,7 @@ CREATE TABLE "mis_tap" (
 	"member_id" uuid NOT NULL,
 	"review_id" uuid NOT NULL,
 	"case_key" text NOT NULL,
+	"local_day" integer NOT NULL,
 	"at" timestamp with time zone NOT NULL,
 	"received_at" timestamp with time zone NOT NULL,
 	CONSTRAINT "mis_tap_club_id_member_id_review_id_pk" PRIMARY KEY("club_id","member_id","review_id")

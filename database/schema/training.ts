@@ -115,6 +115,8 @@ export const misTap = pgTable(
     memberId: memberId(),
     reviewId: uuid('review_id').notNull(),
     caseKey: text('case_key').notNull(),
+    /** The local day of the answer it speaks of. */
+    localDay: integer('local_day').notNull(),
     at: instant('at').notNull(),
     receivedAt: instant('received_at').notNull(),
   },

@@ -80,14 +80,12 @@ async function publishFirst(tx: Transaction, set: CaseSet): Promise<void> {
       note: line.note ?? '',
     };
   });
-  await tx
-    .insert(tables.edition)
-    .values({
-      setKey,
-      number: 1,
-      publishedAt: sql`now()`,
-      note: 'The algorithms that came with the installation.',
-    });
+  await tx.insert(tables.edition).values({
+    setKey,
+    number: 1,
+    publishedAt: sql`now()`,
+    note: 'The algorithms that came with the installation.',
+  });
   await tx
     .insert(tables.editionCase)
     .values(

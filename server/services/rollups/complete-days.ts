@@ -1,6 +1,6 @@
 import { and, eq, max } from 'drizzle-orm';
 import { type Transaction, tables } from '#database/client.ts';
-import type { TrainingDay } from '../training/training-day.ts';
+import type { MemberDay } from '../training/member-day.ts';
 import { readCalibrations } from './read-calibration.ts';
 import { type RollupRow, rollupRows } from './rollup-rows.ts';
 
@@ -12,7 +12,7 @@ const MOST_DAYS = 400;
  * Writes the rows of the days on which nothing was answered, from the last that stands up to `toDay`: memory has
  * not moved since, only time has passed. A set that is new on the programme begins on `toDay`.
  */
-export async function completeDays(tx: Transaction, day: TrainingDay, toDay: number): Promise<number> {
+export async function completeDays(tx: Transaction, day: MemberDay, toDay: number): Promise<number> {
   const { rollup } = tables;
   const { clubId, memberId } = day.actor;
   const last = new Map(

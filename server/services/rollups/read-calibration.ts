@@ -1,10 +1,10 @@
 import { and, asc, between, eq, isNotNull } from 'drizzle-orm';
 import { type Transaction, tables } from '#database/client.ts';
-import { type Calibration, logitCalibration } from '#shared/standing/index.ts';
+import { CALIBRATION_DAYS, type Calibration, logitCalibration } from '#shared/standing/index.ts';
 import type { ClubActor } from '../context.ts';
 
 /** memory.md, decision 6: the first scored showings of the 30 days before. */
-const DAYS = 30;
+const DAYS = CALIBRATION_DAYS;
 
 export interface CalibrationSpan {
   readonly setKey: string;

@@ -1,7 +1,7 @@
 import { and, eq } from 'drizzle-orm';
 import { type Transaction, tables } from '#database/client.ts';
-import type { ReviewRow } from '../training/day-counts.ts';
-import type { TrainedSet, TrainingDay } from '../training/training-day.ts';
+import type { TrainedSet } from '../training/member-day.ts';
+import type { TrainingDay } from '../training/training-day.ts';
 import { readCalibrations } from './read-calibration.ts';
 import { rollupRows } from './rollup-rows.ts';
 
@@ -10,8 +10,6 @@ export async function writeDay(
   tx: Transaction,
   day: TrainingDay,
   { entry, set, content }: TrainedSet,
-  answers: readonly ReviewRow[],
-  misTaps: ReadonlySet<string>,
 ): Promise<void> {
   const { rollup } = tables;
   const { clubId, memberId } = day.actor;
@@ -28,8 +26,8 @@ export async function writeDay(
     content,
     memory: day.memory,
     calibration: calibration(day.day),
-    answers: answers.filter((a) => a.setKey === entry.setKey),
-    misTaps,
+    answers: day.answers.filter((a) => a.setKey === entry.setKey),
+    misTaps: day.misTaps,
   });
   await tx
     .delete(rollup)

@@ -1,6 +1,6 @@
 import type { CaseOfSet } from '#shared/lastlayer/index.ts';
 import { DEFAULT_BETA, type QueueCard, wantedRecall } from '#shared/memory/index.ts';
-import type { TrainedSet, TrainingDay } from './training-day.ts';
+import type { MemberDay, TrainedSet } from './member-day.ts';
 
 /** β of the square-root law until a member's own is fitted to their minutes. */
 export const BETA = DEFAULT_BETA;
@@ -16,7 +16,7 @@ export interface DayCard extends QueueCard {
  * A card for every case the member answers for. Its prior is the case's chance within its set times the share
  * of solves that reach the set (each set of the programme alike), normalised over the programme.
  */
-export function cardsOf(day: TrainingDay): DayCard[] {
+export function cardsOf(day: Pick<MemberDay, 'sets' | 'memory'>): DayCard[] {
   const found = day.sets.flatMap((trained) =>
     [...trained.content.cases.keys()].flatMap((key) => {
       const c = trained.set.byKey(key);

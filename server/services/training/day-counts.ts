@@ -16,6 +16,18 @@ export async function answersOfDay(tx: Transaction, actor: ClubActor, day: numbe
     .orderBy(review.answeredAt, review.reviewId);
 }
 
+/** Which of a local day's answers were mis-taps. */
+export async function misTapsOfDay(tx: Transaction, actor: ClubActor, day: number): Promise<Set<string>> {
+  const { misTap } = tables;
+  const rows = await tx
+    .select({ id: misTap.reviewId })
+    .from(misTap)
+    .where(
+      and(eq(misTap.clubId, actor.clubId), eq(misTap.memberId, actor.memberId), eq(misTap.localDay, day)),
+    );
+  return new Set(rows.map((row) => row.id));
+}
+
 /** The whole log of some cases of one member, and which of its answers were mis-taps. */
 export async function logOfCases(
   tx: Transaction,

@@ -5,9 +5,10 @@ import { DEFAULT_COSTS, newCaseCap, planQueue, type QueueItem } from '#shared/me
 import type { Ctx } from '../context.ts';
 import { newId } from '../new-id.ts';
 import { BETA, cardsOf, type DayCard } from './cards.ts';
-import { type ReviewRow, spentMs } from './day-counts.ts';
+import { spentMs } from './day-counts.ts';
 import { gridOf, gridsOf } from './grid.ts';
-import type { ShowingRow, TrainedSet, TrainingDay } from './training-day.ts';
+import type { TrainedSet } from './member-day.ts';
+import type { ShowingRow, TrainingDay } from './training-day.ts';
 
 /** Seconds a showing is reckoned to take until a member's own are learned. */
 export const COSTS = DEFAULT_COSTS;
@@ -20,25 +21,18 @@ export const STEP = 100;
 
 export interface DayPlan {
   readonly cards: readonly DayCard[];
-  /** Seconds of the day's minutes already used. */
-  readonly spentSeconds: number;
   /** What is still to be issued after the open showings, in order. */
   readonly queue: readonly QueueItem[];
-  readonly open: readonly ShowingRow[];
 }
 
 /** What the rest of the member's minutes go to, given the day's answers and the showings already issued. */
-export function planRest(
-  day: TrainingDay,
-  open: readonly ShowingRow[],
-  answers: readonly ReviewRow[],
-): DayPlan {
+export function planRest(day: TrainingDay): DayPlan {
   const cards = cardsOf(day);
-  const spentSeconds = answers.reduce((sum, a) => sum + spentMs(a), 0) / 1000;
-  const returning = open.filter((s) => s.reason === 'retest').length * COSTS.retest;
+  const spentSeconds = day.answers.reduce((sum, a) => sum + spentMs(a), 0) / 1000;
+  const returning = day.open.filter((s) => s.reason === 'retest').length * COSTS.retest;
   const metToday = cards.filter((card) => card.memory?.firstDay === day.day).length;
   const seconds = day.member.minutesPerDay * 60;
-  const issued = new Set(open.map((s) => s.caseKey));
+  const issued = new Set(day.open.map((s) => s.caseKey));
   // The plan is made over all cases each time, the issued ones among them: their share of the minutes is theirs.
   const queue = planQueue({
     cards,
@@ -48,27 +42,29 @@ export function planRest(
     newCap: Math.max(0, newCaseCap(seconds, COSTS) - metToday),
     costs: COSTS,
   }).filter(({ key }) => !issued.has(key));
-  return { cards, spentSeconds, queue, open };
+  return { cards, queue };
 }
 
-/** Issues the next showings of the plan, up to what is kept ahead. */
+/** Issues the next showings of the plan, up to what is kept ahead; says how many. */
 export async function issueShowings(
   ctx: Ctx,
   tx: Transaction,
   day: TrainingDay,
   plan: DayPlan,
-): Promise<ShowingRow[]> {
-  const wanted = plan.queue.slice(0, Math.max(0, AHEAD - plan.open.length));
-  if (wanted.length === 0) return [];
+): Promise<number> {
+  const wanted = plan.queue.slice(0, Math.max(0, AHEAD - day.open.length));
+  if (wanted.length === 0) return 0;
   const byKey = new Map(plan.cards.map((card) => [card.key, card]));
-  let position = Math.max(0, ...plan.open.map((s) => s.position), await lastPosition(tx, day));
+  let position = await lastPosition(tx, day);
   const rows = wanted.flatMap(({ key, kind }) => {
     const card = byKey.get(key);
     if (!card) return [];
     position += STEP;
     return [makeShowing(ctx, day, card.trained, key, kind, position)];
   });
-  return tx.insert(tables.showing).values(rows).returning();
+  day.open.push(...(await tx.insert(tables.showing).values(rows).returning()));
+  day.open.sort((a, b) => a.position - b.position);
+  return rows.length;
 }
 
 /** Position of the day's last showing, answered or not; 0 before the first. */

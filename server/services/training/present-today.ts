@@ -4,21 +4,18 @@ import type { Showing, TodayView } from '#shared/contracts/today.ts';
 import { stickersOf } from '#shared/lastlayer/pictures/index.ts';
 import type { Ctx } from '../context.ts';
 import { isoDate } from '../standing/local-date.ts';
-import { answersOfDay, type ReviewRow } from './day-counts.ts';
 import { gridsOf } from './grid.ts';
 import { COSTS, type DayPlan, issueShowings, planRest } from './issue-showings.ts';
 import { summariseDay } from './summarise-day.ts';
-import { openShowings, type ShowingRow, type TrainingDay } from './training-day.ts';
+import type { ShowingRow, TrainingDay } from './training-day.ts';
 
 /** The member's queue as it stands: what is issued is topped up first. */
 export async function presentToday(ctx: Ctx, tx: Transaction, day: TrainingDay): Promise<TodayView> {
-  const answers = await answersOfDay(tx, day.actor, day.day);
-  const plan = planRest(day, await openShowings(tx, day), answers);
-  const issued = await issueShowings(ctx, tx, day, plan);
-  const open = [...plan.open, ...issued].sort((a, b) => a.position - b.position);
-  const waiting = plan.queue.length - issued.length;
+  const { answers, open } = day;
+  const plan = planRest(day);
+  const waiting = plan.queue.length - (await issueShowings(ctx, tx, day, plan));
   const answered = answers.filter((a) => a.outcome !== 'left').length;
-  const empty = open.length > 0 ? null : await whyEmpty(tx, day, answers);
+  const empty = open.length > 0 ? null : await whyEmpty(tx, day);
   return {
     date: isoDate(day.day),
     localDay: day.day,
@@ -35,7 +32,7 @@ export async function presentToday(ctx: Ctx, tx: Transaction, day: TrainingDay):
     })),
     showings: open.map(presentShowing),
     empty,
-    summary: empty === 'done' ? await summariseDay(tx, day, answers) : null,
+    summary: empty === 'done' ? await summariseDay(tx, day) : null,
   };
 }
 
@@ -58,12 +55,8 @@ function secondsOf(open: readonly ShowingRow[], plan: DayPlan, waiting: number):
   return issued + later.reduce((sum, card) => sum + card.seconds, 0);
 }
 
-async function whyEmpty(
-  tx: Transaction,
-  day: TrainingDay,
-  answers: readonly ReviewRow[],
-): Promise<NonNullable<TodayView['empty']>> {
-  if (answers.length > 0) return 'done';
+async function whyEmpty(tx: Transaction, day: TrainingDay): Promise<NonNullable<TodayView['empty']>> {
+  if (day.answers.length > 0) return 'done';
   if (day.sets.length > 0)
     return day.sets.some((s) => s.content.cases.size > 0) ? 'nothing-due' : 'no-edition';
   return (await programmeHasSets(tx, day)) ? 'no-edition' : 'no-programme';

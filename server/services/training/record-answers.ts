@@ -1,4 +1,4 @@
-import { and, eq, inArray, isNull } from 'drizzle-orm';
+import { and, eq, inArray, sql } from 'drizzle-orm';
 import { type Transaction, tables } from '#database/client.ts';
 import type { AnswerInput, AnswersInput, AnswersResult } from '#shared/contracts/today.ts';
 import { Problem } from '../../http/problem.ts';
@@ -153,21 +153,21 @@ async function storeAnswers(tx: Transaction, day: TrainingDay, fresh: Sorted['fr
     .insert(review)
     .values(fresh.map(({ row }) => row))
     .returning();
-  for (const row of rows) {
-    const marked = await tx
-      .update(showing)
-      .set({ reviewId: row.reviewId })
-      .where(
-        and(
-          eq(showing.clubId, day.actor.clubId),
-          eq(showing.memberId, day.actor.memberId),
-          eq(showing.showingId, row.showingId),
-          isNull(showing.reviewId),
-        ),
-      )
-      .returning({ id: showing.showingId });
-    // The membership row is held, so nobody can have come in between; if somebody did, nothing is stored.
-    if (marked.length !== 1) throw new Problem('conflict', 'This showing was answered meanwhile. Try again.');
+  const pairs = sql.join(
+    rows.map((row) => sql`(${row.showingId}::uuid, ${row.reviewId}::uuid)`),
+    sql`, `,
+  );
+  const marked = await tx.execute(sql`
+    update ${showing} set review_id = answer.review_id
+    from (values ${pairs}) as answer (showing_id, review_id)
+    where ${showing.clubId} = ${day.actor.clubId}::uuid and ${showing.memberId} = ${day.actor.memberId}::uuid
+      and ${showing.showingId} = answer.showing_id and ${showing.reviewId} is null`);
+  // The membership row is held, so nobody can have come in between; if somebody did, nothing is stored.
+  if (marked.rowCount !== rows.length) {
+    throw new Problem('conflict', 'This showing was answered meanwhile. Try again.');
   }
+  const answered = new Set(rows.map((row) => row.showingId));
+  const left = day.open.filter((s) => !answered.has(s.showingId));
+  day.open.splice(0, day.open.length, ...left);
   return rows;
 }

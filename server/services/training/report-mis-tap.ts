@@ -45,12 +45,14 @@ export async function reportMisTap(ctx: Ctx, input: MisTapInput): Promise<TodayV
         memberId: actor.memberId,
         reviewId: row.reviewId,
         caseKey: row.caseKey,
+        localDay: row.localDay,
         at: new Date(saidAt),
         receivedAt: new Date(ctx.clock.now()),
       })
       .onConflictDoNothing()
       .returning({ id: misTap.reviewId });
     if (added.length > 0) {
+      day.misTaps.add(row.reviewId);
       await completeDays(tx, day, day.day - 1);
       const folded = await foldCases(tx, actor, [row.caseKey]);
       const memory = folded.get(row.caseKey);

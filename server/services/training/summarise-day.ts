@@ -9,11 +9,8 @@ import { COSTS } from './issue-showings.ts';
 import type { TrainingDay } from './training-day.ts';
 
 /** What a day's training moved, what it lost, and what tomorrow brings. */
-export async function summariseDay(
-  tx: Transaction,
-  day: TrainingDay,
-  answers: readonly ReviewRow[],
-): Promise<SittingSummary> {
+export async function summariseDay(tx: Transaction, day: TrainingDay): Promise<SittingSummary> {
+  const { answers } = day;
   const scored = answers.filter((a) => a.scored);
   const count = (outcome: ReviewRow['outcome']) =>
     answers.filter((a) => a.outcome === outcome && (a.scored || outcome === 'left')).length;
