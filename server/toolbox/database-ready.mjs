@@ -46,7 +46,7 @@ export async function readyDatabase({ root, dataDir, env, command }) {
     [
       'seed',
       'Catalogue and people',
-      'database/seed/run.ts',
+      'server/demo/run.ts',
       `${fingerprint(root, ['database/seed'])} demo ${env.DEMO}`,
     ],
   ];

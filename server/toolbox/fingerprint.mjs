@@ -5,7 +5,12 @@ import { join } from 'node:path';
 /** Files that tools write beside the sources. */
 const NOT_SOURCE = /\.build-.*\.mjs$|^\.|~$/;
 
-/** All files under a path, which may be a file itself, in a fixed order; paths relative to `root`. */
+/**
+ * All files under a path, which may be a file itself, in a fixed order.
+ * @param {string} root
+ * @param {string} path Relative to `root`.
+ * @returns {string[]} Relative to `root`.
+ */
 export function filesUnder(root, path) {
   const full = join(root, path);
   if (!existsSync(full)) return [];
@@ -16,7 +21,11 @@ export function filesUnder(root, path) {
     .flatMap((name) => filesUnder(root, `${path}/${name}`));
 }
 
-/** A hash of the names and contents of all files under the given paths. */
+/**
+ * A hash of the names and contents of all files under the given paths.
+ * @param {string} root
+ * @param {string[]} paths Relative to `root`.
+ */
 export function fingerprint(root, paths) {
   const hash = createHash('sha256');
   for (const file of paths.flatMap((path) => filesUnder(root, path))) {

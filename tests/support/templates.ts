@@ -1,5 +1,4 @@
 import { spawn } from 'node:child_process';
-import { existsSync } from 'node:fs';
 import { fileURLToPath } from 'node:url';
 import pg from 'pg';
 import type { TestCluster } from './global-database.ts';
@@ -93,7 +92,7 @@ export function ensureTemplate(cluster: TestCluster): Promise<void> {
     });
     const env = { DATABASE_OWNER_URL: onDatabase(cluster.ownerUrl, draft) };
     await runScript('database/migrate.ts', env);
-    if (existsSync(`${root}database/seed/catalogue.ts`)) await runScript('database/seed/catalogue.ts', env);
+    await runScript('database/seed/catalogue.ts', env);
   });
 }
 
@@ -101,7 +100,7 @@ export function ensureTemplate(cluster: TestCluster): Promise<void> {
 export function ensureDemoTemplate(cluster: TestCluster): Promise<void> {
   return ensure(cluster, DEMO, async (client, draft) => {
     await copyDatabase(client, CATALOGUE, draft);
-    await runScript('database/seed/run.ts', {
+    await runScript('server/demo/run.ts', {
       DATABASE_OWNER_URL: onDatabase(cluster.ownerUrl, draft),
       DATABASE_URL: onDatabase(cluster.appUrl, draft),
       DEMO: '1',

@@ -1,4 +1,4 @@
-import { existsSync, mkdtempSync, readdirSync, readFileSync, rmSync } from 'node:fs';
+import { chmodSync, existsSync, mkdtempSync, readdirSync, readFileSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { openCluster } from '../../database/cluster.mjs';
@@ -15,6 +15,8 @@ const PREFIX = 'sixteenfold-test-';
 export async function openThrowAway(children, progress) {
   await sweep();
   const dataDir = mkdtempSync(join(tmpdir(), `${PREFIX}${process.pid}-${processBirth(process.pid)}-`));
+  // PostgreSQL's user must be let through.
+  chmodSync(dataDir, 0o711);
   const cluster = await openCluster({ dataDir, children, throwAway: true, progress });
   return {
     cluster,
