@@ -31,6 +31,8 @@ export interface Area {
 
 export interface AreaData {
   readonly title: string;
+  /** Path and query as asked for: what the router starts from on the server. */
+  readonly location: string;
   readonly session: SessionView;
   readonly queries: DehydratedState;
 }
@@ -71,13 +73,12 @@ export function AreaPage({ area }: { area: Area }) {
       </Routes>
     </Frame>
   );
-  const { pathnameOriginal, searchOriginal } = pageContext.urlParsed;
   return (
     <QueryClientProvider client={client}>
       <HydrationBoundary state={data.queries}>
         <SessionProvider value={data.session}>
           {import.meta.env.SSR ? (
-            <StaticRouter location={`${pathnameOriginal}${searchOriginal ?? ''}`}>{screens}</StaticRouter>
+            <StaticRouter location={data.location}>{screens}</StaticRouter>
           ) : (
             <BrowserRouter>{screens}</BrowserRouter>
           )}

@@ -38,11 +38,14 @@ export async function loadArea(area: Area, pageContext: PageContextServer): Prom
     }
     client.setQueryData(callKey(call as Call<unknown, unknown>), answer.data);
   }
-  return { title: found.route.title, session, queries: dehydrate(client) };
+  return { title: found.route.title, location: locationOf(pageContext), session, queries: dehydrate(client) };
 }
 
 /** The sign-in page, coming back here afterwards. */
 function signInPath(pageContext: PageContextServer): string {
-  const { pathnameOriginal, searchOriginal } = pageContext.urlParsed;
-  return `/sign-in?next=${encodeURIComponent(`${pathnameOriginal}${searchOriginal ?? ''}`)}`;
+  return `/sign-in?next=${encodeURIComponent(locationOf(pageContext))}`;
+}
+
+function locationOf({ urlParsed }: PageContextServer): string {
+  return `${urlParsed.pathnameOriginal}${urlParsed.searchOriginal ?? ''}`;
 }

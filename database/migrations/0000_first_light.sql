@@ -70,6 +70,8 @@ CREATE TABLE "membership" (
 	"time_zone" text NOT NULL,
 	"rollover_hour" smallint DEFAULT 4 NOT NULL,
 	"minutes_per_day" smallint DEFAULT 6 NOT NULL,
+	"beta" double precision,
+	"beta_day" integer,
 	"on_boards" boolean DEFAULT false NOT NULL,
 	"holding" text DEFAULT 'right' NOT NULL,
 	"cross_colours" text DEFAULT 'white' NOT NULL,

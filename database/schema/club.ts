@@ -41,6 +41,10 @@ export const membership = pgTable(
     /** The hour at which this member's training day begins. */
     rolloverHour: smallint('rollover_hour').notNull().default(4),
     minutesPerDay: smallint('minutes_per_day').notNull().default(6),
+    /** β of the square-root law, solved once a day so that the forecast load fits the minutes; null before. */
+    beta: doublePrecision('beta'),
+    /** The local day β was last solved on. */
+    betaDay: integer('beta_day'),
     /** Shown on the club's boards; off until the member says so. */
     onBoards: boolean('on_boards').notNull().default(false),
     holding: text('holding', { enum: ['right', 'left'] })

@@ -11,6 +11,8 @@ import { seededRandom, seededUuid, seedOf } from './random.ts';
 import { type Simulation, simulateDay } from './simulate-member.ts';
 
 const LIMIT_MS = 3_000;
+/** β while the history is made: about what the first nights' solutions come to for these people. */
+const HISTORY_BETA = 0.045;
 /** Members are simulated side by side: each has a generator of their own, so the order does not matter. */
 const SIDE_BY_SIDE = 4;
 
@@ -100,6 +102,7 @@ async function makeClub(
       timeZone: club.timeZone,
       minutesPerDay: person.minutesPerDay,
       onBoards: person.onBoards,
+      beta: HISTORY_BETA,
       holding: person.holding,
       crossColours: person.crossColours,
       joinedAt: new Date(dayStart(firstDay, club.timeZone, 4)),

@@ -4,10 +4,11 @@ import type { Clock, ClubActor } from '../context.ts';
 import { dayOf } from '../standing/local-date.ts';
 import { publishTeamRows } from '../standings/publish-team-rows.ts';
 import { readMemberDay } from '../training/member-day.ts';
+import { solveMemberBeta } from '../training/solve-beta.ts';
 import { completeDays } from './complete-days.ts';
 
 /**
- * Closes every member's days up to now and publishes the team figures of the clubs that share a board. As the
+ * Closes every member's days up to now, solves their β for the day, and publishes the team figures of the clubs that share a board. As the
  * owner: it goes from club to club. One transaction a member, so that nobody waits for the whole.
  */
 export async function completeClubDays(
@@ -26,6 +27,7 @@ export async function completeClubDays(
       const actor: ClubActor = { ...member, clubName: name };
       rows += await owner.transaction(async (tx) => {
         const day = await readMemberDay({ clock }, tx, actor, { hold: true });
+        await solveMemberBeta(tx, day);
         return completeDays(tx, day, day.day);
       });
     }

@@ -2,8 +2,10 @@ import type { CaseOfSet } from '#shared/lastlayer/index.ts';
 import { DEFAULT_BETA, type QueueCard, wantedRecall } from '#shared/memory/index.ts';
 import type { MemberDay, TrainedSet } from './member-day.ts';
 
-/** β of the square-root law until a member's own is fitted to their minutes. */
-export const BETA = DEFAULT_BETA;
+/** The member's β: solved nightly for their minutes, the model's default until then. */
+export function betaOf({ member }: MemberDay): number {
+  return member.beta ?? DEFAULT_BETA;
+}
 
 export interface DayCard extends QueueCard {
   readonly trained: TrainedSet;
@@ -16,7 +18,7 @@ export interface DayCard extends QueueCard {
  * A card for every case the member answers for. Its prior is the case's chance within its set times the share
  * of solves that reach the set (each set of the programme alike), normalised over the programme.
  */
-export function cardsOf(day: Pick<MemberDay, 'sets' | 'memory'>): DayCard[] {
+export function cardsOf(day: MemberDay): DayCard[] {
   const found = day.sets.flatMap((trained) =>
     [...trained.content.cases.keys()].flatMap((key) => {
       const c = trained.set.byKey(key);
@@ -32,7 +34,10 @@ export function cardsOf(day: Pick<MemberDay, 'sets' | 'memory'>): DayCard[] {
       memory: day.memory.get(c.key) ?? null,
       trained,
       case: c,
-      wanted: wantedRecall(prior, found.length, BETA),
+      order: trained.entry.position,
+      partner: trained.set.mirrorOf(c).key,
+      group: trained.content.cases.get(c.key)?.group ?? '',
+      wanted: wantedRecall(prior, found.length, betaOf(day)),
     };
   });
 }

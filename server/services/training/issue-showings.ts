@@ -4,7 +4,7 @@ import { colouringsFor } from '#shared/lastlayer/pictures/index.ts';
 import { DEFAULT_COSTS, newCaseCap, planQueue, type QueueItem } from '#shared/memory/index.ts';
 import type { Ctx } from '../context.ts';
 import { newId } from '../new-id.ts';
-import { BETA, cardsOf, type DayCard } from './cards.ts';
+import { betaOf, cardsOf, type DayCard } from './cards.ts';
 import { spentMs } from './day-counts.ts';
 import { gridOf, gridsOf } from './grid.ts';
 import type { TrainedSet } from './member-day.ts';
@@ -37,7 +37,7 @@ export function planRest(day: TrainingDay): DayPlan {
   const queue = planQueue({
     cards,
     day: day.day,
-    beta: BETA,
+    beta: betaOf(day),
     seconds: Math.max(0, seconds - spentSeconds - returning),
     newCap: Math.max(0, newCaseCap(seconds, COSTS) - metToday),
     costs: COSTS,

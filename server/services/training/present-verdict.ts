@@ -7,7 +7,7 @@ import { findingsText } from '#shared/text/findings.ts';
 import { todayWords } from '#shared/text/today-words.ts';
 import { readEditionContent } from '../catalogue/read-edition.ts';
 import { isoDate } from '../standing/local-date.ts';
-import { BETA, cardsOf, type DayCard } from './cards.ts';
+import { betaOf, cardsOf, type DayCard } from './cards.ts';
 import type { ReviewRow } from './day-counts.ts';
 import { algorithmShown } from './grade-showing.ts';
 import type { TrainingDay } from './training-day.ts';
@@ -50,7 +50,7 @@ async function presentVerdict(
     ? todayWords.solved
     : (content.cases.get(named?.key ?? '')?.name ?? named?.name ?? '');
   const memory = day.memory.get(row.caseKey) ?? null;
-  const wanted = card?.wanted ?? wantedRecall(1, 1, BETA);
+  const wanted = card?.wanted ?? wantedRecall(1, 1, betaOf(day));
   return {
     id: row.reviewId,
     status,

@@ -3,7 +3,7 @@ import type { SittingSummary } from '#shared/contracts/today.ts';
 import { newCaseCap, planQueue } from '#shared/memory/index.ts';
 import { casePicture } from '../catalogue/case-picture.ts';
 import { dayFigures } from '../standing/read-figures.ts';
-import { BETA, cardsOf } from './cards.ts';
+import { betaOf, cardsOf } from './cards.ts';
 import { type ReviewRow, spentMs } from './day-counts.ts';
 import { COSTS } from './issue-showings.ts';
 import type { TrainingDay } from './training-day.ts';
@@ -69,7 +69,7 @@ function tomorrow(day: TrainingDay): SittingSummary['tomorrow'] {
   const queue = planQueue({
     cards: cardsOf(day),
     day: day.day + 1,
-    beta: BETA,
+    beta: betaOf(day),
     seconds,
     newCap: newCaseCap(seconds, COSTS),
     costs: COSTS,
