@@ -101,8 +101,11 @@ export function DataTable<Row>(props: DataTableProps<Row>) {
   );
 }
 
-/** A region that scrolls must be reachable by keyboard, so it is a tab stop although it is no control. */
-const SCROLLABLE = { tabIndex: 0, className: 'scroll-region overflow-x-auto' };
+/**
+ * A region that scrolls must be reachable by keyboard, so it is a tab stop although it is no control. Positioned,
+ * so that texts for assistive technology inside scroll with it and do not widen the page.
+ */
+const SCROLLABLE = { tabIndex: 0, className: 'scroll-region relative overflow-x-auto' };
 
 function cell<Row>(column: Column<Row>): string {
   return cx(

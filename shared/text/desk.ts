@@ -35,16 +35,16 @@ export const deskText = {
     view: 'Show',
     allSets: 'All sets',
     member: 'Member',
-    change: '28 days',
-    changeOf: (name: string) => `${name}, change over`,
-    answers: 'Answers',
+    changeOf: (name: string) => `${name}: `,
+    change: 'change, 28 days',
+    answers: 'Answers, 28 days',
     lastTrained: 'Last trained',
     minutes: 'Min a day',
     minutesOf: (minutes: number) => minutes.toFixed(1),
     all: 'All',
     ungrouped: 'Other',
     dealt: (share: number) => percent(share),
-    dealtLong: (share: number) => `, ${percent(share)} of solves`,
+    dealtLong: ' of solves, ',
     mean: (value: number) => `mean ${Math.round(value * 100)}`,
     notAnswering: 'not assigned',
     csv: 'Download CSV',
@@ -67,7 +67,7 @@ export const deskText = {
     lost: 'Where solves are lost',
     lostLead: 'Share of solves lost to a case, mean of the squad.',
     lostNone: 'Nothing is lost: every case holds for everyone.',
-    lostShare: (share: number) => percent(share, 1),
+    lostShare: (share: number) => percent(share, share < 0.01 ? 2 : 1),
     board: (name: string, edition: number) => `Standings, ${name} edition ${edition}`,
     boardEmpty:
       'Nobody is ranked yet: it takes 20 answers in 28 days, and the member’s own word to be shown.',
@@ -83,8 +83,10 @@ export const deskText = {
     mirror: (name: string) => `mirror, named ${name}`,
     solved: 'named solved',
     unknownCase: 'another case',
-    unmet: (unmet: number, members: number) =>
-      unmet === members ? 'not met by anyone yet' : `not met yet by ${unmet} of ${members}`,
+    unmet: (who: readonly string[], members: number) =>
+      who.length === members
+        ? 'not met by anyone yet'
+        : `not met yet by ${who.length <= 2 ? who.join(' and ') : `${who.length} of ${members}`}`,
     fading: 'not asked lately, fading',
   },
 
@@ -164,9 +166,9 @@ export const deskText = {
     isMe: 'you',
     notOptedIn: (people: number) =>
       people === 1
-        ? '1 who answers for this set is not shown.'
-        : `${people} who answer for this set are not shown.`,
-    optInHow: 'Each member opts in, or not, under Club.',
+        ? '1 more answers for this set and has not opted in.'
+        : `${people} more answer for this set and have not opted in.`,
+    optInHow: 'Each member decides that under Club.',
     allOptedIn: 'Everyone who answers for this set has opted in.',
     empty: 'Nobody is on this board yet',
     emptyLead: 'Members come onto boards when they opt in under Club, and are ranked from 20 answers on.',
@@ -198,7 +200,7 @@ export const deskText = {
     newest: (edition: number | null) => (edition === null ? 'newest (none yet)' : `newest, now ${edition}`),
     pinned: (edition: number, newest: number | null) =>
       newest !== null && newest > edition ? `${edition}, newest is ${newest}` : `${edition}`,
-    limit: (limitMs: number) => seconds(limitMs, 1),
+    limit: (limitMs: number) => seconds(limitMs),
     asked: 'asked',
     notAsked: 'not asked',
     everyone: 'everyone',

@@ -40,7 +40,7 @@ export function LatestAnswers({ answers, timeZone }: { answers: readonly Answer[
     {
       key: 'named',
       header: text.columns.named,
-      cell: (row) => (row.named === row.name ? <span className="text-ink-2">{row.named}</span> : row.named),
+      cell: (row) => (row.named === row.name ? '' : row.named),
     },
     {
       key: 'time',

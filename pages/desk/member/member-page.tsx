@@ -40,7 +40,7 @@ function Member({ view }: { view: MemberPageView }) {
           <p>{text.noSetsLead}</p>
         </EmptyState>
       ) : (
-        <div className="grid gap-x-14 gap-y-10 lg:grid-cols-2">
+        <div className="grid grid-cols-[minmax(0,1fr)] gap-x-14 gap-y-10 lg:grid-cols-2">
           {view.sets.map((set) => (
             <SetTrend key={set.setKey} set={set} date={view.date} />
           ))}
@@ -49,7 +49,7 @@ function Member({ view }: { view: MemberPageView }) {
       <div className="mt-10">
         <Outcomes rates={view.rates} />
       </div>
-      <div className="mt-10 grid items-start gap-x-14 gap-y-10 xl:grid-cols-2">
+      <div className="mt-10 grid grid-cols-[minmax(0,1fr)] items-start gap-x-14 gap-y-10 xl:grid-cols-2">
         {view.cases.length > 0 && <WeakestCases cases={view.cases} />}
         <Section title={text.lately}>
           <LatestAnswers answers={view.lately} timeZone={view.timeZone} />

@@ -36,7 +36,6 @@ export function ProgrammeTable({
     {
       key: 'limit',
       header: text.columns.limit,
-      align: 'end',
       nowrap: true,
       cell: (row) => text.limit(row.limitMs),
     },

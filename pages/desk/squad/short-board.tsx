@@ -38,7 +38,7 @@ export function ShortBoard({ board }: { board: StandingsBoard }) {
                 hollow={row.figure.few}
               />
               <span aria-hidden="true" className="font-bold">
-                {numberText.percent(row.figure.value)}
+                {numberText.percent(row.figure.value, 1)}
               </span>
             </li>
           ))}

@@ -17,6 +17,7 @@ const text = deskText.squad;
 
 /** From this many columns on the grid takes the page's whole width. */
 const WIDE = 6;
+const TWO_PARTS = 'grid grid-cols-[minmax(0,1fr)] gap-10 lg:grid-cols-[minmax(0,1fr)_20rem] xl:gap-14';
 
 /** What the screen at an address reads. */
 export function squadInput(setKey: string | null | undefined): { setKey?: string } {
@@ -72,11 +73,13 @@ function Squad({ view, search }: { view: SquadView; search: URLSearchParams }) {
               })),
             ]}
           />
-          <div className={wide ? 'grid gap-10' : 'grid gap-10 lg:grid-cols-[minmax(0,1fr)_20rem] xl:gap-14'}>
+          <div className={wide ? 'grid grid-cols-[minmax(0,1fr)] gap-10' : TWO_PARTS}>
             <SquadTable view={view} rows={rows} sort={sort} />
             <div
               className={
-                wide ? 'grid items-start gap-10 md:grid-cols-2 xl:gap-14' : 'grid content-start gap-10'
+                wide
+                  ? 'grid items-start gap-10 md:grid-cols-2 xl:gap-14'
+                  : 'grid grid-cols-[minmax(0,1fr)] content-start gap-10'
               }
             >
               <LostList lost={view.lost} manySets={view.setKey === null && view.sets.length > 1} />

@@ -1,5 +1,5 @@
 import { useSearchParams } from 'react-router';
-import { type Column, DataTable, FigureBar, TextLink, VisuallyHidden } from '#renderer/ui/index.ts';
+import { AppLink, type Column, DataTable, FigureBar, VisuallyHidden } from '#renderer/ui/index.ts';
 import type { SquadRow, SquadView } from '#shared/contracts/desk.ts';
 import { deskText } from '#shared/text/desk.ts';
 import { printFigure, sayFigure, sayPastDate } from '../say-figure.ts';
@@ -23,13 +23,13 @@ export function SquadTable({ view, rows, sort }: { view: SquadView; rows: readon
       key: `d.${column.key}`,
       header: (
         <>
-          <VisuallyHidden>{text.changeOf(column.name)} </VisuallyHidden>
+          <VisuallyHidden>{text.changeOf(column.name)}</VisuallyHidden>
           {text.change}
         </>
       ),
       cell: (row) => <Change change={row.cells[index]?.change ?? null} />,
       align: 'end',
-      nowrap: true,
+      className: 'w-18 min-w-18',
       sort: sorting(`d.${column.key}`),
     };
     return [
@@ -37,7 +37,7 @@ export function SquadTable({ view, rows, sort }: { view: SquadView; rows: readon
         key: `r.${column.key}`,
         header: <FigureHead column={column} mean={meanOf(view, index)} />,
         cell: (row) => <FigureCell row={row} index={index} strong={byGroup && whole} />,
-        className: whole ? 'w-40 min-w-26' : CLOSE,
+        className: whole ? (byGroup ? 'w-28 min-w-22' : 'w-40 min-w-26') : CLOSE,
         sort: sorting(`r.${column.key}`),
       },
       ...(whole ? [change] : []),
@@ -67,6 +67,7 @@ export function SquadTable({ view, rows, sort }: { view: SquadView; rows: readon
           header: text.answers,
           cell: (row) => row.answers,
           align: 'end',
+          className: 'w-18 min-w-18',
           sort: sorting('answers'),
         },
         ...(byGroup ? [] : activityColumns(view, sorting)),
@@ -111,33 +112,33 @@ function useSorting({ key: by, direction }: Sort): (key: SortKey) => Column<Squa
 
 function Name({ row }: { row: SquadRow }) {
   return (
-    <TextLink
-      href={`/desk/squad/${row.memberId}`}
-      className="inline-flex min-h-11 items-center !text-ink sm:min-h-8"
-    >
-      {row.nickname}
+    <>
+      <AppLink
+        href={`/desk/squad/${row.memberId}`}
+        className="inline-flex min-h-12 items-center underline-offset-4 hover:underline sm:min-h-8"
+      >
+        {row.nickname}
+      </AppLink>
       {row.role === 'captain' && (
-        <span className="ps-2 text-xs font-normal text-ink-2">{text.roles.captain}</span>
+        <span className="block text-xs font-normal text-ink-2 sm:inline sm:ps-2">{text.roles.captain}</span>
       )}
-    </TextLink>
+    </>
   );
 }
 
 function FigureHead({ column, mean }: { column: SquadView['columns'][number]; mean: number | null }) {
   return (
     <>
-      {column.name}
       {column.dealt !== null && (
-        <>
-          <VisuallyHidden>{text.dealtLong(column.dealt)}</VisuallyHidden>
-          <span aria-hidden="true" className="block text-xs">
-            {text.dealt(column.dealt)}
-          </span>
-        </>
+        <span className="block text-xs font-normal text-ink-2">
+          {text.dealt(column.dealt)}
+          <VisuallyHidden>{text.dealtLong}</VisuallyHidden>
+        </span>
       )}
       {column.dealt === null && mean !== null && (
         <span className="block text-xs font-normal text-ink-2">{text.mean(mean)}</span>
       )}
+      {column.name}
     </>
   );
 }

@@ -40,8 +40,9 @@ const figure: Column<Row> = {
 const rests: Column<Row> = {
   key: 'rests',
   header: text.rests,
-  className: 'text-[0.9375rem] text-ink-2',
-  cell: (row) => text.restsOn(row.figure.answers, row.daysCounted),
+  cell: (row) => (
+    <span className="text-[0.9375rem] text-ink-2">{text.restsOn(row.figure.answers, row.daysCounted)}</span>
+  ),
 };
 
 const RANKED: readonly Column<Row>[] = [

@@ -45,7 +45,7 @@ function Standings({ view: { sets, board, notOptedIn, sharedBoards } }: { view: 
               current: setKey === board.setKey,
             }))}
           />
-          <div className="grid gap-10 lg:grid-cols-[minmax(0,1fr)_22rem] xl:gap-14">
+          <div className="grid grid-cols-[minmax(0,1fr)] gap-10 lg:grid-cols-[minmax(0,1fr)_22rem] xl:gap-14">
             <Section title={text.inClub} aside={text.conditions(board.edition, board.limitMs)}>
               <BoardTable board={board} />
               <p className="mt-4 max-w-[38rem] text-ink-2">

@@ -51,7 +51,7 @@ async function explain(
 ): Promise<string> {
   if (loss.unmetShare * 2 >= loss.share) return text.unmet(loss.unmet, loss.members);
   const [most] = [...failures].sort((a, b) => b.times - a.times || a.kind.localeCompare(b.kind));
-  if (!most) return loss.unmet > 0 ? text.unmet(loss.unmet, loss.members) : text.fading;
+  if (!most) return loss.unmet.length > 0 ? text.unmet(loss.unmet, loss.members) : text.fading;
   switch (most.kind) {
     case 'late':
       return text.late((most.recognition_ms ?? 0) / 1000);

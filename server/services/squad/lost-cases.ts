@@ -5,6 +5,7 @@ import type { EditionContent } from '../catalogue/read-edition.ts';
 
 /** A member who answers for the set: their memory of its cases, and the calibration they stand under. */
 export interface Answering {
+  readonly nickname: string;
   readonly memory: ReadonlyMap<string, CaseMemory>;
   /** Shift b on the logit scale. */
   readonly shift: number;
@@ -20,7 +21,8 @@ export interface Loss {
   readonly share: number;
   /** The part of `share` that comes from members who have not met the case. */
   readonly unmetShare: number;
-  readonly unmet: number;
+  /** Who has not met it, by nickname. */
+  readonly unmet: readonly string[];
   readonly members: number;
 }
 
@@ -35,15 +37,15 @@ export function lossesOf(set: CaseSet, content: EditionContent, squad: readonly 
     if (!c || c.skip) return [];
     const prior = c.weight / set.states;
     let lost = 0;
-    let unmet = 0;
-    for (const { memory, shift, day } of squad) {
+    const unmet: string[] = [];
+    for (const { nickname, memory, shift, day } of squad) {
       const own = memory.get(key);
       if (own) lost += 1 - calibrated(recall(own, day + 1), shift);
-      else unmet += 1;
+      else unmet.push(nickname);
     }
     const of = squad.length;
-    const share = (prior * (lost + unmet)) / of;
-    return [{ set, content, case: c, share, unmetShare: (prior * unmet) / of, unmet, members: of }];
+    const share = (prior * (lost + unmet.length)) / of;
+    return [{ set, content, case: c, share, unmetShare: (prior * unmet.length) / of, unmet, members: of }];
   });
 }
 

@@ -61,9 +61,10 @@ function squadOf(
 ): Answering[] {
   return members
     .filter(({ memberId }) => programmeOfMember([entry], memberId).length > 0)
-    .map(({ memberId }) => {
+    .map(({ memberId, nickname }) => {
       const row = newest.find((one) => one.memberId === memberId && one.setKey === entry.setKey);
       return {
+        nickname,
         memory: memories.get(memberId) ?? new Map<string, CaseMemory>(),
         shift: row?.shift ?? 0,
         day: row?.day ?? today,
