@@ -4,7 +4,7 @@ import type { EditionView } from '#shared/contracts/intake.ts';
 import { caseSet } from '#shared/lastlayer/index.ts';
 import { asAdministrator, type Ctx } from '../context.ts';
 import { casePicture } from './case-picture.ts';
-import { readEditionContent } from './read-edition.ts';
+import { inNameOrder, readEditionContent } from './read-edition.ts';
 
 /** One edition: its cases in the order of their names, and what the set has beyond them. @throws Problem not-found. */
 export async function showEdition(
@@ -40,7 +40,10 @@ export async function showEdition(
           algorithms: algorithms.map(({ algorithm, note }) => ({ algorithm, note })),
         };
       }),
-      missing: set.cases.filter(({ key }) => !content.cases.has(key)).map(({ name }) => name),
+      missing: set.cases
+        .filter(({ key }) => !content.cases.has(key))
+        .map(({ name }) => name)
+        .sort(inNameOrder),
     };
   });
 }

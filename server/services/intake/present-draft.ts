@@ -3,7 +3,7 @@ import type { DraftLine, DraftView } from '#shared/contracts/intake.ts';
 import { type CaseSet, caseSet } from '#shared/lastlayer/index.ts';
 import { intakeText } from '#shared/text/intake.ts';
 import { casePicture } from '../catalogue/case-picture.ts';
-import { newestEditions, readEditionContent } from '../catalogue/read-edition.ts';
+import { inNameOrder, newestEditions, readEditionContent } from '../catalogue/read-edition.ts';
 import { type JudgedLine, judgeLines, wordsOf } from './judge-lines.ts';
 import { mergeEdition } from './merge-edition.ts';
 import type { Draft } from './read-draft.ts';
@@ -23,7 +23,10 @@ export async function presentDraft(tx: Transaction, draft: Draft): Promise<Draft
     unknownColumns,
     covered: covered.size,
     of: set.cases.length,
-    missing: set.cases.filter(({ key }) => !covered.has(key)).map(({ name }) => name),
+    missing: set.cases
+      .filter(({ key }) => !covered.has(key))
+      .map(({ name }) => name)
+      .sort(inNameOrder),
     newestEdition,
     cannot: lines.filter(({ standing }) => standing === 'cannot').length,
     toDecide: lines.filter(({ standing }) => standing === 'decide').length,
