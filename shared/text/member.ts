@@ -7,7 +7,7 @@ const outcomes = { held: 'held', late: 'late', missed: 'missed', left: 'left' } 
 const otherNames: Readonly<Record<string, string>> = {
   solved: 'solved',
   lost: 'lost it',
-  unrecognised: 'not recognised',
+  unrecognised: 'nothing',
   left: '–',
 };
 
@@ -99,7 +99,8 @@ export const memberText = {
     answered: 'answers',
     latest: 'Latest answers',
     noAnswers: 'Not shown to you yet.',
-    columns: { when: 'When', outcome: 'Outcome', named: 'Named', time: 'Time', lostBy: 'Lost by' },
+    columns: { when: 'When', outcome: 'Outcome', time: 'Time', lostBy: 'Lost by' },
+    as: (named: string) => `named ${named}`,
     notScored: 'not scored',
     misTap: 'mis-tap',
     seconds: (ms: number) => `${(ms / 1000).toFixed(1)} s`,

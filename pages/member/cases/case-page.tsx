@@ -1,3 +1,4 @@
+import { useEffect } from 'react';
 import { useParams } from 'react-router';
 import { useCall } from '#renderer/api.ts';
 import {
@@ -14,6 +15,7 @@ import { endpoints } from '#shared/contracts/endpoints.ts';
 import type { MyCaseView } from '#shared/contracts/member.ts';
 import { aufText } from '#shared/text/auf.ts';
 import { memberText } from '#shared/text/member.ts';
+import { shellText } from '#shared/text/shell.ts';
 import { caseHref } from '../case-href.ts';
 import { sayDate } from '../say-date.ts';
 import { Awaited, MemberScreen } from '../screen.tsx';
@@ -27,6 +29,9 @@ export function CasePage() {
   const { key = '' } = useParams();
   const query = useCall(endpoints.myCase, { key });
   const title = query.data ? `${query.data.case.setName} ${query.data.case.name}` : text.title;
+  useEffect(() => {
+    document.title = `${title} · ${shellText.product}`;
+  }, [title]);
   return (
     <MemberScreen title={title} aside={<TextLink href="/cases">{text.back}</TextLink>}>
       <Awaited query={query} missing={text.missing}>

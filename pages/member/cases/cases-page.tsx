@@ -70,9 +70,9 @@ export function CasesPage() {
 
 function SetFigures({ sets }: { sets: MyCasesView['sets'] }) {
   return (
-    <ul className="flex flex-wrap gap-x-10 gap-y-3 pt-4">
+    <ul className="grid max-w-[28rem] grid-cols-2 gap-x-6 gap-y-3 pt-4">
       {sets.map(({ setKey, name, recall }) => (
-        <li key={setKey} className="w-40">
+        <li key={setKey}>
           <span className="flex justify-between gap-2 text-[0.9375rem]">
             <span className="font-bold">{name}</span>
             <span className="text-ink-2">{text.setRecall}</span>

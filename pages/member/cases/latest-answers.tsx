@@ -28,12 +28,14 @@ export function LatestAnswers({ answers }: { answers: MyCaseView['answers'] }) {
           <span className={a.outcome === 'missed' ? 'font-bold text-rose' : 'font-bold'}>
             {memberText.outcomes[a.outcome]}
           </span>
+          {a.outcome === 'missed' && (
+            <span className="text-ink-2">, {memberText.case.as(memberText.named(a.named))}</span>
+          )}
           {a.misTapped && <span className="text-ink-2">, {text.misTap}</span>}
           {!a.scored && a.outcome !== 'left' && <span className="text-ink-2">, {text.notScored}</span>}
         </>
       ),
     },
-    { key: 'named', header: text.columns.named, cell: (a) => memberText.named(a.named) },
     {
       key: 'time',
       header: text.columns.time,

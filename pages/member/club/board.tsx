@@ -20,7 +20,7 @@ export function Board({ board }: { board: StandingsBoard }) {
       header: text.member,
       rowHeader: true,
       cell: (row) => (
-        <span className={row.isMe ? 'font-bold' : undefined}>
+        <span className={row.isMe ? 'font-bold' : 'font-normal'}>
           {row.nickname}
           {row.isMe && <span className="ms-2 font-normal text-ink-2">{text.you}</span>}
         </span>

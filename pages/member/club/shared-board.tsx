@@ -12,7 +12,7 @@ const COLUMNS: Column<Row>[] = [
     key: 'club',
     header: text.club,
     rowHeader: true,
-    cell: (row) => <span className={row.isMine ? 'font-bold' : undefined}>{row.club}</span>,
+    cell: (row) => <span className={row.isMine ? 'font-bold' : 'font-normal'}>{row.club}</span>,
   },
   { key: 'members', header: text.members, align: 'end', cell: (row) => row.members },
   {

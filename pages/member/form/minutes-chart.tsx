@@ -9,7 +9,7 @@ const HEIGHT = 96;
 export function MinutesChart({ days }: { days: FormView['minutesPerDay'] }) {
   const total = days.reduce((sum, day) => sum + day.minutes, 0);
   const trained = days.filter((day) => day.minutes > 0).length;
-  const top = Math.max(5, Math.ceil(Math.max(0, ...days.map((day) => day.minutes)) / 5) * 5);
+  const top = Math.max(1, Math.ceil(Math.max(0, ...days.map((day) => day.minutes))));
   const first = dayNumber(days[0]?.date ?? '1970-01-01');
   const across = (place: number) => `${((place / days.length) * 100).toFixed(2)}%`;
   return (
@@ -52,26 +52,28 @@ export function MinutesChart({ days }: { days: FormView['minutesPerDay'] }) {
           </text>
         ))}
       </svg>
-      <table className="sr-only">
-        <caption>{text.minutesChart}</caption>
-        <thead>
-          <tr>
-            {text.minutesHead.map((head) => (
-              <th key={head} scope="col">
-                {head}
-              </th>
-            ))}
-          </tr>
-        </thead>
-        <tbody>
-          {days.map((day) => (
-            <tr key={day.date}>
-              <td>{day.date}</td>
-              <td>{day.minutes.toFixed(1)}</td>
+      <div className="sr-only">
+        <table>
+          <caption>{text.minutesChart}</caption>
+          <thead>
+            <tr>
+              {text.minutesHead.map((head) => (
+                <th key={head} scope="col">
+                  {head}
+                </th>
+              ))}
             </tr>
-          ))}
-        </tbody>
-      </table>
+          </thead>
+          <tbody>
+            {days.map((day) => (
+              <tr key={day.date}>
+                <td>{day.date}</td>
+                <td>{day.minutes.toFixed(1)}</td>
+              </tr>
+            ))}
+          </tbody>
+        </table>
+      </div>
     </figure>
   );
 }

@@ -13,11 +13,21 @@ export interface ReadyScreenProps {
 
 /** Before the first picture: the clock must not start while the page is still arriving. */
 export function ReadyScreen({ setNames, progress, secondsLeft, note, onBegin }: ReadyScreenProps) {
-  const key = useRef<HTMLDivElement>(null);
+  const begin = useRef(onBegin);
   const resumed = progress.answered > 0;
   const count = Math.max(0, progress.planned - progress.answered);
   useEffect(() => {
-    key.current?.querySelector('button')?.focus({ preventScroll: true });
+    begin.current = onBegin;
+  });
+  useEffect(() => {
+    // The key is not focused by itself: a ring on the screen would tell a thumb nothing.
+    const onKey = (event: KeyboardEvent) => {
+      if (event.target !== document.body || (event.key !== ' ' && event.key !== 'Enter')) return;
+      event.preventDefault();
+      begin.current();
+    };
+    window.addEventListener('keydown', onKey);
+    return () => window.removeEventListener('keydown', onKey);
   }, []);
   return (
     <div className="flex flex-1 flex-col">
@@ -46,7 +56,7 @@ export function ReadyScreen({ setNames, progress, secondsLeft, note, onBegin }: 
           {note}
         </div>
       </div>
-      <div ref={key} className="mb-[4.5rem] flex min-h-[11.5rem] basis-[26%]">
+      <div className="mb-[4.5rem] flex min-h-[11.5rem] basis-[26%]">
         <Button size="half-screen" hint={todayText.ready.hint} onClick={onBegin}>
           {resumed ? todayText.ready.goOn : todayText.ready.begin}
         </Button>

@@ -81,7 +81,7 @@ function Summary({ summary }: { summary: SittingSummary }) {
                     colouring={lost.picture.colouring}
                     className="w-20"
                   />
-                  <span className="block text-center text-[0.9375rem] leading-tight">
+                  <span className="block w-20 text-center text-[0.9375rem] leading-tight">
                     {lost.setName} <b>{lost.name}</b>
                   </span>
                 </AppLink>
