@@ -26,7 +26,7 @@ const placesApart = (one: LastLayerState, other: LastLayerState, aspect: Aspect)
  * What a showing of the full state `shown` was lost by when `named` was said: "mirror" if that is the mirror
  * case; otherwise the two are laid over each other from the angle and AUF at which they differ in the fewest
  * aspects, then in the fewest places, and the first aspect that still differs is told, orientation before
- * permutation. null if `named` is the case shown.
+ * permutation and corners before edges. null if `named` is the case shown.
  * @throws RangeError if `shown` is no state.
  */
 export function lostBy(set: CaseSet, shown: number, named: CaseOfSet): LostBy | null {
@@ -45,7 +45,9 @@ export function lostBy(set: CaseSet, shown: number, named: CaseOfSet): LostBy | 
         places: placesApart(state, other, aspect),
       }));
       const differing = apart.filter(({ places }) => places > 0);
-      const cost = differing.length * 100 + differing.reduce((sum, { places }) => sum + places, 0);
+      const places = differing.reduce((sum, one) => sum + one.places, 0);
+      const first = differing[0] ? ASPECTS.indexOf(differing[0].aspect) : 0;
+      const cost = differing.length * 1000 + places * 10 + first;
       if (cost >= least || differing.length === 0) continue;
       least = cost;
       lost = WORDS[differing[0]!.aspect];

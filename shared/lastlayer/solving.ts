@@ -4,7 +4,7 @@ import { type Aspect, fixedBy, isSolvedIn } from './aspects.ts';
 import type { CaseOfSet, CaseSet } from './case-set.ts';
 import { type Expander, parseMoves } from './notation.ts';
 import { type Reading, readAlgorithm, stateSolved } from './reading.ts';
-import { cornerRank, edgeRank, flipOf, indexOf, PARITY, twistOf } from './state.ts';
+import { cornerRank, edgeRank, flipOf, indexOf, PARITY, requireStateIndex, twistOf } from './state.ts';
 
 export type Solves =
   | { readonly kind: 'case' | 'skip'; readonly case: CaseOfSet; readonly normalised: string }
@@ -64,6 +64,7 @@ function effectOf(algorithm: string): number | null {
  * @throws AlgorithmSyntaxError if the algorithm cannot be read; RangeError if there is no such state.
  */
 export function rightAufsBefore(set: CaseSet, algorithm: string, state: number): readonly Auf[] {
+  requireStateIndex(state);
   const effect = effectOf(algorithm);
   if (effect === null) return [];
   return AUFS.filter((auf) => isSolvedIn(product(act(state, auf, 0), effect), set.definition.solved));
@@ -75,6 +76,7 @@ export function rightAufsBefore(set: CaseSet, algorithm: string, state: number):
  * @throws AlgorithmSyntaxError if the algorithm cannot be read; RangeError if there is no such state.
  */
 export function rightAufsAfter(set: CaseSet, algorithm: string, state: number, before: Auf): readonly Auf[] {
+  requireStateIndex(state);
   const effect = effectOf(algorithm);
   if (effect === null) return [];
   const { solved } = set.definition;

@@ -90,7 +90,7 @@ function says(row: FindingFacts): string {
         : `Says ${row.case}, but the algorithm ${solved(row.solves, row.set)}.`;
     case 'first-two-layers-broken':
       return row.pieces && row.pieces.length > 0
-        ? `Breaks the first two layers: ${listed(row.pieces.slice(0, 4))}${row.pieces.length > 4 ? ' and more' : ''} out of place.`
+        ? `Breaks the first two layers: ${row.pieces.length > 4 ? `${row.pieces.slice(0, 4).join(', ')} and more` : listed(row.pieces)} out of place.`
         : 'Breaks the first two layers.';
     case 'not-a-move':
       return row.token

@@ -30,6 +30,13 @@ type Column = (typeof COLUMNS)[number];
 const SEPARATORS = [',', ';', '\t'] as const;
 const { fileErrors } = findingsText;
 
+/** What Windows-1252 has at 0x80 to 0x9f, typographic primes among it; Node decodes those as Latin-1. */
+const WINDOWS_1252 = '€\u0081‚ƒ„…†‡ˆ‰Š‹Œ\u008dŽ\u008f\u0090‘’“”•–—˜™š›œ\u009džŸ';
+const decodeWindows = (bytes: Uint8Array): string =>
+  Buffer.from(bytes)
+    .toString('latin1')
+    .replace(/[\u0080-\u009f]/gu, (char) => WINDOWS_1252[char.charCodeAt(0) - 0x80]!);
+
 /** Bytes to text: UTF-8, UTF-16 with its mark, or what older spreadsheets save. Line ends become \n. */
 function decode(bytes: Uint8Array): string {
   const [first, second] = bytes;
@@ -40,7 +47,7 @@ function decode(bytes: Uint8Array): string {
     text = new TextDecoder(utf16 ?? 'utf-8', { fatal: true }).decode(bytes);
   } catch {
     if (utf16) throw new CaseFileError(fileErrors.notText);
-    text = new TextDecoder('windows-1252').decode(bytes);
+    text = decodeWindows(bytes);
   }
   if (text.includes('\0')) throw new CaseFileError(fileErrors.notText);
   return text.replace(/\r\n?/gu, '\n');
@@ -54,11 +61,16 @@ interface Row {
   readonly fields: readonly string[];
 }
 
+const MISPLACED_QUOTE = new Set<string>([
+  'INVALID_OPENING_QUOTE',
+  'CSV_INVALID_CLOSING_QUOTE',
+  'CSV_NON_TRIMABLE_CHAR_AFTER_CLOSING_QUOTE',
+]);
+
 /** Why csv-parse gave up, by its error codes. */
 function asCaseFileError(error: CsvError, line: number): CaseFileError {
   if (error.code === 'CSV_QUOTE_NOT_CLOSED') return new CaseFileError(fileErrors.quoteOpen(line), line);
-  if (error.code === 'INVALID_OPENING_QUOTE' || error.code === 'CSV_INVALID_CLOSING_QUOTE')
-    return new CaseFileError(fileErrors.quoteInside(line), line);
+  if (MISPLACED_QUOTE.has(error.code)) return new CaseFileError(fileErrors.quoteInside(line), line);
   return new CaseFileError(fileErrors.unreadable(line), line);
 }
 

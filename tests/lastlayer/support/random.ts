@@ -1,0 +1,13 @@
+/** A small seeded generator (mulberry32, public domain), so that a failing case can be seen again. */
+export function seeded(seed: number): () => number {
+  let state = seed >>> 0;
+  return () => {
+    state = (state + 0x6d2b79f5) >>> 0;
+    let mixed = Math.imul(state ^ (state >>> 15), state | 1);
+    mixed ^= mixed + Math.imul(mixed ^ (mixed >>> 7), mixed | 61);
+    return ((mixed ^ (mixed >>> 14)) >>> 0) / 4_294_967_296;
+  };
+}
+
+export const pick = <T>(random: () => number, list: readonly T[]): T =>
+  list[Math.floor(random() * list.length)]!;
