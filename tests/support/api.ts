@@ -34,6 +34,10 @@ export interface TestApi {
   readonly db: Database;
   /** Requests of this person (null: of nobody), each from a device just signed in. */
   as(claims: Claims | null): Agent;
+  /** Requests with this Cookie header, as a browser that has it would send them. */
+  withCookie(cookie: string): Agent;
+  /** A request that another site's page makes. */
+  foreign(path: string, body: object): Promise<request.Response>;
   /** A service's context, for calling it without HTTP. */
   ctx(claims: Claims | null): Ctx;
 }
@@ -85,27 +89,38 @@ export function useApi(urls: DatabaseUrls = useDatabase()): TestApi {
       return here().database.db;
     },
     ctx: (claims) => ({ db: here().database.db, clock, random: Math.random, claims, requestId: 'test' }),
-    as(claims) {
-      const send = async (
-        method: 'get' | 'post' | 'put' | 'patch' | 'delete',
-        path: string,
-        body?: object,
-      ) => {
-        const test = request(here().app)
-          [method](path)
-          .set('Accept', 'application/json')
-          .set('Sec-Fetch-Site', 'same-origin');
-        if (claims) test.set('Cookie', await signedIn(here().factory, claims, clock.now()));
-        return body === undefined ? test : test.send(body);
-      };
-      return {
-        get: (path) => send('get', path),
-        post: (path, body = {}) => send('post', path, body),
-        put: (path, body = {}) => send('put', path, body),
-        patch: (path, body = {}) => send('patch', path, body),
-        delete: (path, body = {}) => send('delete', path, body),
-      };
-    },
+    as: (claims) =>
+      agent(
+        () => here().app,
+        async () => (claims ? signedIn(here().factory, claims, clock.now()) : null),
+      ),
+    withCookie: (cookie) =>
+      agent(
+        () => here().app,
+        async () => cookie,
+      ),
+    foreign: async (path, body) =>
+      request(here().app).post(path).set('Sec-Fetch-Site', 'cross-site').send(body),
+  };
+}
+
+/** Sends requests the way our own pages do, with a cookie made just before each. */
+function agent(app: () => ReturnType<typeof createApp>, cookie: () => Promise<string | null>): Agent {
+  const send = async (method: 'get' | 'post' | 'put' | 'patch' | 'delete', path: string, body?: object) => {
+    const test = request(app())
+      [method](path)
+      .set('Accept', 'application/json')
+      .set('Sec-Fetch-Site', 'same-origin');
+    const jar = await cookie();
+    if (jar) test.set('Cookie', jar);
+    return body === undefined ? test : test.send(body);
+  };
+  return {
+    get: (path) => send('get', path),
+    post: (path, body = {}) => send('post', path, body),
+    put: (path, body = {}) => send('put', path, body),
+    patch: (path, body = {}) => send('patch', path, body),
+    delete: (path, body = {}) => send('delete', path, body),
   };
 }
 

@@ -5,6 +5,7 @@ import { fileURLToPath } from 'node:url';
 import { Children } from '#server/toolbox/children.mjs';
 import { ensureKeys } from '#server/toolbox/keys.mjs';
 import { startServer as startProcess } from '#server/toolbox/server-process.mjs';
+import { plainEnvironment } from './clone.ts';
 import type { DatabaseUrls } from './database.ts';
 
 export interface RunningServer {
@@ -29,7 +30,7 @@ export async function startServer(
   const server = await startProcess({
     root: fileURLToPath(new URL('../..', import.meta.url)),
     env: {
-      ...process.env,
+      ...plainEnvironment(),
       NODE_ENV: 'production',
       DEMO: '1',
       SECRETS_DIR: folder,

@@ -16,7 +16,7 @@ export async function readSession(ctx: Ctx): Promise<SessionView> {
     if (rows.length === 0) throw signedOut('Your session has ended. Sign in again.');
     const memberships = await membershipsOf(tx, claims.accountId);
     const isAdministrator =
-      claims.role === 'administrator' || (await sessionSubject(ctx.db, claims.accountId, null)) !== null;
+      claims.role === 'administrator' || (await sessionSubject(tx, claims.accountId, null)) !== null;
     return presentSession(memberships, claims, isAdministrator);
   });
 }

@@ -1,10 +1,10 @@
 import { sql } from 'drizzle-orm';
-import type { Database } from '#database/client.ts';
+import type { Database, Transaction } from '#database/client.ts';
 import type { Role } from '../context.ts';
 
 /** Role and epoch a new token may claim, or null when the person has no business there (any more). */
 export async function sessionSubject(
-  db: Database,
+  db: Database | Transaction,
   accountId: string,
   clubId: string | null,
 ): Promise<{ role: Role; epoch: number } | null> {
