@@ -1,5 +1,6 @@
 import { Children } from './children.mjs';
 import { explain, PlainError } from './plain-error.mjs';
+import { launchers, processBirth } from './processes.mjs';
 import { Steps } from './steps.mjs';
 
 /**
@@ -47,18 +48,22 @@ export async function runCommand({ place, body, stopped = 0 }) {
   }
 
   let asked;
-  for (const name of ['SIGINT', 'SIGTERM', 'SIGHUP']) {
-    process.on(name, () => {
-      if (asked === undefined) {
-        asked = Date.now();
-        steps.line('\nStopping …');
-        end(stopped);
-      } else if (Date.now() - asked > HURRY_AFTER) {
-        children.killAll();
-        process.exit(1);
-      }
-    });
-  }
+  const stop = () => {
+    if (asked === undefined) {
+      asked = Date.now();
+      steps.line('\nStopping …');
+      end(stopped);
+    } else if (Date.now() - asked > HURRY_AFTER) {
+      children.killAll();
+      process.exit(1);
+    }
+  };
+  for (const name of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(name, stop);
+  const above = launchers();
+  const look = setInterval(() => {
+    if (asked === undefined && above.some(({ pid, birth }) => processBirth(pid) !== birth)) stop();
+  }, 500);
+  look.unref();
   // A closed terminal or pipe is no reason to stop, and none to fail.
   for (const stream of [process.stdout, process.stderr]) stream.on('error', () => {});
   process.on('uncaughtException', (error) => end(1, explain(error, place)));

@@ -32,18 +32,25 @@ export async function ensurePages({ root, children, progress = () => {} }) {
   rmSync(join(root, 'dist'), { recursive: true, force: true });
   const { code, output } = await children.run(process.execPath, ['node_modules/vite/bin/vite.js', 'build'], {
     cwd: root,
-    env: { ...process.env, NODE_ENV: 'production' },
+    env: { ...process.env, NODE_ENV: 'production', NO_COLOR: '1' },
   });
   if (code !== 0) {
     if (saysDiskFull(output)) throw diskFull(root);
-    const said =
-      output
-        .split('\n')
-        .find((line) => /error/i.test(line))
-        ?.trim() ?? `it ended with ${code}`;
-    throw new PlainError(`The pages could not be built: ${said} Run "npm run build" to see all of it.`);
+    throw new PlainError(
+      `The pages could not be built: ${reason(output)} Run "npm run build" to see all of it.`,
+    );
   }
   // Sources that changed while they were built count as not yet built.
   writeJson(mark, { sources, files: filesUnder(root, 'dist') });
   return 'built';
+}
+
+/** The first line behind Vite's "error during build" that says what is wrong. */
+function reason(output) {
+  const lines = output
+    .slice(output.search(/error during build/))
+    .split('\n')
+    .slice(1);
+  const said = lines.map((line) => line.trim()).filter((line) => line && !/^Build failed with/.test(line));
+  return `${said[0] ?? 'Vite gave no reason'}${/[.!?]$/.test(said[0] ?? '') ? '' : '.'}`;
 }

@@ -37,6 +37,31 @@ export function processCommand(pid) {
   }
 }
 
+/** The process that started another; 0 if that is gone. */
+function parentOf(pid) {
+  try {
+    if (process.platform === 'linux') {
+      const stat = readFileSync(`/proc/${pid}/stat`, 'latin1');
+      return Number(stat.slice(stat.lastIndexOf(')') + 2).split(' ')[1]);
+    }
+    return Number(execFileSync('ps', ['-o', 'ppid=', '-p', String(pid)], { encoding: 'utf8' }));
+  } catch {
+    return 0;
+  }
+}
+
+/**
+ * The npm that runs this script and the shell between the two, which when they are told to stop do not all pass it
+ * on; none if no npm runs it.
+ * @returns {{pid: number, birth: string}[]}
+ */
+export function launchers() {
+  if (!process.env.npm_lifecycle_event) return [];
+  return [process.ppid, parentOf(process.ppid)]
+    .filter((pid) => pid > 1)
+    .map((pid) => ({ pid, birth: processBirth(pid) }));
+}
+
 /** Sends a signal to a process (or, with a negative number, to its group); false if it is gone. */
 export function signal(pid, name) {
   try {
