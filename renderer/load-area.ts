@@ -31,10 +31,9 @@ export async function loadArea(area: Area, pageContext: PageContextServer): Prom
     const answer = await server.run(call as Call<unknown, unknown>);
     if (!answer.ok) {
       if (answer.status === 401) throw redirect(signInPath(pageContext));
-      throw render(
-        answer.status === 403 || answer.status === 404 || answer.status === 503 ? answer.status : 500,
-        answer.detail,
-      );
+      // The input comes from the address alone: one that cannot be right names nothing.
+      const status = answer.status === 400 ? 404 : answer.status;
+      throw render(status === 403 || status === 404 || status === 503 ? status : 500, answer.detail);
     }
     client.setQueryData(callKey(call as Call<unknown, unknown>), answer.data);
   }
