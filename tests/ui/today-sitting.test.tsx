@@ -120,9 +120,13 @@ describe('a sitting', () => {
   });
 
   it('takes up the unsent answers of an earlier visit', () => {
-    const resumed = played(startSitting(someView([1, 2])), { kind: 'resume', unsent: [someAnswer(1)] });
+    const resumed = played(startSitting(someView([1, 2, 3])), {
+      kind: 'resume',
+      given: new Set([uuidOf(2)]),
+      unsent: [someAnswer(1)],
+    });
     expect(resumed.phase.kind).toBe('ready');
-    expect(shown(advance(resumed, { kind: 'begin' }))).toBe(uuidOf(2));
+    expect(shown(advance(resumed, { kind: 'begin' }))).toBe(uuidOf(3));
   });
 
   it('begins anew when the day brings more after it was over', () => {

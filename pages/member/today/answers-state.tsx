@@ -7,7 +7,7 @@ export function AnswersState({ outbox, state }: { outbox: Outbox | null; state: 
   const { answers } = todayText;
   const { unsent, trouble, refused } = state;
   return (
-    <div role="status" className="text-[0.9375rem] text-ink-2 empty:hidden">
+    <div role="status" className="pt-3 text-[0.9375rem] text-ink-2 empty:hidden">
       {trouble === 'signed-out' && (
         <p className="border-s-4 border-ochre ps-3 text-ink">
           {answers.signedOut(unsent)}{' '}

@@ -46,6 +46,7 @@ export class Outbox {
   readonly #needs: OutboxNeeds;
   readonly #watchers = new Set<() => void>();
   readonly #listeners = new Set<OutboxListener>();
+  readonly #given = new Set<string>();
   #state: OutboxState;
   #running: Promise<void> | null = null;
   #again = false;
@@ -54,6 +55,7 @@ export class Outbox {
 
   constructor(needs: OutboxNeeds) {
     this.#needs = needs;
+    for (const letter of this.letters()) this.#note(letter);
     this.#state = { ...this.#count(), trouble: null, refused: null };
   }
 
@@ -64,6 +66,11 @@ export class Outbox {
   /** The unsent letters, oldest first. */
   letters(): Letter[] {
     return this.#needs.store.read();
+  }
+
+  /** Showings answered on this device since the document was loaded, sent or not. */
+  get given(): ReadonlySet<string> {
+    return this.#given;
   }
 
   watch(watcher: () => void): () => void {
@@ -79,6 +86,7 @@ export class Outbox {
   /** Stores a letter; it goes out with the next flush. */
   put(letter: Letter): void {
     this.#needs.store.write(letter);
+    this.#note(letter);
     this.#update({});
   }
 
@@ -207,6 +215,10 @@ export class Outbox {
   #tellNotTaken(): void {
     const ids = this.letters().map((letter) => letter.id);
     for (const listener of this.#listeners) listener.notTaken(ids);
+  }
+
+  #note(letter: Letter): void {
+    if (letter.kind === 'answer') this.#given.add(letter.body.showingId);
   }
 
   #count(): Pick<OutboxState, 'unsent' | 'unsentAnswers'> {

@@ -30,8 +30,12 @@ export interface Sitting {
 }
 
 export type Step =
-  /** Answers of an earlier visit that the server may not have yet. */
-  | { readonly kind: 'resume'; readonly unsent: readonly AnswerInput[] }
+  /** What was answered on earlier visits: showings an old view may still list, and answers not sent yet. */
+  | {
+      readonly kind: 'resume';
+      readonly given: ReadonlySet<string>;
+      readonly unsent: readonly AnswerInput[];
+    }
   | { readonly kind: 'begin' }
   | { readonly kind: 'view'; readonly view: TodayView }
   | { readonly kind: 'got-it'; readonly recognitionMs: number }
@@ -72,7 +76,9 @@ export function advance(sitting: Sitting, step: Step): Sitting {
   const { phase } = sitting;
   switch (step.kind) {
     case 'resume':
-      return settled(step.unsent.reduce(given, sitting));
+      return settled(
+        step.unsent.reduce(given, { ...sitting, done: new Set([...sitting.done, ...step.given]) }),
+      );
     case 'begin':
       return phase.kind === 'ready' ? onwards(sitting) : sitting;
     case 'view':

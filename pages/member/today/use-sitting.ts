@@ -28,10 +28,10 @@ export function useSitting(view: TodayView, outbox: Outbox | null): [Sitting, Si
   const store = useStore();
   const [sitting, dispatch] = useReducer(advance, view, startSitting);
   const latest = useRef(sitting);
-  const put = useRef(store.put);
+  const cache = useRef(store);
   useEffect(() => {
     latest.current = sitting;
-    put.current = store.put;
+    cache.current = store;
   });
   useEffect(() => dispatch({ kind: 'view', view }), [view]);
 
@@ -41,17 +41,21 @@ export function useSitting(view: TodayView, outbox: Outbox | null): [Sitting, Si
       result({ verdicts, today }) {
         noteServerTime(today.serverNow);
         dispatch({ kind: 'verdicts', verdicts, view: today });
-        put.current(endpoints.today, {}, today);
+        cache.current.put(endpoints.today, {}, today);
       },
       today(next) {
         noteServerTime(next.serverNow);
-        put.current(endpoints.today, {}, next);
+        cache.current.put(endpoints.today, {}, next);
       },
       notTaken: (ids) => dispatch({ kind: 'no-verdict', ids }),
     });
-    dispatch({ kind: 'resume', unsent: unsentOf(outbox) });
+    dispatch({ kind: 'resume', given: outbox.given, unsent: unsentOf(outbox) });
     void outbox.flush();
-    return stop;
+    return () => {
+      stop();
+      // Answers may still be on their way: whoever comes back reads the queue anew.
+      void cache.current.refresh(endpoints.today);
+    };
   }, [outbox]);
 
   const post = useCallback(
@@ -73,10 +77,12 @@ export function useSitting(view: TodayView, outbox: Outbox | null): [Sitting, Si
   }, [outbox, sendingId]);
 
   useEffect(() => {
-    /** Notes the picture that is being left; once, whichever sign of leaving comes first. */
+    // Several signs of leaving may come; the picture after the one that was left has not been seen by anyone.
+    let away = false;
     const leave = () => {
       const showing = openShowing(latest.current);
-      if (!showing) return;
+      if (!showing || away) return;
+      away = true;
       const answer = post(showing.id, {
         named: 'left',
         aufBefore: null,
@@ -88,14 +94,20 @@ export function useSitting(view: TodayView, outbox: Outbox | null): [Sitting, Si
       if (outbox) sendWhileLeaving(outbox);
     };
     const onVisibility = () => {
-      if (document.visibilityState === 'hidden') leave();
-      else void outbox?.flush();
+      if (document.visibilityState === 'hidden') return leave();
+      away = false;
+      void outbox?.flush();
     };
+    const onReturn = () => {
+      away = false;
+    };
+    window.addEventListener('pageshow', onReturn);
     document.addEventListener('visibilitychange', onVisibility);
     window.addEventListener('pagehide', leave);
     return () => {
       document.removeEventListener('visibilitychange', onVisibility);
       window.removeEventListener('pagehide', leave);
+      window.removeEventListener('pageshow', onReturn);
       leave();
     };
   }, [outbox, post]);
