@@ -479,9 +479,12 @@ CREATE TRIGGER edition_algorithm_is_immutable BEFORE UPDATE OR DELETE ON "editio
 -- ---------------------------------------------------------------- Grants
 GRANT USAGE ON SCHEMA public TO sixteenfold_app;
 --> statement-breakpoint
+-- Of functions made from here on. (Limited to a schema, this would not take away what everyone has by default.)
+ALTER DEFAULT PRIVILEGES REVOKE EXECUTE ON FUNCTIONS FROM PUBLIC;
+--> statement-breakpoint
 REVOKE ALL ON ALL FUNCTIONS IN SCHEMA public FROM PUBLIC;
 --> statement-breakpoint
-ALTER DEFAULT PRIVILEGES IN SCHEMA public REVOKE EXECUTE ON FUNCTIONS FROM PUBLIC;
+REVOKE ALL ON ALL PROCEDURES IN SCHEMA public FROM PUBLIC;
 --> statement-breakpoint
 GRANT EXECUTE ON FUNCTION app_club(), app_is_administrator(), uuidv7_floor(timestamptz) TO sixteenfold_app;
 --> statement-breakpoint

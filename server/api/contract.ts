@@ -6,8 +6,11 @@ import type { AnyRow } from './row.ts';
 import { sessionRows } from './session/rows.ts';
 import { todayRows } from './today/rows.ts';
 
-/** The whole API. Pages rendered on the server call the same rows in process. */
-export const contract: Partial<Record<EndpointName, AnyRow>> = {
+/** Endpoints that read or write the session's cookies: session/routes.ts has them. */
+export type CookieEndpoint = 'signInPage' | 'signIn' | 'refreshSession' | 'switchClub' | 'signOut';
+
+/** The whole API but for those; a missing row does not compile. Pages rendered on the server call the same rows. */
+export const contract: Record<Exclude<EndpointName, CookieEndpoint>, AnyRow> = {
   ...sessionRows,
   ...deskRows,
   ...todayRows,
