@@ -4,6 +4,7 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { afterAll, describe, expect, it } from 'vitest';
+import { runCases } from '#server/cli/run-cases.ts';
 
 const ROOT = fileURLToPath(new URL('../..', import.meta.url));
 const folder = mkdtempSync(join(tmpdir(), 'cases-'));
@@ -15,7 +16,14 @@ interface Ran {
   err: string;
 }
 
-function cases(...args: string[]): Promise<Ran> {
+function cases(...args: string[]): Ran {
+  const [out, err]: [string[], string[]] = [[], []];
+  const code = runCases(args, { out: (text) => out.push(text), err: (text) => err.push(text), folder });
+  return { code, out: out.join('\n'), err: err.join('\n') };
+}
+
+/** The command as it is really started: its own process, from another folder. */
+function started(...args: string[]): Promise<Ran> {
   return new Promise((resolve) => {
     execFile(
       process.execPath,
@@ -33,9 +41,9 @@ function file(name: string, text: string): string {
 
 const T = "R U R' U' R' F R2 U' R' U' R U R' F'";
 
-describe.concurrent('the cases command', () => {
-  it('reads a file that agrees: exit code 0', async () => {
-    const { code, out, err } = await cases(
+describe('the cases command', () => {
+  it('reads a file that agrees: exit code 0', () => {
+    const { code, out, err } = cases(
       'read',
       `${ROOT}/database/seed/case-sets/pll.csv`,
       '--set',
@@ -46,12 +54,12 @@ describe.concurrent('the cases command', () => {
     expect(JSON.parse(out)).toMatchObject({ set: 'PLL', covered: 21, of: 21 });
   });
 
-  it('reads a file with findings: exit code 1, and the shape of its JSON', async () => {
+  it('reads a file with findings: exit code 1, and the shape of its JSON', () => {
     const name = file(
       'mixed.csv',
       `case,algorithm\nT,"${T}"\nF,U2 ${T}\nJa,R U R' Q U'\n,${T}\nV,R\nT,R U R' U R U2 R'\nY,${T}\nH,U\n`,
     );
-    const { code, out } = await cases('read', name, '--set', 'pll', '--json');
+    const { code, out } = cases('read', name, '--set', 'pll', '--json');
     expect(code).toBe(1);
     expect(JSON.parse(out)).toEqual({
       set: 'PLL',
@@ -70,9 +78,9 @@ describe.concurrent('the cases command', () => {
     });
   });
 
-  it('says the same in words', async () => {
+  it('says the same in words', () => {
     const name = file('words.csv', `case,algorithm,speed\nF,${T},1\n`);
-    const { code, out } = await cases('read', name, '--set', 'PLL');
+    const { code, out } = cases('read', name, '--set', 'PLL');
     expect(code).toBe(1);
     expect(out).toMatch(/line +2 +F +Solves another case +Says F, but the algorithm solves PLL T\./u);
     expect(out).toMatch(/0 of 1 line agree/u);
@@ -80,8 +88,8 @@ describe.concurrent('the cases command', () => {
     expect(out).toMatch(/Columns not used: speed/u);
   });
 
-  it('counts the cases of a step', async () => {
-    const { code, out } = await cases('count', '--entry', 'any', '--aspects', 'co,eo', '--json');
+  it('counts the cases of a step', () => {
+    const { code, out } = cases('count', '--entry', 'any', '--aspects', 'co,eo', '--json');
     expect(code).toBe(0);
     // Domain values: two classes of weight 288, five of 576, fifty-one of 1,152 among 62,208 states.
     expect(JSON.parse(out)).toEqual({
@@ -95,7 +103,7 @@ describe.concurrent('the cases command', () => {
         { weight: 1152, cases: 51 },
       ],
     });
-    expect((await cases('count', '--entry', 'corners', '--aspects', 'ep,eo')).out).toMatch(/30 cases.*384/u);
+    expect(cases('count', '--entry', 'corners', '--aspects', 'ep,eo').out).toMatch(/30 cases.*384/u);
   });
 
   it.each([
@@ -111,11 +119,26 @@ describe.concurrent('the cases command', () => {
     ['no command', [], /missing/u],
     ['a word too many', ['read', 'quote.csv', 'more', '--set', 'PLL'], /"more" is one word too many/u],
     ['an unknown option', ['count', '--colour', 'red'], /Unknown option/u],
-  ])('ends with exit code 2 and a sentence for %s', async (_, args, message) => {
+  ])('ends with exit code 2 and a sentence for %s', (_, args, message) => {
     file('quote.csv', 'case,algorithm\nT,R\nF,"R U\n');
-    const { code, out, err } = await cases(...args);
+    const { code, out, err } = cases(...args);
     expect([code, out]).toEqual([2, '']);
     expect(err).toMatch(message);
     expect(err).not.toMatch(/\bat .*\.ts:/u);
   });
+
+  it('ends as a process with the same codes: 0, 1 and 2', async () => {
+    const broken = file('broken.csv', 'case,algorithm\nT,R\n');
+    const seed = `${ROOT}/database/seed/case-sets/oll.csv`;
+    const [good, bad, wrong] = await Promise.all([
+      started('read', seed, '--set', 'OLL'),
+      started('read', broken, '--set', 'PLL', '--json'),
+      started('read', 'nowhere.csv', '--set', 'PLL'),
+    ]);
+    expect([good.code, bad.code, wrong.code]).toEqual([0, 1, 2]);
+    expect(good.out).toMatch(/57 of 57 cases covered/u);
+    expect(JSON.parse(bad.out).rows[0].finding).toBe('first-two-layers-broken');
+    expect([wrong.out, good.err, bad.err]).toEqual(['', '', '']);
+    expect(wrong.err).toMatch(/cannot be opened/u);
+  }, 60_000);
 });

@@ -164,13 +164,13 @@ describe('counting cases', () => {
       states: 62_208,
       weights: [{ weight: 62_208, cases: 1 }],
     });
-    for (const entry of ENTRIES)
-      for (const aspects of choices)
-        for (const aspect of ASPECTS)
-          expect(countCases(entry, [...aspects, aspect]).cases).toBeGreaterThanOrEqual(
-            countCases(entry, aspects).cases,
-          );
-  }, 30_000);
+    for (const entry of ENTRIES) {
+      const cases = choices.map((aspects) => countCases(entry, aspects).cases);
+      for (let choice = 0; choice < 16; choice++)
+        for (let more = 0; more < 16; more++)
+          if ((choice & more) === choice) expect(cases[more]).toBeGreaterThanOrEqual(cases[choice]!);
+    }
+  });
 
   it('gives weights in proportion to angles where all that is not seen is free', () => {
     for (const { entry, toldApart } of CASE_SETS) {
