@@ -36,7 +36,7 @@ export const deskText = {
     allSets: 'All sets',
     member: 'Member',
     changeOf: (name: string) => `${name}: `,
-    change: 'change, 28 days',
+    change: 'Change, 28 days',
     answers: 'Answers, 28 days',
     lastTrained: 'Last trained',
     minutes: 'Min a day',

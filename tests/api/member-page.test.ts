@@ -113,8 +113,8 @@ describe('a member’s page', () => {
       named: 'Gb',
     });
     await api.factory.sql(
-      'insert into mis_tap (club_id, member_id, review_id, case_key, at, received_at) values ($1, $2, $3, $4, now(), now())',
-      [member.clubId, member.memberId, slip, caseSet('pll').byName('Ga')?.key],
+      'insert into mis_tap (club_id, member_id, review_id, case_key, local_day, at, received_at) values ($1, $2, $3, $4, $5, now(), now())',
+      [member.clubId, member.memberId, slip, caseSet('pll').byName('Ga')?.key, today],
     );
     const { lately, lastTrained } = await read(captain, member.memberId);
     expect(lately).toHaveLength(30);

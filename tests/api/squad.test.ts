@@ -156,7 +156,7 @@ describe('the grid', () => {
 });
 
 describe('where solves are lost', () => {
-  it('adds up to one less the mean dealt recall, and names the costliest first', async () => {
+  it('weighs each case by its prior and the recall at the day’s end, the costliest first', async () => {
     const { captain, member, today } = await squad();
     for (const c of pll.cases) {
       for (const person of [captain, member]) {
@@ -259,8 +259,8 @@ describe('where solves are lost', () => {
       outcome: 'missed',
     });
     await api.factory.sql(
-      'insert into mis_tap (club_id, member_id, review_id, case_key, at, received_at) values ($1, $2, $3, $4, now(), now())',
-      [member.clubId, member.memberId, slip, pll.byName('T')?.key],
+      'insert into mis_tap (club_id, member_id, review_id, case_key, local_day, at, received_at) values ($1, $2, $3, $4, $5, now(), now())',
+      [member.clubId, member.memberId, slip, pll.byName('T')?.key, today],
     );
     await insertAnswer(api.factory, member, {
       caseName: 'T',

@@ -120,7 +120,7 @@ function Name({ row }: { row: SquadRow }) {
         {row.nickname}
       </AppLink>
       {row.role === 'captain' && (
-        <span className="block text-xs font-normal text-ink-2 sm:inline sm:ps-2">{text.roles.captain}</span>
+        <span className="block text-xs font-normal leading-none text-ink-2">{text.roles.captain}</span>
       )}
     </>
   );

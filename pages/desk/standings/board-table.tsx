@@ -1,4 +1,4 @@
-import { type Column, DataTable, EmptyState, FigureBar } from '#renderer/ui/index.ts';
+import { type Column, cx, DataTable, EmptyState, FigureBar } from '#renderer/ui/index.ts';
 import type { StandingsBoard } from '#shared/contracts/member.ts';
 import { deskText } from '#shared/text/desk.ts';
 import { numberText } from '#shared/text/numbers.ts';
@@ -8,6 +8,14 @@ const text = deskText.standings;
 const { percent } = numberText;
 
 type Row = StandingsBoard['rows'][number];
+
+function RestsOn({ row, className }: { row: Row; className?: string }) {
+  return (
+    <span className={cx('text-[0.9375rem] text-ink-2', className)}>
+      {text.restsOn(row.figure.answers, row.daysCounted)}
+    </span>
+  );
+}
 
 const member: Column<Row> = {
   key: 'member',
@@ -27,22 +35,24 @@ const figure: Column<Row> = {
   header: text.figure,
   className: 'w-[40%] min-w-36',
   cell: (row) => (
-    <FigureBar
-      figure={row.figure}
-      text={percent(row.figure.value, 1)}
-      label={sayFigure(row.figure)}
-      hollow={row.figure.few}
-      strong
-    />
+    <>
+      <FigureBar
+        figure={row.figure}
+        text={percent(row.figure.value, 1)}
+        label={sayFigure(row.figure)}
+        hollow={row.figure.few}
+        strong
+      />
+      <RestsOn row={row} className="block sm:hidden" />
+    </>
   ),
 };
 
 const rests: Column<Row> = {
   key: 'rests',
   header: text.rests,
-  cell: (row) => (
-    <span className="text-[0.9375rem] text-ink-2">{text.restsOn(row.figure.answers, row.daysCounted)}</span>
-  ),
+  className: 'hidden sm:table-cell',
+  cell: (row) => <RestsOn row={row} />,
 };
 
 const RANKED: readonly Column<Row>[] = [
