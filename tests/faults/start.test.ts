@@ -4,6 +4,7 @@ import { join } from 'node:path';
 import { afterAll, afterEach, beforeAll, expect, it, vi } from 'vitest';
 import { filesUnder } from '#server/toolbox/fingerprint.mjs';
 import { freePort } from '#server/toolbox/ports.mjs';
+import { processBirth, signal } from '#server/toolbox/processes.mjs';
 import {
   descendants,
   has,
@@ -30,11 +31,15 @@ beforeAll(async () => {
   port = await freePort();
 }, LONG);
 
-afterEach(({ task }) => {
+afterEach(async ({ task }) => {
   // The output tells what happened, where the assertion does not.
   if (task.result?.state === 'fail') for (const { output } of launched) console.log(output());
-  launched.length = 0;
-});
+  // A test that failed may have left its own running.
+  for (const { child, ended } of launched.splice(0)) {
+    if (child.exitCode === null && child.signalCode === null) child.kill('SIGINT');
+    await ended;
+  }
+}, LONG);
 
 afterAll(() => {
   for (const { pid } of stillAlive(seen)) signal(pid, 'SIGKILL');
