@@ -110,7 +110,7 @@ const problems = {
   tooLong: (line: number, field: string, most: number) =>
     `Line ${line}: the ${field} is longer than ${most} characters.`,
   control: 'Control characters cannot be taken.',
-  stale: 'The draft was changed meanwhile, or another edition of its set was published. Look at it again.',
+  stale: 'The draft was changed meanwhile, or another edition of its set was published.',
   published: (edition: number) => `The draft was published already, as edition ${edition}.`,
   discarded: 'The draft was discarded already.',
   cannotTake: (line: number) =>
@@ -238,12 +238,11 @@ const draft = {
   dropped: 'Dropped',
   fileSaid: (words: string) => `the file said ${words}`,
   fileSaidNothing: 'nothing stood there in the file',
-  wasBy: (says: string) => `${says}`,
   settled: (line: number, left: number) =>
     `Line ${line} is written. ${left === 0 ? 'Nothing is left to settle.' : `${count(left, 'line is', 'lines are')} left to settle.`}`,
   stale: {
     title: 'Someone else was quicker',
-    detail: 'The draft was read again. Your last step was not written.',
+    detail: 'It was read again. Your last step was not written.',
   },
   refused: 'That was not written',
   publishDialog: {
@@ -257,9 +256,19 @@ const draft = {
             `${count(effect.newCases, 'case', 'cases')} with ${count(effect.newAlgorithms, 'algorithm', 'algorithms')}.`,
           ]
         : [
-            `New beside edition ${newest}: ${count(effect.newAlgorithms, 'algorithm', 'algorithms')}, ${count(effect.newCases, 'case', 'cases')}.`,
-            `Already there: ${count(effect.alreadyThere, 'line', 'lines')}, put first in the order of the file.`,
-            `As they are: ${count(effect.keptCases, 'case', 'cases')} that the file does not name.`,
+            effect.newAlgorithms === 0
+              ? `Nothing that edition ${newest} does not have.`
+              : `New beside edition ${newest}: ${count(effect.newAlgorithms, 'algorithm', 'algorithms')}${effect.newCases === 0 ? '' : `, among them of ${count(effect.newCases, 'case', 'cases')} it lacks`}.`,
+            ...(effect.alreadyThere === 0
+              ? []
+              : [
+                  `Already there: ${count(effect.alreadyThere, 'algorithm', 'algorithms')}, put first in the order of the file.`,
+                ]),
+            ...(effect.keptCases === 0
+              ? []
+              : [
+                  `As ${effect.keptCases === 1 ? 'it is' : 'they are'}: ${count(effect.keptCases, 'case', 'cases')} the file has no line for.`,
+                ]),
           ],
     final: 'An edition cannot be changed. Clubs that follow the newest edition train with it from now on.',
     note: 'Note',

@@ -25,9 +25,9 @@ const COLUMNS: readonly LedgerColumn<SetRow>[] = [
     key: 'set',
     header: text.columns.set,
     rowHeader: true,
-    className: 'lg:w-28 align-top text-xl',
+    className: 'lg:w-28 align-top',
     stacked: '',
-    cell: ({ name }) => name,
+    cell: ({ name }) => <span className="text-xl leading-6">{name}</span>,
   },
   {
     key: 'entry',

@@ -38,7 +38,7 @@ function EditionHead({ view }: { view: EditionView }) {
   const newest = Math.max(...numbers);
   const algorithms = cases.reduce((sum, c) => sum + c.algorithms.length, 0);
   return (
-    <header className="pt-7">
+    <header className="pt-6">
       <h1 className="text-[1.75rem] font-bold tracking-[-0.01em] sm:text-[2rem]">
         {text.title(setName, number)}
       </h1>

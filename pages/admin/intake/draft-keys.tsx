@@ -19,7 +19,7 @@ export function DraftKeys({ view, steps }: { view: DraftView; steps: DraftSteps 
   return (
     <div className="screen-only flex flex-wrap items-center gap-3">
       {open && (
-        <Button kind="plain" className="pe-3" onClick={() => setAsking('discard')}>
+        <Button kind="plain" onClick={() => setAsking('discard')}>
           {text.discard}
         </Button>
       )}

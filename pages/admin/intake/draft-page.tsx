@@ -41,7 +41,7 @@ function Draft({ view }: { view: DraftView }) {
   const pageHref = (to: number) => queryHref(search, pathname, { page: to === 1 ? null : String(to) });
   return (
     <>
-      <header className="pt-7">
+      <header className="pt-6">
         <h1 className="break-words text-[1.75rem] font-bold tracking-[-0.01em] sm:text-[2rem]">
           {view.draft.fileName}
         </h1>
@@ -50,7 +50,7 @@ function Draft({ view }: { view: DraftView }) {
           <p className="text-ink-2">{text.unknownColumns(view.unknownColumns)}</p>
         )}
         <Notices view={view} steps={steps} />
-        <div className="flex flex-wrap items-end justify-between gap-x-8 gap-y-5 pb-5 pt-5">
+        <div className="flex flex-wrap items-end justify-between gap-x-4 gap-y-5 pb-5 pt-5">
           <DraftNumbers view={view} />
           <DraftKeys view={view} steps={steps} />
         </div>
@@ -61,6 +61,7 @@ function Draft({ view }: { view: DraftView }) {
       <div className="pb-2">
         <FilterLinks
           lines={view.lines}
+          open={view.draft.state === 'open'}
           show={show}
           hrefOf={(to) => queryHref(search, pathname, { show: to === 'all' ? null : to, page: null })}
         />

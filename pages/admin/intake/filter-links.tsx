@@ -8,16 +8,20 @@ const text = intakeText.draft;
 /** Which lines are shown, each choice with how many there are. */
 export function FilterLinks({
   lines,
+  open,
   show,
   hrefOf,
 }: {
   lines: readonly DraftLine[];
+  /** Nothing of a closed draft is to settle. */
+  open: boolean;
   show: Show;
   hrefOf: (show: Show) => string;
 }) {
+  const choices = SHOWS.filter((one) => open || one === show || (one !== 'settle' && one !== 'cannot'));
   return (
     <nav aria-label={text.filterLabel} className="screen-only flex flex-wrap gap-x-6">
-      {SHOWS.map((one) => (
+      {choices.map((one) => (
         <AppLink
           key={one}
           href={hrefOf(one)}

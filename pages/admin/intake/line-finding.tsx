@@ -32,33 +32,34 @@ export function LineFinding({
   onStep: (step: Step) => void;
   onEdit: () => void;
 }) {
-  const { title, details } = words(line);
+  const { title, detail, before } = words(line);
   const actions = open ? actionsOf(line, onStep, onEdit) : [];
   return (
-    <div id={`finding-${line.line}`} tabIndex={-1} aria-busy={busy} className="outline-none">
+    <div
+      id={`finding-${line.line}`}
+      tabIndex={-1}
+      aria-busy={busy}
+      className={`outline-none ${TONES[line.standing] === 'agrees' ? 'max-lg:-ms-3.5' : ''}`}
+    >
       <Finding tone={TONES[line.standing]} title={title}>
         <p className="flex flex-wrap items-center">
-          {details.map((detail) => (
-            <span key={detail} className="min-w-0 break-words py-0.5 pe-2">
-              {detail}
-              {(actions.length > 0 || detail !== details.at(-1)) && <Dot />}
-            </span>
-          ))}
+          {detail && <span className="min-w-0 break-words py-0.5">{detail}</span>}
           {actions.map(({ label, run }, at) => (
             <span key={label} className="screen-only inline-flex items-center">
-              {at > 0 && <Dot />}
+              {(at > 0 || detail) && <Dot />}
               <button
                 type="button"
                 aria-label={text.forLine(label, line.line)}
                 aria-disabled={busy || undefined}
                 onClick={busy ? undefined : run}
-                className="inline-flex min-h-12 items-center pe-2 underline decoration-line underline-offset-4 hover:text-ink hover:decoration-ink lg:min-h-7"
+                className="inline-flex min-h-12 items-center underline decoration-line underline-offset-4 hover:text-ink hover:decoration-ink lg:min-h-7"
               >
                 {label}
               </button>
             </span>
           ))}
         </p>
+        {before && <p className="break-words">{before}</p>}
       </Finding>
     </div>
   );
@@ -67,24 +68,28 @@ export function LineFinding({
 /** Parts stand on one line with dots between them, and break between the parts. */
 function Dot() {
   return (
-    <span aria-hidden="true" className="pe-2">
-      {' '}
+    <span aria-hidden="true" className="px-1.5">
       ·
     </span>
   );
 }
 
-function words(line: DraftLine): { title: string; details: string[] } {
+/** The heading, what follows from it, and what stood in the file where it was typed over. */
+function words(line: DraftLine): { title: string; detail: string; before?: string } {
   const { says, hint, standing, decision, original } = line;
-  if (standing === 'out') return { title: text.dropped, details: [says, hint].filter(Boolean) };
+  if (standing === 'out') return { title: text.dropped, detail: [says, hint].filter(Boolean).join(', ') };
   if (decision === 'take' && line.solves !== null) {
-    return { title: text.taken(line.solves), details: [text.takenHint(line.caseName)] };
+    return { title: text.taken(line.solves), detail: text.takenHint(line.caseName) };
   }
-  if (!original) return { title: says, details: [hint].filter(Boolean) };
-  const before = [original.caseName, intakeText.printed(original.algorithm)].filter(Boolean).join(', ');
+  if (!original) return { title: says, detail: hint };
+  const changed = [
+    ...(original.caseName === line.caseName ? [] : [original.caseName]),
+    ...(original.algorithm === line.algorithm ? [] : [intakeText.printed(original.algorithm)]),
+  ].filter(Boolean);
   return {
     title: says,
-    details: [hint, before ? text.fileSaid(before) : text.fileSaidNothing].filter(Boolean),
+    detail: hint,
+    before: changed.length > 0 ? text.fileSaid(changed.join(', ')) : text.fileSaidNothing,
   };
 }
 

@@ -9,6 +9,7 @@ import { EditKeys, LineFinding } from './line-finding.tsx';
 import type { DraftSteps, Step } from './use-draft-steps.ts';
 
 const text = intakeText.draft;
+const LINES = 'lines';
 
 /** The lines of a draft, each with its picture and its finding; one at a time can be edited in place. */
 export function LineTable({
@@ -121,7 +122,7 @@ export function LineTable({
     {
       key: 'finding',
       header: text.columns.finding,
-      className: 'lg:w-[22rem]',
+      className: 'lg:w-72 xl:w-[22rem]',
       stacked: 'col-start-2 row-start-4 mt-1 lg:mt-0',
       cell: (line) => {
         const editing = editOf(line);
@@ -146,21 +147,24 @@ export function LineTable({
     },
   ];
   return (
-    <LedgerTable
-      caption={text.caption}
-      columns={columns}
-      rows={lines}
-      rowKey={({ line }) => String(line)}
-      rowClass={({ standing }) => (standing === 'out' ? 'text-ink-2' : '')}
-      stackedRow="grid-cols-[3.5rem_minmax(0,1fr)]"
-      empty={empty}
-    />
+    <div id={LINES} tabIndex={-1} className="outline-none">
+      <LedgerTable
+        caption={text.caption}
+        columns={columns}
+        rows={lines}
+        rowKey={({ line }) => String(line)}
+        rowClass={({ standing }) => (standing === 'out' ? 'text-ink-2' : '')}
+        stackedRow="grid-cols-[3.5rem_minmax(0,1fr)]"
+        empty={empty}
+      />
+    </div>
   );
 }
 
-/** After a step the key that was pressed is gone: the focus goes to what the line says now, if it is shown. */
+/** After a step the key that was pressed is gone: the focus goes to what the line says now, or to the lines left. */
 function focusFinding(line: number): void {
   requestAnimationFrame(() => {
-    document.getElementById(`finding-${line}`)?.focus({ preventScroll: true });
+    const next = document.getElementById(`finding-${line}`) ?? document.getElementById(LINES);
+    next?.focus({ preventScroll: true });
   });
 }
