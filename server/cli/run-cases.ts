@@ -2,7 +2,6 @@
 import { readFileSync } from 'node:fs';
 import { resolve } from 'node:path';
 import { parseArgs } from 'node:util';
-import { CaseFileError, readCaseFile } from '#server/services/intake/read-case-file.ts';
 import {
   ASPECTS,
   CASE_SETS,
@@ -17,6 +16,7 @@ import {
 } from '#shared/lastlayer/index.ts';
 import { findingsText } from '#shared/text/findings.ts';
 import { expandAlgorithm } from '../services/intake/expand-algorithm.ts';
+import { CaseFileError, readCaseFile } from '../services/intake/read-case-file.ts';
 
 const { command, labels, says } = findingsText;
 
