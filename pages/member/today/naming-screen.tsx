@@ -125,16 +125,15 @@ function useSlow(afterMs: number): boolean {
   return slow;
 }
 
-/** All names of a set, four in a row, then "solved", and "lost it" over what is left of the last row. */
+/** All names of a set, four in a row, then "solved" and "lost it". */
 function wholeGrid(keys: readonly AnswerKey[]): GridKey[] {
-  const rest = 4 - (keys.length % 4);
   return [
     ...keys.map((key) =>
       key.key === SOLVED
         ? { value: SOLVED, label: todayText.solved, text: todayText.solved, plain: true }
         : { value: key.key, label: key.label },
     ),
-    { value: LOST, label: todayText.lost, text: todayText.lost, plain: true, span: rest >= 2 ? 2 : 1 },
+    lostKey(keys.length, 4),
   ];
 }
 
@@ -143,18 +142,30 @@ function clusterGrid(keys: readonly AnswerKey[]): GridKey[] {
   return [
     ...keys.map((key) => ({
       value: key.key,
-      text: `${key.label}, ${firstMoves(key.algorithm)}`,
+      text: `${key.label} ${firstMoves(key.algorithm)}`,
       label: (
         <span className="py-1">
-          <span className="block">{key.label}</span>
+          <span className="block">{key.label}</span>{' '}
           <span translate="no" className="block text-[0.8125rem] font-normal">
             {firstMoves(key.algorithm)}
           </span>
         </span>
       ),
     })),
-    { value: LOST, label: todayText.lost, text: todayText.lost, plain: true },
+    lostKey(keys.length, 3),
   ];
+}
+
+/** "lost it", over two places where the last row has them. */
+function lostKey(before: number, columns: number): GridKey {
+  const rest = columns - (before % columns);
+  return {
+    value: LOST,
+    label: todayText.lost,
+    text: todayText.lost,
+    plain: true,
+    span: rest >= 2 ? 2 : 1,
+  };
 }
 
 function labelOf(keys: readonly AnswerKey[], value: string): string {
