@@ -5,16 +5,20 @@ const AUFS = { 1: 'U', 2: 'U2', 3: 'U′' } as const;
 
 /** The captain's desk. */
 export const deskText = {
-  few: 'Hollow: fewer than 20 answers in 28 days.',
   none: '–',
   never: 'never',
   today: 'today',
   yesterday: 'yesterday',
   daysAgo: (days: number) => `${days} days ago`,
-  trained: 'Trained',
   loading: 'Reading the figures',
   cannotLoad: 'The figures could not be loaded',
   retry: 'Try again',
+
+  elsewhere: {
+    switchTo: (place: string) => `Switch to ${place}`,
+    administration: 'administration',
+    failed: 'That did not work. Try again.',
+  },
 
   figureLabel: (figure: {
     value: string;

@@ -6,16 +6,13 @@ const text = deskText.programme;
 
 export type ProgrammeRow = ProgrammeView['rows'][number];
 
-/** The sets of the programme, with what can be done to each. */
-export function ProgrammeTable({
-  view,
-  onEdit,
-  onWithdraw,
-}: {
-  view: ProgrammeView;
+interface RowActions {
   onEdit(row: ProgrammeRow): void;
   onWithdraw(row: ProgrammeRow): void;
-}) {
+}
+
+/** The sets of the programme, with what can be done to each. */
+export function ProgrammeTable({ view, onEdit, onWithdraw }: { view: ProgrammeView } & RowActions) {
   if (view.rows.length === 0) {
     return (
       <EmptyState title={text.empty}>
@@ -24,7 +21,20 @@ export function ProgrammeTable({
     );
   }
   const columns: readonly Column<ProgrammeRow>[] = [
-    { key: 'set', header: text.columns.set, rowHeader: true, cell: (row) => row.name },
+    {
+      key: 'set',
+      header: text.columns.set,
+      rowHeader: true,
+      cell: (row) => (
+        <>
+          {row.name}
+          {/* On a phone the last column would lie out of sight. */}
+          <span className="mt-2 flex flex-col items-start gap-2 sm:hidden">
+            <Actions row={row} onEdit={onEdit} onWithdraw={onWithdraw} />
+          </span>
+        </>
+      ),
+    },
     {
       key: 'edition',
       header: text.columns.edition,
@@ -49,19 +59,10 @@ export function ProgrammeTable({
       key: 'actions',
       header: text.columns.actions,
       nowrap: true,
+      className: 'hidden sm:table-cell',
       cell: (row) => (
         <span className="inline-flex gap-2">
-          <Button kind="outlined" size="small" aria-label={text.editOf(row.name)} onClick={() => onEdit(row)}>
-            {text.edit}
-          </Button>
-          <Button
-            kind="outlined"
-            size="small"
-            aria-label={text.withdrawOf(row.name)}
-            onClick={() => onWithdraw(row)}
-          >
-            {text.withdraw}
-          </Button>
+          <Actions row={row} onEdit={onEdit} onWithdraw={onWithdraw} />
         </span>
       ),
     },
@@ -74,6 +75,31 @@ export function ProgrammeTable({
       rows={view.rows}
       rowKey={(row) => row.setKey}
     />
+  );
+}
+
+function Actions({ row, onEdit, onWithdraw }: { row: ProgrammeRow } & RowActions) {
+  return (
+    <>
+      <Button
+        kind="outlined"
+        size="small"
+        className="max-sm:min-h-12"
+        aria-label={text.editOf(row.name)}
+        onClick={() => onEdit(row)}
+      >
+        {text.edit}
+      </Button>
+      <Button
+        kind="outlined"
+        size="small"
+        className="max-sm:min-h-12"
+        aria-label={text.withdrawOf(row.name)}
+        onClick={() => onWithdraw(row)}
+      >
+        {text.withdraw}
+      </Button>
+    </>
   );
 }
 

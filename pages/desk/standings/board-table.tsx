@@ -11,7 +11,7 @@ type Row = StandingsBoard['rows'][number];
 
 function RestsOn({ row, className }: { row: Row; className?: string }) {
   return (
-    <span className={cx('text-[0.9375rem] text-ink-2', className)}>
+    <span className={cx('whitespace-nowrap text-[0.8125rem] text-ink-2 sm:text-[0.9375rem]', className)}>
       {text.restsOn(row.figure.answers, row.daysCounted)}
     </span>
   );
@@ -33,7 +33,7 @@ const member: Column<Row> = {
 const figure: Column<Row> = {
   key: 'figure',
   header: text.figure,
-  className: 'w-[40%] min-w-36',
+  className: 'w-[40%] min-w-38',
   cell: (row) => (
     <>
       <FigureBar
