@@ -2,6 +2,8 @@ import type { FindingName } from '../contracts/intake.ts';
 import { numberText } from './numbers.ts';
 
 const { count } = numberText;
+/** Thousands apart, as in print. */
+const grouped = (n: number): string => n.toLocaleString('en-GB');
 const listed = (words: readonly string[]): string =>
   words.length < 2 ? words.join('') : `${words.slice(0, -1).join(', ')} and ${words.at(-1)}`;
 /** Primes as they are printed. */
@@ -172,20 +174,20 @@ const draft = {
     `Not read: ${names.length === 1 ? 'the column' : 'the columns'} ${listed(names)}.`,
   numbers: {
     lines: (n: number) => (n === 1 ? 'line' : 'lines'),
-    covered: (covered: number, of: number) => `${covered} of ${of}`,
+    covered: (covered: number, of: number) => `${grouped(covered)} of ${grouped(of)}`,
     coveredLabel: 'cases covered',
     stay: (names: readonly string[], edition: number) =>
       names.length === 0
         ? ''
         : names.length <= 4
           ? `; ${listed(names)} ${names.length === 1 ? 'stays' : 'stay'} as in edition ${edition}`
-          : `; ${names.length} stay as in edition ${edition}`,
+          : `; ${grouped(names.length)} stay as in edition ${edition}`,
     without: (names: readonly string[]) =>
       names.length === 0
         ? ''
         : names.length <= 4
           ? `; ${listed(names)} ${names.length === 1 ? 'has' : 'have'} no algorithm yet`
-          : `; ${names.length} have no algorithm yet`,
+          : `; ${grouped(names.length)} have no algorithm yet`,
     cannot: 'cannot go in',
     decide: 'to decide',
     dropped: 'dropped',
@@ -286,4 +288,4 @@ const draft = {
   openEdition: 'Open the edition',
 } as const;
 
-export const intakeText = { says, hint, printed, problems, list, draft } as const;
+export const intakeText = { says, hint, printed, grouped, problems, list, draft } as const;

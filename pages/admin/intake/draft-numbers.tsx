@@ -11,7 +11,7 @@ export function DraftNumbers({ view }: { view: DraftView }) {
   const rest = newestEdition === null ? text.without(missing) : text.stay(missing, newestEdition);
   return (
     <BigNumbers>
-      <BigNumber tone="quiet" value={String(draft.lines)} label={text.lines(draft.lines)} />
+      <BigNumber tone="quiet" value={intakeText.grouped(draft.lines)} label={text.lines(draft.lines)} />
       <BigNumber
         tone="quiet"
         value={text.covered(covered, of)}
@@ -19,11 +19,19 @@ export function DraftNumbers({ view }: { view: DraftView }) {
       />
       {draft.state === 'open' && (
         <>
-          <BigNumber tone={cannot > 0 ? 'rose' : 'quiet'} value={String(cannot)} label={text.cannot} />
-          <BigNumber tone={toDecide > 0 ? 'ochre' : 'quiet'} value={String(toDecide)} label={text.decide} />
+          <BigNumber
+            tone={cannot > 0 ? 'rose' : 'quiet'}
+            value={intakeText.grouped(cannot)}
+            label={text.cannot}
+          />
+          <BigNumber
+            tone={toDecide > 0 ? 'ochre' : 'quiet'}
+            value={intakeText.grouped(toDecide)}
+            label={text.decide}
+          />
         </>
       )}
-      {dropped > 0 && <BigNumber tone="quiet" value={String(dropped)} label={text.dropped} />}
+      {dropped > 0 && <BigNumber tone="quiet" value={intakeText.grouped(dropped)} label={text.dropped} />}
     </BigNumbers>
   );
 }

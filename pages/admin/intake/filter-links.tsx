@@ -34,7 +34,7 @@ export function FilterLinks({
           <span className={one === show ? 'border-b-2 border-ink' : 'underline underline-offset-4'}>
             {text.filters[one]}
           </span>
-          {lines.filter((line) => isShown(line, one)).length}
+          {intakeText.grouped(lines.filter((line) => isShown(line, one)).length)}
         </AppLink>
       ))}
     </nav>

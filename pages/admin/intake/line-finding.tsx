@@ -43,10 +43,14 @@ export function LineFinding({
     >
       <Finding tone={TONES[line.standing]} title={title}>
         <p className="flex flex-wrap items-center">
-          {detail && <span className="min-w-0 break-words py-0.5">{detail}</span>}
+          {detail && (
+            <span className="min-w-0 break-words py-0.5">
+              {detail}
+              {actions.length > 0 && <Dot />}
+            </span>
+          )}
           {actions.map(({ label, run }, at) => (
             <span key={label} className="screen-only inline-flex items-center">
-              {(at > 0 || detail) && <Dot />}
               <button
                 type="button"
                 aria-label={text.forLine(label, line.line)}
@@ -56,6 +60,7 @@ export function LineFinding({
               >
                 {label}
               </button>
+              {at < actions.length - 1 && <Dot />}
             </span>
           ))}
         </p>
