@@ -73,7 +73,7 @@ export function AlgorithmInput({ line, edit, onChange, onCancel }: EditProps) {
       value={edit.algorithm}
       onChange={(event) => onChange({ algorithm: event.target.value })}
       onKeyDown={onEscape(onCancel)}
-      className={inputClass(undefined)}
+      className={`${inputClass(undefined)} max-lg:mt-2`}
     />
   );
 }

@@ -133,7 +133,7 @@ export function EditKeys({
   onCancel: () => void;
 }) {
   return (
-    <div className="flex flex-wrap items-center gap-3">
+    <div className="flex flex-wrap items-center gap-3 max-lg:mt-1">
       <Button type="submit" form={formId} size="small" busy={busy}>
         {text.save}
       </Button>
