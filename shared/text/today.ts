@@ -127,7 +127,6 @@ export const todayText = {
 
   summary: {
     title: 'Done for today',
-    counts: 'Today in figures',
     held: 'held',
     late: 'late',
     missed: 'missed',

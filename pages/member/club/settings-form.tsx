@@ -10,6 +10,13 @@ const text = memberText.club;
 type Crosses = MemberSettings['crossColours'];
 const CROSSES = Object.entries(text.crosses) as [Crosses, string][];
 
+/** Brings a field and the words over it into view, and the focus to it. */
+function showField(id: string): void {
+  const field = document.getElementById(id);
+  field?.scrollIntoView({ block: 'center' });
+  field?.focus({ preventScroll: true });
+}
+
 /** What a member sets for themselves. One form, one save. */
 export function SettingsForm({ settings }: { settings: MemberSettings }) {
   const store = useStore();
@@ -32,7 +39,7 @@ export function SettingsForm({ settings }: { settings: MemberSettings }) {
     const valid = count >= 1 && count <= 120;
     setWrong(!valid);
     if (valid) save.mutate({ ...form, minutesPerDay: count });
-    else document.getElementById('minutes')?.focus();
+    else showField('minutes');
   };
   return (
     <form noValidate onSubmit={submit} className="flex max-w-[34rem] flex-col gap-6">

@@ -16,7 +16,7 @@ import { MoveBar } from './move-bar.tsx';
 const text = todayText.summary;
 
 /** The end of a day's queue: what it moved, what was lost, what tomorrow brings. Or why there is none. */
-export function OverScreen({ view, note }: { view: TodayView; note: ReactNode }) {
+export function OverScreen({ view, saved, note }: { view: TodayView; saved: boolean; note: ReactNode }) {
   const words = todayText.empty[view.empty ?? 'done'];
   return (
     <div className="flex flex-1 flex-col gap-8 py-6">
@@ -28,6 +28,7 @@ export function OverScreen({ view, note }: { view: TodayView; note: ReactNode })
         </EmptyState>
       )}
       {note}
+      {view.summary && saved && <p className="text-[0.9375rem] text-ink-2">{todayText.answers.saved}</p>}
       <p className="flex gap-6">
         <TextLink href="/cases">{todayText.toCases}</TextLink>
         <TextLink href="/form">{todayText.toForm}</TextLink>

@@ -66,7 +66,13 @@ function TodaySitting({ view: latest }: { view: TodayView }) {
       }
     >
       <AnswersState outbox={outbox} state={answers} />
-      <PhaseScreen sitting={sitting} actions={actions} progress={progress} note={note} />
+      <PhaseScreen
+        sitting={sitting}
+        actions={actions}
+        progress={progress}
+        saved={answers.unsent === 0}
+        note={note}
+      />
       {phase.kind === 'run-out' && <RunOutScreen outbox={outbox} />}
     </Screen>
   );
@@ -76,10 +82,11 @@ interface PhaseProps {
   sitting: Sitting;
   actions: SittingActions;
   progress: Progress;
+  saved: boolean;
   note: ReactNode;
 }
 
-function PhaseScreen({ sitting, actions, progress, note }: PhaseProps) {
+function PhaseScreen({ sitting, actions, progress, saved, note }: PhaseProps) {
   const { view, phase, held } = sitting;
   switch (phase.kind) {
     case 'ready':
@@ -135,7 +142,7 @@ function PhaseScreen({ sitting, actions, progress, note }: PhaseProps) {
         />
       );
     case 'over':
-      return <OverScreen view={view} note={note} />;
+      return <OverScreen view={view} saved={saved} note={note} />;
     case 'run-out':
       return null;
   }

@@ -47,7 +47,11 @@ export function useSitting(view: TodayView, outbox: Outbox | null): [Sitting, Si
         noteServerTime(next.serverNow);
         cache.current.put(endpoints.today, {}, next);
       },
-      notTaken: (ids) => dispatch({ kind: 'no-verdict', ids }),
+      notTaken(ids) {
+        dispatch({ kind: 'no-verdict', ids });
+        // Refused for good: the queue has moved on without this device.
+        if (outbox.state.refused) void cache.current.refresh(endpoints.today);
+      },
     });
     dispatch({ kind: 'resume', given: outbox.given, unsent: unsentOf(outbox) });
     void outbox.flush();
