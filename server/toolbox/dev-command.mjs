@@ -37,10 +37,16 @@ export function develop() {
         queue = queue.then(async () => {
           if (stopped) return;
           const began = performance.now();
-          await server?.stop();
+          const old = server;
           server = undefined;
+          await old?.stop();
           try {
-            server = await startServer(how);
+            const started = await startServer(how);
+            server = started;
+            started.ended.then((code) => {
+              if (server === started && !stopped)
+                steps.line(`  The server ended by itself (exit code ${code}). Waiting for a change.`);
+            });
             if (reason) steps.line(`  ${reason} changed: up again in ${seconds(began)} s`);
           } catch (error) {
             if (!stopped) steps.line(`  ${explain(error, dataDir)} Waiting for a change.`);

@@ -2,6 +2,7 @@ import { type ChildProcess, spawn } from 'node:child_process';
 import {
   chmodSync,
   existsSync,
+  mkdirSync,
   mkdtempSync,
   readdirSync,
   readFileSync,
@@ -290,4 +291,22 @@ it('says in one sentence that PostgreSQL of the right version is missing, and to
   );
   writeFileSync(versionFile, version);
   expect(await readNote((await open()).ownerUrl)).toEqual([{ said: 'kept' }]);
+});
+
+it('says in one sentence that the disk is full, and begins again when it is not', async () => {
+  // Programs that fail as PostgreSQL 15's did on a disk of 20 MB.
+  const bin = join(folder, 'bin');
+  mkdirSync(bin);
+  const program = (name: string, body: string) =>
+    writeFileSync(join(bin, name), `#!/bin/sh\n${body}\n`, { mode: 0o755 });
+  program('postgres', "echo 'postgres (PostgreSQL) 15.18'");
+  program('psql', 'exit 1');
+  program(
+    'initdb',
+    `mkdir -p "$2/base"; echo 'initdb: error: could not write file "$2/base/1": No space left on device' >&2; exit 1`,
+  );
+  const dataDir = join(folder, 'data');
+  const full = openCluster({ dataDir, children: new Children(), places: { versioned: [], path: bin } });
+  await expect(full).rejects.toThrow(/^The disk that holds .*data\/cluster is full\. Free some space/);
+  expect(await open()).toMatchObject({ made: true });
 });
