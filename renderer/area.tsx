@@ -4,7 +4,7 @@ import {
   QueryClient,
   QueryClientProvider,
 } from '@tanstack/react-query';
-import { type ComponentType, type ReactNode, useState } from 'react';
+import { type ComponentType, type ReactNode, useCallback, useState } from 'react';
 import { BrowserRouter, matchPath, Route, Routes, StaticRouter } from 'react-router';
 import type { Call } from '#shared/contracts/endpoint.ts';
 import type { SessionView } from '#shared/contracts/session.ts';
@@ -23,10 +23,15 @@ export interface AreaRoute {
   ): readonly Call<unknown, unknown>[];
 }
 
+export interface FrameProps {
+  readonly titleOf: (pathname: string) => string;
+  readonly children: ReactNode;
+}
+
 export interface Area {
   readonly routes: readonly AreaRoute[];
   /** Bars and navigation around every screen of the area. */
-  readonly Frame: ComponentType<{ children: ReactNode }>;
+  readonly Frame: ComponentType<FrameProps>;
 }
 
 export interface AreaData {
@@ -64,8 +69,9 @@ export function AreaPage({ area }: { area: Area }) {
       }),
   );
   const { Frame } = area;
+  const titleOf = useCallback((pathname: string) => routeOf(area, pathname)?.route.title ?? '', [area]);
   const screens = (
-    <Frame>
+    <Frame titleOf={titleOf}>
       <Routes>
         {area.routes.map(({ path, Page }) => (
           <Route key={path} path={path} element={<Page />} />

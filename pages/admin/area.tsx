@@ -1,5 +1,4 @@
-import type { ReactNode } from 'react';
-import { type Area, type AreaRoute, routeOf } from '#renderer/area.tsx';
+import type { Area, AreaRoute } from '#renderer/area.tsx';
 import { call } from '#shared/contracts/endpoint.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { adminText } from '#shared/text/admin.ts';
@@ -39,13 +38,5 @@ const routes: readonly AreaRoute[] = [
   },
 ];
 
-function Frame({ children }: { children: ReactNode }) {
-  return <AdminFrame titleOf={titleOf}>{children}</AdminFrame>;
-}
-
 /** The administrator's screens. */
-export const adminArea: Area = { Frame, routes };
-
-function titleOf(pathname: string): string {
-  return routeOf(adminArea, pathname)?.route.title ?? '';
-}
+export const adminArea: Area = { Frame: AdminFrame, routes };

@@ -1,5 +1,4 @@
-import type { ReactNode } from 'react';
-import { type Area, type AreaRoute, routeOf } from '#renderer/area.tsx';
+import type { Area, AreaRoute } from '#renderer/area.tsx';
 import { call } from '#shared/contracts/endpoint.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { deskText } from '#shared/text/desk.ts';
@@ -36,13 +35,5 @@ const routes: readonly AreaRoute[] = [
   },
 ];
 
-function Frame({ children }: { children: ReactNode }) {
-  return <DeskFrame titleOf={titleOf}>{children}</DeskFrame>;
-}
-
 /** The captain's screens. */
-export const deskArea: Area = { Frame, routes };
-
-function titleOf(pathname: string): string {
-  return routeOf(deskArea, pathname)?.route.title ?? '';
-}
+export const deskArea: Area = { Frame: DeskFrame, routes };

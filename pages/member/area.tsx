@@ -1,5 +1,4 @@
-import type { ReactNode } from 'react';
-import { type Area, type AreaRoute, routeOf } from '#renderer/area.tsx';
+import type { Area, AreaRoute } from '#renderer/area.tsx';
 import { call } from '#shared/contracts/endpoint.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { memberText } from '#shared/text/member.ts';
@@ -44,13 +43,5 @@ const routes: readonly AreaRoute[] = [
   },
 ];
 
-function Frame({ children }: { children: ReactNode }) {
-  return <MemberFrame titleOf={titleOf}>{children}</MemberFrame>;
-}
-
 /** The member's screens: phone first. */
-export const memberArea: Area = { Frame, routes };
-
-function titleOf(pathname: string): string {
-  return routeOf(memberArea, pathname)?.route.title ?? '';
-}
+export const memberArea: Area = { Frame: MemberFrame, routes };

@@ -1,11 +1,13 @@
-import { type ReactNode, useEffect, useRef } from 'react';
 import { useLocation } from 'react-router';
+import type { FrameProps } from '#renderer/area.tsx';
+import { AreaLink } from '#renderer/area-link.tsx';
+import { markCurrent } from '#renderer/places.ts';
 import { useSession } from '#renderer/session.tsx';
 import { SignOutButton } from '#renderer/sign-out-button.tsx';
-import { BottomNav, LinkProvider, TopBar } from '#renderer/ui/index.ts';
+import { type AppLinkProps, BottomNav, LinkProvider, TopBar } from '#renderer/ui/index.ts';
+import { useMoved } from '#renderer/use-moved.ts';
 import { memberText } from '#shared/text/member.ts';
 import { shellText } from '#shared/text/shell.ts';
-import { RouterLink } from './router-link.tsx';
 
 const PLACES = [
   { href: '/today', label: shellText.places.today },
@@ -14,35 +16,21 @@ const PLACES = [
   { href: '/club', label: shellText.places.club },
 ];
 
+const INSIDE = /^\/(today|cases|form|club)(\/|\?|$)/;
 const DESK = { href: '/desk/squad', label: memberText.club.toDesk };
 
+function MemberLink(props: AppLinkProps) {
+  return <AreaLink inside={INSIDE} {...props} />;
+}
+
 /** The member's places under the thumb on a phone, in a bar on top where there is room. */
-export function MemberFrame({
-  titleOf,
-  children,
-}: {
-  titleOf: (pathname: string) => string;
-  children: ReactNode;
-}) {
+export function MemberFrame({ titleOf, children }: FrameProps) {
   const { pathname } = useLocation();
   const session = useSession();
-  const content = useRef<HTMLElement>(null);
-  const shown = useRef(pathname);
-  useEffect(() => {
-    if (shown.current === pathname) return;
-    // As after a document load: the new title, from the top, and the focus at the beginning of what is new.
-    shown.current = pathname;
-    document.title = `${titleOf(pathname)} · ${shellText.product}`;
-    window.scrollTo(0, 0);
-    if (!content.current?.contains(document.activeElement)) content.current?.focus({ preventScroll: true });
-  }, [pathname, titleOf]);
-  const items = PLACES.map(({ href, label }) => ({
-    href,
-    label,
-    current: pathname === href || pathname.startsWith(`${href}/`),
-  }));
+  const content = useMoved(titleOf);
+  const items = markCurrent(PLACES, pathname);
   return (
-    <LinkProvider link={RouterLink}>
+    <LinkProvider link={MemberLink}>
       <div className="flex min-h-dvh flex-col">
         <div className="hidden lg:block">
           <TopBar

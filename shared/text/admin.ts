@@ -37,13 +37,7 @@ function oneIn({ weight, total }: { weight: number; total: number }): string {
 
 /** Words of the administrator's places other than Intake. */
 export const adminText = {
-  loading: 'Reading',
-  couldNotLoad: 'This could not be loaded.',
-  tryAgain: 'Try again',
   oneIn,
-  workIn: 'Work in',
-  switchTo: (club: string) => club,
-  switchFailed: 'The club could not be opened.',
   sortBy: 'sort by',
   pages: {
     label: 'Pages',

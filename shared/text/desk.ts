@@ -10,15 +10,6 @@ export const deskText = {
   today: 'today',
   yesterday: 'yesterday',
   daysAgo: (days: number) => `${days} days ago`,
-  loading: 'Reading the figures',
-  cannotLoad: 'The figures could not be loaded',
-  retry: 'Try again',
-
-  elsewhere: {
-    switchTo: (place: string) => `Switch to ${place}`,
-    administration: 'administration',
-    failed: 'That did not work. Try again.',
-  },
 
   figureLabel: (figure: {
     value: string;

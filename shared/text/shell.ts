@@ -6,6 +6,9 @@ export const shellText = {
   signIn: 'Sign in',
   signOut: 'Sign out',
   administrator: 'administrator',
+  administration: 'the administration',
+  switchTo: (place: string) => `Switch to ${place}`,
+  switchFailed: 'The switch did not work. Try again.',
   places: {
     today: 'Today',
     cases: 'My cases',

@@ -1,9 +1,9 @@
 import { useCall } from '#renderer/api.ts';
+import { Awaited } from '#renderer/awaited.tsx';
 import { LinkButton, PageTitle, TextLink } from '#renderer/ui/index.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import type { CatalogueView } from '#shared/contracts/intake.ts';
 import { adminText } from '#shared/text/admin.ts';
-import { Awaited } from '../awaited.tsx';
 import { Instant } from '../instant.tsx';
 import { type LedgerColumn, LedgerTable } from '../ledger-table.tsx';
 

@@ -1,12 +1,12 @@
 import { useDeferredValue, useState } from 'react';
 import { useLocation, useNavigate, useParams, useSearchParams } from 'react-router';
 import { useCall } from '#renderer/api.ts';
+import { Awaited } from '#renderer/awaited.tsx';
 import { downloadCsv } from '#renderer/csv.ts';
 import { AppLink, BigNumber, BigNumbers, Button, cx, TextField } from '#renderer/ui/index.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import type { EditionView } from '#shared/contracts/intake.ts';
 import { adminText } from '#shared/text/admin.ts';
-import { Awaited } from '../awaited.tsx';
 import { Instant } from '../instant.tsx';
 import { PageLinks, pageOf } from '../page-links.tsx';
 import { queryHref } from '../query-href.ts';

@@ -1,10 +1,10 @@
 import { useLocation, useParams, useSearchParams } from 'react-router';
 import { useCall } from '#renderer/api.ts';
+import { Awaited } from '#renderer/awaited.tsx';
 import { Notice, TextLink } from '#renderer/ui/index.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import type { DraftView } from '#shared/contracts/intake.ts';
 import { intakeText } from '#shared/text/intake.ts';
-import { Awaited } from '../awaited.tsx';
 import { PageLinks, pageOf } from '../page-links.tsx';
 import { queryHref } from '../query-href.ts';
 import { DraftKeys } from './draft-keys.tsx';

@@ -1,8 +1,8 @@
 import { useCall } from '#renderer/api.ts';
+import { Awaited } from '#renderer/awaited.tsx';
 import { EmptyState, PageTitle, Section } from '#renderer/ui/index.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { intakeText } from '#shared/text/intake.ts';
-import { Awaited } from '../awaited.tsx';
 import { DraftTable } from './draft-table.tsx';
 import { UploadForm } from './upload-form.tsx';
 

@@ -1,10 +1,10 @@
 import { useParams } from 'react-router';
 import { useCall } from '#renderer/api.ts';
+import { Awaited } from '#renderer/awaited.tsx';
 import { EmptyState, PageTitle, Section, TextLink } from '#renderer/ui/index.ts';
 import type { MemberPageView } from '#shared/contracts/desk.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { deskText } from '#shared/text/desk.ts';
-import { Awaited } from '../awaited.tsx';
 import { sayPastDate } from '../say-figure.ts';
 import { LatestAnswers } from './latest-answers.tsx';
 import { Outcomes } from './outcomes.tsx';

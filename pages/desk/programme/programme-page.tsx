@@ -1,10 +1,10 @@
 import { useEffect, useRef, useState } from 'react';
 import { useCall, useStore } from '#renderer/api.ts';
+import { Awaited } from '#renderer/awaited.tsx';
 import { Notice, PageTitle, Section } from '#renderer/ui/index.ts';
 import type { ProgrammeView } from '#shared/contracts/desk.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { deskText } from '#shared/text/desk.ts';
-import { Awaited } from '../awaited.tsx';
 import { AssignSet } from './assign-set.tsx';
 import { ProgrammeForm } from './programme-form.tsx';
 import { valuesOf } from './programme-form-values.ts';

@@ -1,11 +1,11 @@
 import { useSearchParams } from 'react-router';
 import { useCall } from '#renderer/api.ts';
+import { Awaited } from '#renderer/awaited.tsx';
 import { downloadCsv } from '#renderer/csv.ts';
 import { Button, EmptyState, LinkButton, PageTitle } from '#renderer/ui/index.ts';
 import type { SquadView } from '#shared/contracts/desk.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { deskText } from '#shared/text/desk.ts';
-import { Awaited } from '../awaited.tsx';
 import { Chooser } from '../chooser.tsx';
 import { LostList } from './lost-list.tsx';
 import { ShortBoard } from './short-board.tsx';

@@ -1,10 +1,10 @@
 import { useSearchParams } from 'react-router';
 import { useCall } from '#renderer/api.ts';
+import { Awaited } from '#renderer/awaited.tsx';
 import { EmptyState, LinkButton, PageTitle, Section } from '#renderer/ui/index.ts';
 import type { StandingsView } from '#shared/contracts/desk.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { deskText } from '#shared/text/desk.ts';
-import { Awaited } from '../awaited.tsx';
 import { Chooser } from '../chooser.tsx';
 import { BoardTable } from './board-table.tsx';
 import { SharedBoards } from './shared-boards.tsx';

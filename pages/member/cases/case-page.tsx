@@ -1,6 +1,7 @@
 import { useEffect } from 'react';
 import { useParams } from 'react-router';
 import { useCall } from '#renderer/api.ts';
+import { Awaited } from '#renderer/awaited.tsx';
 import {
   AlgorithmText,
   AppLink,
@@ -18,7 +19,7 @@ import { memberText } from '#shared/text/member.ts';
 import { shellText } from '#shared/text/shell.ts';
 import { caseHref } from '../case-href.ts';
 import { sayDate } from '../say-date.ts';
-import { Awaited, MemberScreen } from '../screen.tsx';
+import { MemberScreen } from '../screen.tsx';
 import { StateMark } from '../state-mark.tsx';
 import { LatestAnswers } from './latest-answers.tsx';
 

@@ -1,10 +1,11 @@
 import { useSearchParams } from 'react-router';
 import { useCall } from '#renderer/api.ts';
+import { Awaited } from '#renderer/awaited.tsx';
 import { Button, EmptyState, FigureBar } from '#renderer/ui/index.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import type { MyCasesView } from '#shared/contracts/member.ts';
 import { memberText } from '#shared/text/member.ts';
-import { Awaited, MemberScreen } from '../screen.tsx';
+import { MemberScreen } from '../screen.tsx';
 import { CaseFilters } from './case-filters.tsx';
 import { CaseList } from './case-list.tsx';
 import { CaseTable } from './case-table.tsx';

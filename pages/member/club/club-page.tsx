@@ -1,8 +1,9 @@
 import { useCall } from '#renderer/api.ts';
+import { Awaited } from '#renderer/awaited.tsx';
 import { Section } from '#renderer/ui/index.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { memberText } from '#shared/text/member.ts';
-import { Awaited, MemberScreen } from '../screen.tsx';
+import { MemberScreen } from '../screen.tsx';
 import { Account } from './account.tsx';
 import { Board } from './board.tsx';
 import { People } from './people.tsx';

@@ -1,9 +1,10 @@
 import { useCall } from '#renderer/api.ts';
+import { Awaited } from '#renderer/awaited.tsx';
 import { EmptyState, FigureBar, Section } from '#renderer/ui/index.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import type { FormView } from '#shared/contracts/member.ts';
 import { memberText } from '#shared/text/member.ts';
-import { Awaited, MemberScreen } from '../screen.tsx';
+import { MemberScreen } from '../screen.tsx';
 import { MinutesChart } from './minutes-chart.tsx';
 import { Outcomes } from './outcomes.tsx';
 import { RecallTrend } from './recall-trend.tsx';

@@ -1,18 +1,18 @@
-import { useSend } from '#renderer/api.ts';
-import { useSession } from '#renderer/session.tsx';
 import { endpoints } from '#shared/contracts/endpoints.ts';
-import { deskText } from '#shared/text/desk.ts';
+import { shellText } from '#shared/text/shell.ts';
+import { useSend } from './api.ts';
+import { useSession } from './session.tsx';
 
-const text = deskText.elsewhere;
-
-/** The way to a captain's other clubs, and to the administration. Nothing for one who has no other place. */
+/** The way to a person's other clubs, and to the administration. Nothing for one who has no other place. */
 export function ClubSwitch() {
-  const { club, clubs, isAdministrator } = useSession();
-  // A document load, so that nothing of this club stays in memory.
+  const { club, clubs, role, isAdministrator } = useSession();
+  // A document load, so that nothing of the place before stays in memory.
   const change = useSend(endpoints.switchClub, { onDone: ({ next }) => window.location.assign(next) });
   const places = [
     ...clubs.filter((one) => one.clubId !== club?.clubId).map(({ clubId, name }) => ({ clubId, name })),
-    ...(isAdministrator ? [{ clubId: null, name: text.administration }] : []),
+    ...(isAdministrator && role !== 'administrator'
+      ? [{ clubId: null, name: shellText.administration }]
+      : []),
   ];
   if (places.length === 0) return null;
   return (
@@ -25,12 +25,12 @@ export function ClubSwitch() {
           onClick={() => change.mutate({ clubId })}
           className="min-h-12 underline underline-offset-4 hover:text-ink"
         >
-          {text.switchTo(name)}
+          {shellText.switchTo(name)}
         </button>
       ))}
       {change.isError && (
         <span role="alert" className="text-rose">
-          {text.failed}
+          {shellText.switchFailed}
         </span>
       )}
     </>
