@@ -17,7 +17,7 @@ export function presentCase(
   shift: number,
   lastOutcome: LastOutcome | null,
 ): MyCase {
-  const { trained, case: c, memory, wanted } = card;
+  const { trained, case: c, memory, wanted, slipsBelow } = card;
   const { entry, set, content } = trained;
   const edition = content.cases.get(c.key);
   const algorithm = edition?.algorithms[0]?.algorithm;
@@ -31,7 +31,7 @@ export function presentCase(
     algorithm: algorithm ?? '',
     prior: { weight: c.weight, total: set.states },
     angles: c.angles,
-    state: caseStateName(memory, day.day, wanted),
+    state: caseStateName(memory, day.day, slipsBelow),
     recall: memory ? calibrated(recall(memory, day.day), shift) : null,
     nextDate: memory ? isoDate(Math.max(day.day, dueDay(memory, wanted))) : null,
     answers: memory?.answers ?? 0,

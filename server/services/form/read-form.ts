@@ -31,7 +31,7 @@ export async function readForm(ctx: Ctx): Promise<FormView> {
       sets: day.sets.map(({ entry, content }) => {
         const states = { unmet: 0, settling: 0, holding: 0, slipping: 0 };
         for (const card of cardsOfSet.get(entry.setKey) ?? []) {
-          states[caseStateName(card.memory, day.day, card.wanted)] += 1;
+          states[caseStateName(card.memory, day.day, card.slipsBelow)] += 1;
         }
         return {
           setKey: entry.setKey,

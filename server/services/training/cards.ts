@@ -12,6 +12,11 @@ export interface DayCard extends QueueCard {
   readonly case: CaseOfSet;
   /** Recall below which the case wants a showing. */
   readonly wanted: number;
+  /**
+   * Recall below which the case is said to slip. Minutes to spare raise what is wanted, down to showings of what is
+   * nearly sure; that is polish, not slipping.
+   */
+  readonly slipsBelow: number;
 }
 
 /**
@@ -38,6 +43,7 @@ export function cardsOf(day: MemberDay): DayCard[] {
       partner: trained.set.mirrorOf(c).key,
       group: trained.content.cases.get(c.key)?.group ?? '',
       wanted: wantedRecall(prior, found.length, betaOf(day)),
+      slipsBelow: wantedRecall(prior, found.length, Math.max(betaOf(day), DEFAULT_BETA)),
     };
   });
 }

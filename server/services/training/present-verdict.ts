@@ -80,6 +80,6 @@ async function presentVerdict(
     differsAt: difference ? findingsText.differs(difference, name, namedName) : null,
     lostBy: row.lostBy,
     back: { thisSitting: returns, date: memory ? isoDate(dueDay(memory, wanted)) : null },
-    state: caseStateName(memory, day.day, wanted),
+    state: caseStateName(memory, day.day, card?.slipsBelow ?? wanted),
   };
 }
