@@ -24,10 +24,11 @@ it('finds paths and scripts in the documents that are not there', () => {
   write('server/main.ts', '');
   write(
     'README.md',
-    'See `server/main.ts`, `server/gone.ts`, `/today`, `text/csv` and `.data/x`.\n`npm run dev`',
+    'See `server/main.ts`, `main.ts`, `./x.ts`, `none.ts`, `server/gone.ts`, `/today`, `text/csv` and `.data/x`.\n`npm run dev`',
   );
   write('DEVELOPERS.md', '[look](server/main.ts) ![picture](public/none.png)\n`npm run -s nothing`');
   expect(checkDocuments(repository)).toEqual([
+    'README.md:1: none.ts does not exist',
     'README.md:1: server/gone.ts does not exist',
     'DEVELOPERS.md:1: public/none.png does not exist',
     'DEVELOPERS.md:2: there is no npm script nothing',

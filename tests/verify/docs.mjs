@@ -1,6 +1,7 @@
 import { existsSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { readJson } from '../../server/toolbox/files.mjs';
+import { filesUnder } from '../../server/toolbox/fingerprint.mjs';
 import { lineAt, TOP_FOLDERS } from './sources.mjs';
 
 const DOCUMENTS = ['README.md', 'DEVELOPERS.md'];
@@ -21,7 +22,7 @@ export function checkDocuments(root) {
     const tell = (match, problem) => `${document}:${lineAt(text, match.index)}: ${problem}`;
     const paths = [...text.matchAll(/(?<!`)`([^`\n]+)`(?!`)|\]\(([^)#\s]+)[^)]*\)/g)]
       .filter((match) => isPath(match[1] ?? match[2], Boolean(match[2])))
-      .filter((match) => !existsSync(join(root, match[1] ?? match[2])))
+      .filter((match) => !isThere(root, match[1] ?? match[2]))
       .map((match) => tell(match, `${match[1] ?? match[2]} does not exist`));
     const commands = [...text.matchAll(/\bnpm run (?:-s )?([\w:-]+)/g)]
       .filter(([, name]) => !scripts[name])
@@ -30,9 +31,19 @@ export function checkDocuments(root) {
   });
 }
 
+/** A name without a folder may be anywhere. */
+function isThere(root, path) {
+  if (existsSync(join(root, path))) return true;
+  return (
+    !path.includes('/') &&
+    TOP_FOLDERS.some((folder) => filesUnder(root, folder).some((file) => file.endsWith(`/${path}`)))
+  );
+}
+
 /** Whether a code span, or a link's target, means a file or folder of the repository. */
 function isPath(text, link) {
   if (link) return !/^[a-z]+:/.test(text);
-  if (!/^[\w.@+-][\w.@+/-]*$/.test(text) || MADE.test(text)) return false;
+  // "./state.ts" shows how something is written, not where it is.
+  if (!/^[\w.@+-][\w.@+/-]*$/.test(text) || /^\.\.?\//.test(text) || MADE.test(text)) return false;
   return (text.includes('/') && TOP_FOLDERS.includes(text.split('/')[0])) || SOURCE.test(text);
 }
