@@ -94,6 +94,7 @@ export const memberText = {
     next: 'next showing',
     group: 'group',
     latest: 'Latest answers',
+    latestCaption: 'Answers to this case, newest first',
     noAnswers: 'Not shown to you yet.',
     columns: { when: 'When', outcome: 'Outcome', time: 'Time', lostBy: 'Lost by' },
     as: (named: string) => `named ${named}`,

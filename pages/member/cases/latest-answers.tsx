@@ -51,7 +51,7 @@ export function LatestAnswers({ answers }: { answers: MyCaseView['answers'] }) {
   ];
   return (
     <DataTable
-      caption={text.latest}
+      caption={text.latestCaption}
       captionHidden
       columns={columns}
       rows={answers}
