@@ -1,4 +1,4 @@
-import type { Locator, Page, Response } from 'playwright-core';
+import type { Locator, Page, Request, Response } from 'playwright-core';
 import { expect } from 'vitest';
 import type { AnswersInput, AnswersResult, TodayView, Verdict } from '#shared/contracts/today.ts';
 import { aufText } from '#shared/text/auf.ts';
@@ -78,14 +78,13 @@ export class Trainee {
   /** Answers the picture that is up and waits for its verdict to have come from the server. */
   async answer(manner: Manner): Promise<Given> {
     const { id, real } = await this.current();
-    const answered = this.#page.waitForResponse(
-      (response) =>
-        isAnswers(response.request()) &&
-        (response.request().postDataJSON() as AnswersInput).answers.some((a) => a.showingId === id),
-    );
-    if (manner === 'not recognised') await this.#pressOnPicture('I don’t recognise it');
-    else await this.#name(real, manner);
-    const given = await this.#verdictOf(await answered, id, manner, real);
+    const [response] = await Promise.all([
+      this.#page.waitForResponse(
+        (one) => isAnswers(one.request()) && answersOf(one.request()).some((a) => a.showingId === id),
+      ),
+      manner === 'not recognised' ? this.#pressOnPicture('I don’t recognise it') : this.#name(real, manner),
+    ]);
+    const given = await this.#verdictOf(response, id, manner, real);
     this.given.push(given);
     return given;
   }
@@ -127,10 +126,9 @@ export class Trainee {
 
   async #verdictOf(response: Response, id: string, manner: Manner, real: RealShowing): Promise<Given> {
     expect(response.status()).toBe(200);
-    const { answers } = response.request().postDataJSON() as AnswersInput;
     const result = (await response.json()) as AnswersResult;
     this.#today = result.today;
-    const answerId = answers.find(({ showingId }) => showingId === id)?.id;
+    const answerId = answersOf(response.request()).find(({ showingId }) => showingId === id)?.id;
     const verdict = result.verdicts.find((one) => one.id === answerId);
     if (!verdict) throw new Error('The answer came back without its verdict.');
     return { manner, showingId: id, real, verdict };
@@ -154,6 +152,10 @@ export class Trainee {
   }
 }
 
-function isAnswers(request: { method(): string; url(): string }): boolean {
+function answersOf(request: Request): AnswersInput['answers'] {
+  return (request.postDataJSON() as AnswersInput).answers;
+}
+
+function isAnswers(request: Request): boolean {
   return request.method() === 'POST' && new URL(request.url()).pathname === '/api/today/answers';
 }
