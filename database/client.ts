@@ -8,12 +8,18 @@ import * as training from './schema/training.ts';
 
 export const tables = { ...identity, ...club, ...catalogue, ...intake, ...training };
 
-/** A pool of connections and the query builder on it. `end()` the pool when done. */
-export function openDatabase(url: string, { max = 10 }: { max?: number } = {}) {
+/**
+ * A pool of connections and the query builder on it. `end()` the pool when done.
+ * @param waitMs how long a request may wait for a free connection before it is turned away
+ */
+export function openDatabase(
+  url: string,
+  { max = 10, waitMs = 1_000 }: { max?: number; waitMs?: number } = {},
+) {
   const pool = new pg.Pool({
     connectionString: url,
     max,
-    connectionTimeoutMillis: 1_000,
+    connectionTimeoutMillis: waitMs,
     statement_timeout: 15_000,
     application_name: 'sixteenfold',
   });

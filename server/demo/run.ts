@@ -25,9 +25,9 @@ async function main(): Promise<void> {
       throw new Error('Demonstration data goes into a database on this machine only.');
     }
   }
-  const owner = openDatabase(DATABASE_OWNER_URL, { max: 4 });
+  const owner = openDatabase(DATABASE_OWNER_URL, { max: 4, waitMs: 20_000 });
   // Nothing is lost that could not be made again, so a commit need not wait for the disk.
-  const app = openDatabase(withOption(DATABASE_URL, '-c synchronous_commit=off'), { max: 4 });
+  const app = openDatabase(withOption(DATABASE_URL, '-c synchronous_commit=off'), { max: 4, waitMs: 20_000 });
   try {
     await seedCatalogue(owner.db);
     if (DEMO !== '1' || (await isSeeded(owner.db))) return;

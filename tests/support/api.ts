@@ -62,7 +62,7 @@ export function useApi(urls: DatabaseUrls = useDatabase()): TestApi {
   };
 
   beforeAll(() => {
-    const database = openDatabase(urls.appUrl, { max: 5 });
+    const database = openDatabase(urls.appUrl, { max: 5, waitMs: 20_000 });
     const app = createApp({
       deps: { db: database.db, clock, random: Math.random },
       pool: database.pool,

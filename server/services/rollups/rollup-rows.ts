@@ -4,7 +4,7 @@ import { type CaseMemory, recall } from '#shared/memory/index.ts';
 import { type Calibration, dealtSums } from '#shared/standing/index.ts';
 import type { EditionContent } from '../catalogue/read-edition.ts';
 import { groupBy } from '../group-by.ts';
-import { type ReviewRow, spentMs } from '../training/day-counts.ts';
+import { type LoggedAnswer, spentMs } from '../training/day-counts.ts';
 
 export type RollupRow = typeof tables.rollup.$inferInsert;
 
@@ -17,7 +17,7 @@ export interface RollupDay {
   readonly memory: ReadonlyMap<string, CaseMemory>;
   readonly calibration: Calibration;
   /** The day's answers of this set. */
-  readonly answers: readonly ReviewRow[];
+  readonly answers: readonly LoggedAnswer[];
   readonly misTaps: ReadonlySet<string>;
 }
 
@@ -48,7 +48,7 @@ export function rollupRows({
       calibration,
     );
     const given = cases.flatMap(({ key }) => answersByCase.get(key) ?? []);
-    const count = (outcome: ReviewRow['outcome']) =>
+    const count = (outcome: LoggedAnswer['outcome']) =>
       given.filter((a) => a.outcome === outcome && (a.scored || outcome === 'left')).length;
     return {
       clubId,

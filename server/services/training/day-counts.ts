@@ -28,16 +28,34 @@ export async function misTapsOfDay(tx: Transaction, actor: ClubActor, day: numbe
   return new Set(rows.map((row) => row.id));
 }
 
+/** What the fold and the rollups need of an answer: the hot path reads no more. */
+const logColumns = {
+  reviewId: tables.review.reviewId,
+  setKey: tables.review.setKey,
+  caseKey: tables.review.caseKey,
+  answeredAt: tables.review.answeredAt,
+  localDay: tables.review.localDay,
+  outcome: tables.review.outcome,
+  scored: tables.review.scored,
+  keysOffered: tables.review.keysOffered,
+  onBoards: tables.review.onBoards,
+  carried: tables.review.carried,
+  recognitionMs: tables.review.recognitionMs,
+  namingMs: tables.review.namingMs,
+};
+
+export type LoggedAnswer = Pick<ReviewRow, keyof typeof logColumns>;
+
 /** The whole log of some cases of one member, and which of its answers were mis-taps. */
 export async function logOfCases(
   tx: Transaction,
   actor: Pick<ClubActor, 'clubId' | 'memberId'>,
   caseKeys: readonly string[],
-): Promise<{ rows: ReviewRow[]; misTaps: Set<string> }> {
+): Promise<{ rows: LoggedAnswer[]; misTaps: Set<string> }> {
   if (caseKeys.length === 0) return { rows: [], misTaps: new Set() };
   const { review, misTap } = tables;
   const rows = await tx
-    .select()
+    .select(logColumns)
     .from(review)
     .where(
       and(

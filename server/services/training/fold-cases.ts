@@ -1,12 +1,12 @@
-import { and, eq, inArray } from 'drizzle-orm';
+import { and, eq, gte, inArray } from 'drizzle-orm';
 import { type Transaction, tables } from '#database/client.ts';
 import { type CaseMemory, foldCase, type LogRow } from '#shared/memory/index.ts';
 import type { ClubActor } from '../context.ts';
 import { groupBy } from '../group-by.ts';
-import { logOfCases, type ReviewRow } from './day-counts.ts';
+import { type LoggedAnswer, logOfCases } from './day-counts.ts';
 
 /** A row of the log as the fold takes it. */
-export function logRow(row: ReviewRow, misTaps: ReadonlySet<string>): LogRow {
+export function logRow(row: LoggedAnswer, misTaps: ReadonlySet<string>): LogRow {
   return {
     id: row.reviewId,
     answeredAt: row.answeredAt.getTime(),
@@ -21,11 +21,14 @@ export function logRow(row: ReviewRow, misTaps: ReadonlySet<string>): LogRow {
 /**
  * Folds the whole log of these cases anew and writes what follows from it: the cases' memory and their first
  * answers of each day. The same code serves an answer, a late answer, a mis-tap and a rebuild.
+ *
+ * @param fromDay the earliest local day whose answers changed: first answers of earlier days cannot have, and stay
  */
 export async function foldCases(
   tx: Transaction,
   actor: Pick<ClubActor, 'clubId' | 'memberId'>,
   caseKeys: readonly string[],
+  fromDay = 0,
 ): Promise<Map<string, CaseMemory>> {
   const { caseState, firstAnswer } = tables;
   const folded = new Map<string, CaseMemory>();
@@ -51,6 +54,7 @@ export async function foldCases(
       });
     }
     for (const first of fold.firsts) {
+      if (first.localDay < fromDay) continue;
       firsts.push({
         clubId: actor.clubId,
         memberId: actor.memberId,
@@ -72,7 +76,7 @@ export async function foldCases(
       inArray(table.caseKey, [...caseKeys]),
     );
   await tx.delete(caseState).where(mine(caseState));
-  await tx.delete(firstAnswer).where(mine(firstAnswer));
+  await tx.delete(firstAnswer).where(and(mine(firstAnswer), gte(firstAnswer.localDay, fromDay)));
   if (states.length > 0) await tx.insert(caseState).values(states);
   if (firsts.length > 0) await tx.insert(firstAnswer).values(firsts);
   return folded;

@@ -24,7 +24,12 @@ export async function followAnswers(
 ): Promise<{ returning: Set<string> }> {
   // Days without an answer are closed with the memory of before.
   await completeDays(tx, day, day.day - 1);
-  const folded = await foldCases(tx, day.actor, [...new Set(stored.map((row) => row.caseKey))]);
+  const folded = await foldCases(
+    tx,
+    day.actor,
+    [...new Set(stored.map((row) => row.caseKey))],
+    Math.min(day.day, ...stored.map((row) => row.localDay)),
+  );
   for (const [key, memory] of folded) day.memory.set(key, memory);
   day.answers.push(...stored.filter((row) => row.localDay === day.day));
   await writeRollups(tx, day, stored);

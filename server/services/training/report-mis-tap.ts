@@ -54,7 +54,7 @@ export async function reportMisTap(ctx: Ctx, input: MisTapInput): Promise<TodayV
     if (added.length > 0) {
       day.misTaps.add(row.reviewId);
       await completeDays(tx, day, day.day - 1);
-      const folded = await foldCases(tx, actor, [row.caseKey]);
+      const folded = await foldCases(tx, actor, [row.caseKey], row.localDay);
       const memory = folded.get(row.caseKey);
       if (memory) day.memory.set(row.caseKey, memory);
       else day.memory.delete(row.caseKey);
