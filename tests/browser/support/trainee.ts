@@ -107,8 +107,8 @@ export class Trainee {
     const names = await this.recognise();
     if (manner === 'lost') return this.#press(names.getByRole('button', { name: 'lost it' }));
     const name = manner === 'wrong name' ? this.#anotherName(real) : real.name;
-    // Alone on its key, or with the first moves of the algorithm behind a comma.
-    await this.#press(names.getByRole('button', { name: new RegExp(`^${name}(,|$)`) }), name);
+    // Alone on its key, or with the first moves of the algorithm.
+    await this.#press(names.getByRole('button', { name: new RegExp(`^${name}( |$)`) }), name);
     const turns = [0, 1, 2, 3].find((k) => real.rightAufs.includes(k) === (manner !== 'wrong AUF')) ?? 0;
     const aufs = this.#page.getByRole('toolbar', { name: 'AUF before' });
     await aufs.waitFor();
