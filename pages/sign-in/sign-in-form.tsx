@@ -16,6 +16,15 @@ interface SignInFormProps {
 export function SignInForm({ next, values, onChange }: SignInFormProps) {
   const [missing, setMissing] = useState<{ signIn?: string; password?: string }>({});
   const summary = useRef<HTMLDivElement>(null);
+  const form = useRef<HTMLFormElement>(null);
+  const change = useRef(onChange);
+  useEffect(() => {
+    // With bad reception people have typed before this script was there: that counts.
+    const typed = (id: string) =>
+      (form.current?.elements.namedItem(id) as HTMLInputElement | null)?.value ?? '';
+    const early = { signIn: typed('sign-in'), password: typed('password') };
+    if (early.signIn || early.password) change.current(early);
+  }, []);
   const signIn = useSend(endpoints.signIn, {
     onDone: (answer) => window.location.assign(next ?? answer.next),
   });
@@ -44,7 +53,7 @@ export function SignInForm({ next, values, onChange }: SignInFormProps) {
   };
 
   return (
-    <form onSubmit={submit} noValidate method="post" className="grid content-start gap-6">
+    <form ref={form} onSubmit={submit} noValidate method="post" className="grid content-start gap-6">
       <h1 className="text-4xl font-bold">{text.title}</h1>
       {count > 0 && <ErrorSummary ref={summary} title={text.problemTitle} errors={problems} />}
       <TextField

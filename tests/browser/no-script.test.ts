@@ -1,5 +1,5 @@
 import { expect, it } from 'vitest';
-import { LAPTOP, useSite } from './support/site.ts';
+import { accountOf, LAPTOP, PHONE, useSite } from './support/site.ts';
 
 const site = useSite();
 const WITHOUT = { ...LAPTOP, javaScriptEnabled: false };
@@ -25,4 +25,25 @@ it('shows the squad with all its figures, without a script', async () => {
   await table.getByRole('link', { name: 'Member' }).click();
   const tobi = table.getByRole('row', { name: /^Tobi/ });
   expect(await tobi.textContent()).toMatch(/\d+%, between \d+% and \d+%, \d+ answers/);
+});
+
+it('takes what was typed before the scripts had come', async () => {
+  const page = await (await site.visitor(PHONE)).newPage();
+  let letScriptsIn = () => {};
+  const held = new Promise<void>((resolve) => {
+    letScriptsIn = resolve;
+  });
+  await page.route('**/assets/**/*.js', async (route) => {
+    await held;
+    await route.continue();
+  });
+  const { signIn, password } = accountOf('tobi');
+  await page.goto('/sign-in', { waitUntil: 'commit' });
+  await page.getByLabel('E-mail or sign-in name').fill(signIn);
+  await page.getByLabel('Password').fill(password);
+  letScriptsIn();
+  await page.waitForLoadState('networkidle');
+  expect(await page.getByLabel('E-mail or sign-in name').inputValue()).toBe(signIn);
+  await page.getByRole('button', { name: 'Sign in', exact: true }).tap();
+  await page.waitForURL('**/today');
 });
