@@ -55,7 +55,7 @@ export interface ReadLines {
   readonly covered: number;
   /** Cases of the set, the skip apart. */
   readonly of: number;
-  /** Names of the cases not covered, in canonical order. */
+  /** Names of the cases not covered, 2 before 10. */
   readonly missing: readonly string[];
 }
 
@@ -90,6 +90,9 @@ export function readCaseLines(set: CaseSet, lines: readonly CaseLine[], expand?:
   const seen = new Map<string, number>();
   const rows = lines.map((line) => readLine(set, line, seen, expand));
   const agreed = new Set(rows.flatMap((row) => (row.finding === 'agrees' ? [row.solves] : [])));
-  const missing = set.cases.filter(({ name }) => !agreed.has(name)).map(({ name }) => name);
+  const missing = set.cases
+    .map(({ name }) => name)
+    .filter((name) => !agreed.has(name))
+    .sort((a, b) => a.localeCompare(b, 'en', { numeric: true }));
   return { rows, covered: set.cases.length - missing.length, of: set.cases.length, missing };
 }
