@@ -1,6 +1,7 @@
 import { readFileSync } from 'node:fs';
 import type { Locator, Page } from 'playwright-core';
 import { expect, it } from 'vitest';
+import { openPage } from './support/open-page.ts';
 import { LAPTOP, useSite } from './support/site.ts';
 
 const site = useSite();
@@ -17,7 +18,7 @@ function faultyFile(): { csv: string; mislabelled: number; broken: number } {
 }
 
 async function upload(page: Page, csv: string): Promise<void> {
-  await page.goto('/admin/intake');
+  await openPage(page, '/admin/intake');
   await page.getByLabel('Set', { exact: true }).selectOption('pll');
   await page
     .getByLabel('File', { exact: true })

@@ -2,13 +2,14 @@ import type { Page } from 'playwright-core';
 import { expect, it } from 'vitest';
 import { answerInTime } from './support/answers.ts';
 import { manyMinutes, memberOf } from './support/members.ts';
+import { openPage } from './support/open-page.ts';
 import { LAPTOP, PHONE, useSite } from './support/site.ts';
 
 const site = useSite();
 
 /** What the desk says of a member in words: each set's figure, interval and answers. */
 async function figuresOf(page: Page, nickname: string): Promise<{ words: string[]; answers: number }> {
-  await page.goto('/desk/squad');
+  await openPage(page, '/desk/squad');
   const row = page
     .getByRole('table', { name: 'Squad' })
     .getByRole('row', { name: new RegExp(`^${nickname}`) });
@@ -50,10 +51,10 @@ it('sees a member’s figures move with twenty answers', async () => {
 it('hands a set to chosen members: only they find it in Today', async () => {
   const page = await (await site.visitorAs('ines', LAPTOP)).newPage();
   const pia = await (await site.visitorAs('pia', PHONE)).newPage();
-  await pia.goto('/today');
+  await openPage(pia, '/today');
   await pia.getByText(/^(PLL, OLL|OLL, PLL) · /).waitFor();
 
-  await page.goto('/desk/programme');
+  await openPage(page, '/desk/programme');
   const table = page.getByRole('table', { name: 'Sets on the programme' });
   const oll = table.getByRole('row', { name: /^OLL/ });
   expect(await oll.textContent()).toContain('everyone');
@@ -72,10 +73,10 @@ it('hands a set to chosen members: only they find it in Today', async () => {
   await pia.reload();
   await pia.getByText(/^PLL · /).waitFor();
   const tobi = await (await site.visitorAs('tobi', PHONE)).newPage();
-  await tobi.goto('/today');
+  await openPage(tobi, '/today');
   await tobi.getByText(/^(PLL, OLL|OLL, PLL) · /).waitFor();
   // At the desk whoever does not answer for a set has no figure in it.
-  await page.goto('/desk/squad');
+  await openPage(page, '/desk/squad');
   const squad = page.getByRole('table', { name: 'Squad' });
   expect(await squad.getByRole('row', { name: /^Pia/ }).textContent()).toContain('not assigned');
 });
@@ -84,8 +85,8 @@ it('keeps a captain to the own club, and members from the desk', async () => {
   const marit = await memberOf(site, 'Marit');
   const page = await (await site.visitorAs('marlo', LAPTOP)).newPage();
   site.watch.expect(/status of 404/);
-  const answer = await page.goto(`/desk/squad/${marit.memberId}`);
-  expect(answer?.status()).toBe(404);
+  const answer = await openPage(page, `/desk/squad/${marit.memberId}`);
+  expect(answer.status()).toBe(404);
   await page.getByRole('heading', { level: 1, name: 'Not here' }).waitFor();
 
   // Tobi is in both clubs; of all others of Harbour Lane no page says a word.
@@ -100,7 +101,7 @@ it('keeps a captain to the own club, and members from the desk', async () => {
     '/desk/programme',
     '/club',
   ]) {
-    await page.goto(path);
+    await openPage(page, path);
     expect(await page.getByRole('main').textContent()).not.toMatch(names);
     // Nor the document that was sent, with the data for its scripts.
     expect(await (await page.request.get(path)).text()).not.toMatch(names);
@@ -108,7 +109,7 @@ it('keeps a captain to the own club, and members from the desk', async () => {
 
   const member = await (await site.visitorAs('tobi', PHONE)).newPage();
   site.watch.expect(/status of 403/);
-  const refused = await member.goto('/desk/squad');
-  expect(refused?.status()).toBe(403);
+  const refused = await openPage(member, '/desk/squad');
+  expect(refused.status()).toBe(403);
   await member.getByRole('heading', { level: 1, name: 'Not yours to see' }).waitFor();
 });

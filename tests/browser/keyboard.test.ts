@@ -1,6 +1,7 @@
 import type { Page } from 'playwright-core';
 import { expect, it } from 'vitest';
 import { longLimits, memberOf } from './support/members.ts';
+import { openPage } from './support/open-page.ts';
 import { accountOf, LAPTOP, useSite } from './support/site.ts';
 import { Trainee } from './support/trainee.ts';
 
@@ -23,7 +24,7 @@ it('signs in, trains five showings and takes a mis-tap back without a pointer', 
   const page = await (await site.visitor(LAPTOP)).newPage();
   const { signIn, password } = accountOf('marlo');
 
-  await page.goto('/sign-in', { waitUntil: 'networkidle' });
+  await openPage(page, '/sign-in');
   await page.keyboard.press('Tab');
   expect(await focused(page)).toBe('Skip to content');
   await page.keyboard.press('Enter');

@@ -1,5 +1,6 @@
 import { expect, it } from 'vitest';
 import { everythingOf, longLimits, manyMinutes, memberOf } from './support/members.ts';
+import { openPage } from './support/open-page.ts';
 import { PHONE, useSite } from './support/site.ts';
 import { type Manner, Trainee } from './support/trainee.ts';
 
@@ -91,7 +92,7 @@ it('trains twenty showings on a phone; sending them again changes nothing', asyn
   expect(await tobi.answersToday()).toBe(20);
 
   // The picture that is up has been seen: leaving now is an outcome too.
-  await page.goto('/form');
+  await openPage(page, '/form');
   await expect.poll(() => tobi.answersToday()).toBe(21);
   expect((await tobi.reviewsToday()).at(-1)).toMatchObject({ outcome: 'left', named: 'left' });
 

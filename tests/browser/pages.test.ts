@@ -1,8 +1,9 @@
-import type { BrowserContext, Page } from 'playwright-core';
+import type { BrowserContext } from 'playwright-core';
 import { describe, expect, it } from 'vitest';
 import { nonceOf } from './support/documents.ts';
 import { expectSound } from './support/looks.ts';
 import { memberOf } from './support/members.ts';
+import { openPage } from './support/open-page.ts';
 import { type DemoName, LAPTOP, type Site, useSite } from './support/site.ts';
 
 const site = useSite();
@@ -71,30 +72,24 @@ async function aDraft({ url }: Site, context: BrowserContext): Promise<string> {
   return `/admin/intake/${((await answer.json()) as { draftId: string }).draftId}`;
 }
 
-async function visit(page: Page, path: string, { heading, status = 200 }: PageOfOurs): Promise<string> {
-  const response = await page.goto(path, { waitUntil: 'networkidle' });
-  if (!response) throw new Error(`${path} sent no document.`);
-  expect(response.status()).toBe(status);
-  await page.getByRole('heading', { level: 1, name: heading }).waitFor();
-  return nonceOf(response);
-}
-
 describe('every page, light and dark, wide and narrow', () => {
   it.each(PAGES)('$name', async (ours) => {
     if (ours.status) site.watch.expect(new RegExp(`status of ${ours.status}`));
     const context = await (ours.who ? site.visitorAs(ours.who, LAPTOP) : site.visitor(LAPTOP));
     const path = typeof ours.path === 'string' ? ours.path : await ours.path(site, context);
     const page = await context.newPage();
-    const first = await visit(page, path, ours);
+    const response = await openPage(page, path);
+    expect(response.status()).toBe(ours.status ?? 200);
+    await page.getByRole('heading', { level: 1, name: ours.heading }).waitFor();
     await expectSound(page);
     // The nonce is made anew for each document.
-    expect(await visit(page, path, ours)).not.toBe(first);
+    expect(await nonceOf(await context.request.get(path))).not.toBe(await nonceOf(response));
   });
 
   it('the questions before what cannot be undone', async () => {
     const context = await site.visitorAs('desk', LAPTOP);
     const page = await context.newPage();
-    await page.goto(await aDraft(site, context));
+    await openPage(page, await aDraft(site, context));
     await page.getByRole('button', { name: 'Discard' }).click();
     await page.getByRole('dialog').waitFor();
     await expectSound(page);
@@ -102,7 +97,7 @@ describe('every page, light and dark, wide and narrow', () => {
 
   it('a form that was filled in wrongly', async () => {
     const page = await (await site.visitor(LAPTOP)).newPage();
-    await page.goto('/sign-in');
+    await openPage(page, '/sign-in');
     await page.getByRole('button', { name: 'Sign in', exact: true }).click();
     await page.getByRole('alert').waitFor();
     await expectSound(page);

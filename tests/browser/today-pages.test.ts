@@ -2,6 +2,7 @@ import { expect, it } from 'vitest';
 import { answerInTime } from './support/answers.ts';
 import { expectSound } from './support/looks.ts';
 import { longLimits, memberOf } from './support/members.ts';
+import { openPage } from './support/open-page.ts';
 import { LAPTOP, useSite } from './support/site.ts';
 import { Trainee } from './support/trainee.ts';
 
@@ -12,7 +13,7 @@ it('is sound in every phase of a sitting, light and dark, wide and narrow', asyn
   await longLimits(site, pia);
   const page = await (await site.visitorAs('pia', LAPTOP)).newPage();
   const trainee = new Trainee(site, page, 'pointer');
-  await page.goto('/today');
+  await openPage(page, '/today');
   await page.getByRole('button', { name: /^Begin / }).waitFor();
   await expectSound(page);
 
@@ -27,7 +28,7 @@ it('is sound in every phase of a sitting, light and dark, wide and narrow', asyn
   await page.getByRole('toolbar', { name: 'AUF before' }).waitFor();
   await expectSound(page);
   // Whatever that would have been: it is left, and the next one named wrongly.
-  await page.goto('/form');
+  await openPage(page, '/form');
   await expect.poll(() => pia.answersToday()).toBe(1);
   await trainee.begin();
   await trainee.answer('wrong name');
@@ -43,7 +44,7 @@ it('is sound at the end of the day, and where nothing is on the programme', asyn
   const context = await site.visitorAs('marlo', LAPTOP);
   await answerInTime(site, context, null);
   const page = await context.newPage();
-  await page.goto('/today');
+  await openPage(page, '/today');
   await page.getByRole('heading', { name: 'Done for today' }).waitFor();
   await expectSound(page);
 

@@ -1,9 +1,9 @@
-import type { Response } from 'playwright-core';
+import type { APIResponse, Response } from 'playwright-core';
 import { expect } from 'vitest';
 
 /** The nonce of a document's policy. @throws where its headers let in more than our own scripts and styles. */
-export async function nonceOf(response: Response): Promise<string> {
-  const headers = await response.allHeaders();
+export async function nonceOf(response: Response | APIResponse): Promise<string> {
+  const headers = response.headers();
   expect(headers).toMatchObject({
     'cache-control': 'no-store',
     'content-type': expect.stringMatching(/^text\/html; ?charset=utf-8$/i),

@@ -5,6 +5,7 @@ import { launchBrowser } from '#tests/support/browser.ts';
 import { useDemoDatabase } from '#tests/support/database.ts';
 import { Factory } from '#tests/support/factories.ts';
 import { type RunningServer, startServer } from '#tests/support/server.ts';
+import { openPage } from './open-page.ts';
 import { Watch } from './watch.ts';
 
 /** A phone in the hand, as look.md's mocks are drawn. */
@@ -100,7 +101,7 @@ export function useSite(): Site {
     },
     async signIn(page, name) {
       const { signIn, password } = accountOf(name);
-      await page.goto('/sign-in');
+      await openPage(page, '/sign-in');
       await page.getByLabel('E-mail or sign-in name').fill(signIn);
       await page.getByLabel('Password').fill(password);
       await page.getByRole('button', { name: 'Sign in', exact: true }).click();

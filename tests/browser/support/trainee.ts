@@ -2,6 +2,7 @@ import type { Locator, Page, Request, Response } from 'playwright-core';
 import { expect } from 'vitest';
 import type { AnswersInput, AnswersResult, TodayView, Verdict } from '#shared/contracts/today.ts';
 import { aufText } from '#shared/text/auf.ts';
+import { openPage } from './open-page.ts';
 import { type RealShowing, realShowing } from './showing.ts';
 import type { Site } from './site.ts';
 
@@ -56,7 +57,7 @@ export class Trainee {
 
   /** Opens Today, or loads it anew, and puts up the first picture. */
   async begin(): Promise<void> {
-    await this.#page.goto('/today');
+    await openPage(this.#page, '/today');
     await this.readQueue();
     await this.#press(this.#page.getByRole('button', { name: /^(Begin|Go on) / }));
     await this.gotIt.waitFor();
