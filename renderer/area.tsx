@@ -65,7 +65,11 @@ export function AreaPage({ area }: { area: Area }) {
   const [client] = useState(
     () =>
       new QueryClient({
-        defaultOptions: { queries: { staleTime: 30_000, retry: 1, refetchOnWindowFocus: false } },
+        defaultOptions: {
+          queries: { staleTime: 30_000, retry: 1, refetchOnWindowFocus: false, networkMode: 'always' },
+          // Without a connection a call fails and the screen says so, instead of waiting for ever.
+          mutations: { networkMode: 'always' },
+        },
       }),
   );
   const { Frame } = area;

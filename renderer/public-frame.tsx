@@ -3,7 +3,16 @@ import { shellText } from '#shared/text/shell.ts';
 import { TopBar } from './ui/index.ts';
 
 /** The frame of pages anyone may see. */
-export function PublicFrame({ children, current }: { children: ReactNode; current?: 'signIn' }) {
+export function PublicFrame({
+  children,
+  current,
+  home = null,
+}: {
+  children: ReactNode;
+  current?: 'signIn';
+  /** The first place of whoever is signed in. */
+  home?: string | null;
+}) {
   return (
     <>
       <TopBar
@@ -11,7 +20,11 @@ export function PublicFrame({ children, current }: { children: ReactNode; curren
         homeHref="/"
         navigationLabel={shellText.navigation}
         skipLabel={shellText.skipToContent}
-        items={[{ href: '/sign-in', label: shellText.signIn, current: current === 'signIn' }]}
+        items={[
+          home
+            ? { href: home, label: shellText.openPlaces, current: false }
+            : { href: '/sign-in', label: shellText.signIn, current: current === 'signIn' },
+        ]}
       />
       <main id="content" className="mx-auto w-full max-w-6xl px-4 py-8 sm:px-8">
         {children}

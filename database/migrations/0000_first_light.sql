@@ -297,6 +297,7 @@ CREATE TABLE "showing" (
 	"asks_auf" boolean NOT NULL,
 	"reason" text NOT NULL,
 	"local_day" integer NOT NULL,
+	"planned_seconds" double precision NOT NULL,
 	"position" integer NOT NULL,
 	"issued_at" timestamp with time zone NOT NULL,
 	"review_id" uuid,

@@ -36,6 +36,8 @@ export const showing = pgTable(
     asksAuf: boolean('asks_auf').notNull(),
     reason: text('reason', { enum: ['due', 'new', 'retest'] }).notNull(),
     localDay: integer('local_day').notNull(),
+    /** What it was reckoned to take when the day was planned: the day's total stays what it was. */
+    plannedSeconds: doublePrecision('planned_seconds').notNull(),
     position: integer('position').notNull(),
     issuedAt: instant('issued_at').notNull(),
     /** The one answer this showing took. Set once, by a conditional update: the race of two tabs ends here. */

@@ -7,7 +7,7 @@ import { shellText } from '#shared/text/shell.ts';
 export function Page() {
   const { home } = usePageContext().data as { home: string | null };
   return (
-    <PublicFrame>
+    <PublicFrame home={home}>
       <h1 className="max-w-3xl text-4xl font-bold leading-tight sm:text-5xl">{frontText.title}</h1>
       <p className="mt-5 max-w-prose text-xl leading-relaxed text-ink-2">{frontText.lead}</p>
       <p className="mt-8">

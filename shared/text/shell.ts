@@ -4,6 +4,7 @@ export const shellText = {
   description: 'Last-layer recognition for cube clubs.',
   skipToContent: 'Skip to content',
   signIn: 'Sign in',
+  openPlaces: 'Your places',
   signOut: 'Sign out',
   administrator: 'administrator',
   administration: 'the administration',

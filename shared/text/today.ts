@@ -46,7 +46,7 @@ export const todayText = {
   aufLegend: 'AUF before',
   aufFor: (firstMoves: string) => `for ${firstMoves} …`,
   slowNaming: 'Over 5 s: this answer will not be scored.',
-  keysHint: 'Type the name, or use the arrow keys and Enter. 0 to 3 for the AUF.',
+  keysHint: 'Keys: type the name, or go to it with the arrows and press Enter. Then 0 to 3 for the AUF.',
 
   sending: 'Sending the answer.',
 
@@ -127,6 +127,7 @@ export const todayText = {
 
   summary: {
     title: 'Done for today',
+    why: 'Your minutes are used, or nothing more is due. What is still due waits for tomorrow.',
     held: 'held',
     late: 'late',
     missed: 'missed',

@@ -113,6 +113,7 @@ describe('the screen before the first picture', () => {
   it('shows no picture: the clock has not started', () => {
     const markup = renderToStaticMarkup(
       <ReadyScreen
+        club="Harbour Lane Cubers"
         setNames={['PLL']}
         progress={{ answered: 0, planned: 32 }}
         secondsLeft={240}

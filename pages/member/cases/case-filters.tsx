@@ -1,3 +1,4 @@
+import { useEffect, useRef, useState } from 'react';
 import { SelectField, TextField } from '#renderer/ui/index.ts';
 import type { MyCasesView } from '#shared/contracts/member.ts';
 import { memberText } from '#shared/text/member.ts';
@@ -37,15 +38,7 @@ export function CaseFilters({
           ...Object.entries(memberText.states).map(([value, label]) => ({ value, label })),
         ]}
       />
-      <TextField
-        id="case-find"
-        type="search"
-        label={text.search}
-        placeholder={text.searchHint}
-        value={filter.text}
-        autoComplete="off"
-        onChange={(event) => onChange({ text: event.target.value })}
-      />
+      <FindField text={filter.text} onFind={(found) => onChange({ text: found })} />
       <SelectField
         id="case-sort"
         label={text.sort}
@@ -54,5 +47,42 @@ export function CaseFilters({
         options={SORTS.map((sort) => ({ value: sort, label: text.sorts[sort] }))}
       />
     </search>
+  );
+}
+
+/** A moment's rest in typing: browsers limit how often an address may change. */
+const REST_MS = 250;
+
+/** The letters are the field's own; the address follows when typing rests, and leads when it changes by itself. */
+function FindField({ text: inAddress, onFind }: { text: string; onFind: (text: string) => void }) {
+  const [letters, setLetters] = useState(inAddress);
+  const written = useRef(inAddress);
+  const find = useRef(onFind);
+  useEffect(() => {
+    find.current = onFind;
+  });
+  useEffect(() => {
+    if (inAddress === written.current) return;
+    written.current = inAddress;
+    setLetters(inAddress);
+  }, [inAddress]);
+  useEffect(() => {
+    if (letters === written.current) return;
+    const timer = setTimeout(() => {
+      written.current = letters;
+      find.current(letters);
+    }, REST_MS);
+    return () => clearTimeout(timer);
+  }, [letters]);
+  return (
+    <TextField
+      id="case-find"
+      type="search"
+      label={text.search}
+      placeholder={text.searchHint}
+      value={letters}
+      autoComplete="off"
+      onChange={(event) => setLetters(event.target.value)}
+    />
   );
 }

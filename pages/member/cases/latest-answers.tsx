@@ -7,6 +7,8 @@ import { useLocalTime } from '../use-local-time.ts';
 type Answer = MyCaseView['answers'][number];
 
 const text = memberText.case;
+/** The right name under a wrong AUF: then the name says nothing. */
+const AUF_ONLY = 'AUF before';
 
 /** The last answers to a case, newest first. */
 export function LatestAnswers({ answers }: { answers: MyCaseView['answers'] }) {
@@ -28,7 +30,7 @@ export function LatestAnswers({ answers }: { answers: MyCaseView['answers'] }) {
           <span className={a.outcome === 'missed' ? 'font-bold text-rose' : 'font-bold'}>
             {memberText.outcomes[a.outcome]}
           </span>
-          {a.outcome === 'missed' && (
+          {a.outcome === 'missed' && a.lostBy !== AUF_ONLY && (
             <span className="text-ink-2">, {memberText.case.as(memberText.named(a.named))}</span>
           )}
           {a.misTapped && <span className="text-ink-2">, {text.misTap}</span>}

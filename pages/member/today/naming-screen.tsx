@@ -27,6 +27,7 @@ export function NamingScreen({ keys, grid, asksAuf, recognitionMs, onChoose }: N
   const beganAt = useRef(0);
   const chosen = useRef(false);
   const typed = useRef({ letters: '', at: 0 });
+  const justTyped = useRef(false);
   const caseGrid = useRef<HTMLDivElement>(null);
   const aufGrid = useRef<HTMLDivElement>(null);
   const [picked, setPicked] = useState<AnswerKey | null>(null);
@@ -62,6 +63,14 @@ export function NamingScreen({ keys, grid, asksAuf, recognitionMs, onChoose }: N
   const onKey = useRef<(event: KeyboardEvent) => void>(() => {});
   onKey.current = (event) => {
     if (event.repeat || event.altKey || event.ctrlKey || event.metaKey) return;
+    // Enter after a typed name closes the name; the AUF it would land on has not been looked at yet.
+    const closesName = event.key === 'Enter' && justTyped.current;
+    justTyped.current = false;
+    if (closesName) {
+      event.preventDefault();
+      event.stopPropagation();
+      return;
+    }
     if (!/^[\p{L}\p{N}]$/u.test(event.key)) return;
     if (picked && /^[0-3]$/.test(event.key)) send(picked.key, Number(event.key));
     else type(event.key, event.timeStamp);
@@ -77,7 +86,9 @@ export function NamingScreen({ keys, grid, asksAuf, recognitionMs, onChoose }: N
     typed.current = { letters: meant.kind === 'pick' ? '' : letters, at };
     if (meant.kind === 'none') return;
     focusKey(caseGrid.current, meant.index);
-    if (meant.kind === 'pick') pick(names[meant.index]?.value ?? '');
+    if (meant.kind !== 'pick') return;
+    justTyped.current = true;
+    pick(names[meant.index]?.value ?? '');
   };
   useEffect(() => {
     const listener = (event: KeyboardEvent) => onKey.current(event);
@@ -111,7 +122,7 @@ export function NamingScreen({ keys, grid, asksAuf, recognitionMs, onChoose }: N
       <p role="status" className="text-[0.9375rem] text-ink-2">
         {slow ? todayText.slowNaming : ''}
       </p>
-      <p className="sr-only">{todayText.keysHint}</p>
+      <p className="sr-only text-[0.9375rem] text-ink-2 lg:not-sr-only">{todayText.keysHint}</p>
     </div>
   );
 }

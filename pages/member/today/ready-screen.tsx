@@ -7,12 +7,14 @@ export interface ReadyScreenProps {
   readonly setNames: readonly string[];
   readonly progress: Progress;
   readonly secondsLeft: number;
+  /** The club one trains in. */
+  readonly club: string;
   readonly note: ReactNode;
   readonly onBegin: () => void;
 }
 
 /** Before the first picture: the clock must not start while the page is still arriving. */
-export function ReadyScreen({ setNames, progress, secondsLeft, note, onBegin }: ReadyScreenProps) {
+export function ReadyScreen({ setNames, progress, secondsLeft, club, note, onBegin }: ReadyScreenProps) {
   const begin = useRef(onBegin);
   const resumed = progress.answered > 0;
   const count = Math.max(0, progress.planned - progress.answered);
@@ -47,6 +49,7 @@ export function ReadyScreen({ setNames, progress, secondsLeft, note, onBegin }: 
             <p className="text-lg text-ink-2">
               {todayText.ready.setsAndTime(todayText.ready.sets(setNames), secondsLeft)}
             </p>
+            <p className="text-ink-2">{club}</p>
           </div>
           <div className="max-w-[34rem] space-y-2 border-t border-line pt-4 text-ink-2">
             {todayText.ready.how.map((sentence) => (

@@ -42,7 +42,8 @@ function Summary({ summary }: { summary: SittingSummary }) {
   return (
     <>
       <div>
-        <h2 className="pb-4 text-2xl font-bold">{text.title}</h2>
+        <h2 className="text-2xl font-bold">{text.title}</h2>
+        <p className="pb-4 text-ink-2">{text.why}</p>
         <BigNumbers>
           <BigNumber value={String(held)} label={text.held} />
           <BigNumber value={String(late)} label={text.late} tone={late > 0 ? 'ink' : 'quiet'} />

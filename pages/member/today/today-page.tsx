@@ -1,5 +1,6 @@
 import { type ReactNode, useEffect, useState } from 'react';
 import { useCall } from '#renderer/api.ts';
+import { useSession } from '#renderer/session.tsx';
 import { ErrorState, LoadingState, ScreenHead } from '#renderer/ui/index.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import type { TodayView } from '#shared/contracts/today.ts';
@@ -87,6 +88,7 @@ interface PhaseProps {
 }
 
 function PhaseScreen({ sitting, actions, progress, saved, note }: PhaseProps) {
+  const { club } = useSession();
   const { view, phase, held } = sitting;
   switch (phase.kind) {
     case 'ready':
@@ -95,6 +97,7 @@ function PhaseScreen({ sitting, actions, progress, saved, note }: PhaseProps) {
           setNames={view.sets.map((set) => set.name)}
           progress={progress}
           secondsLeft={view.secondsLeft}
+          club={club?.name ?? ''}
           note={note}
           onBegin={actions.begin}
         />

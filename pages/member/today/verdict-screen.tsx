@@ -68,12 +68,16 @@ export function VerdictScreen(props: VerdictScreenProps) {
         </p>
       )}
       {note}
-      <div className="mt-auto flex gap-2.5 pt-2">
-        {canMisTap && !misTapped && (
-          <Button kind="outlined" size="wide" className="flex-1 basis-1/3 font-normal" onClick={onMisTap}>
-            {todayText.misTap}
-          </Button>
-        )}
+      <div className="sticky bottom-16 mt-auto flex gap-2.5 bg-paper py-2 lg:bottom-0">
+        <Button
+          kind="outlined"
+          size="wide"
+          className="flex-1 basis-1/3 font-normal"
+          blocked={!canMisTap || misTapped}
+          onClick={onMisTap}
+        >
+          {todayText.misTap}
+        </Button>
         <div ref={goOn} className="flex flex-1 basis-2/3">
           <Button size="wide" onClick={onGoOn}>
             {todayText.goOn}

@@ -5,7 +5,7 @@ import { caseStateName, dueDay, recall } from '#shared/memory/index.ts';
 import { calibrated } from '#shared/standing/index.ts';
 import { casePicture } from '../catalogue/case-picture.ts';
 import { isoDate } from '../standing/local-date.ts';
-import type { DayCard } from '../training/cards.ts';
+import { type DayCard, tellingDay } from '../training/cards.ts';
 import type { MemberDay } from '../training/member-day.ts';
 
 type LastOutcome = NonNullable<MyCase['lastOutcome']>;
@@ -19,6 +19,7 @@ export function presentCase(
 ): MyCase {
   const { trained, case: c, memory, wanted, slipsBelow } = card;
   const { entry, set, content } = trained;
+  const told = memory ? tellingDay(day.day, memory) : day.day;
   const edition = content.cases.get(c.key);
   const algorithm = edition?.algorithms[0]?.algorithm;
   return {
@@ -31,8 +32,8 @@ export function presentCase(
     algorithm: algorithm ?? '',
     prior: { weight: c.weight, total: set.states },
     angles: c.angles,
-    state: caseStateName(memory, day.day, slipsBelow),
-    recall: memory ? calibrated(recall(memory, day.day), shift) : null,
+    state: caseStateName(memory, told, slipsBelow),
+    recall: memory ? calibrated(recall(memory, told), shift) : null,
     nextDate: memory ? isoDate(Math.max(day.day, dueDay(memory, wanted))) : null,
     answers: memory?.answers ?? 0,
     lastOutcome,

@@ -4,7 +4,7 @@ import { asMember, type Ctx } from '../context.ts';
 import { groupBy } from '../group-by.ts';
 import { isoDate } from '../standing/local-date.ts';
 import { type DayFigure, dayFigures, presentFigure } from '../standing/read-figures.ts';
-import { cardsOf } from '../training/cards.ts';
+import { cardsOf, tellingDay } from '../training/cards.ts';
 import { readMemberDay } from '../training/member-day.ts';
 import { figuresNow } from './figures-now.ts';
 
@@ -31,7 +31,13 @@ export async function readForm(ctx: Ctx): Promise<FormView> {
       sets: day.sets.map(({ entry, content }) => {
         const states = { unmet: 0, settling: 0, holding: 0, slipping: 0 };
         for (const card of cardsOfSet.get(entry.setKey) ?? []) {
-          states[caseStateName(card.memory, day.day, card.slipsBelow)] += 1;
+          states[
+            caseStateName(
+              card.memory,
+              card.memory ? tellingDay(day.day, card.memory) : day.day,
+              card.slipsBelow,
+            )
+          ] += 1;
         }
         return {
           setKey: entry.setKey,

@@ -1,6 +1,14 @@
 import type { CaseOfSet } from '#shared/lastlayer/index.ts';
-import { DEFAULT_BETA, type QueueCard, wantedRecall } from '#shared/memory/index.ts';
+import { type CaseMemory, DEFAULT_BETA, type QueueCard, wantedRecall } from '#shared/memory/index.ts';
 import type { MemberDay, TrainedSet } from './member-day.ts';
+
+/**
+ * The day recall is told for: today, or for a case answered today the coming one. On the day itself it is 1 whatever
+ * happened, and nobody believes that of a case they have just lost.
+ */
+export function tellingDay(day: number, memory: CaseMemory): number {
+  return Math.max(day, memory.lastDay + 1);
+}
 
 /** The member's β: solved nightly for their minutes, the model's default until then. */
 export function betaOf({ member }: MemberDay): number {

@@ -5,7 +5,7 @@ import { rebuildRollups } from '../rollups/rebuild-rollups.ts';
 import { writeDay } from '../rollups/write-day.ts';
 import type { ReviewRow } from './day-counts.ts';
 import { foldCases } from './fold-cases.ts';
-import { lastPosition, makeShowing, STEP } from './issue-showings.ts';
+import { COSTS, lastPosition, makeShowing, STEP } from './issue-showings.ts';
 import type { TrainingDay } from './training-day.ts';
 
 /** A missed case comes back after this many others, at most twice a day. */
@@ -75,7 +75,14 @@ async function bringBack(
     // Several that come back at the same place keep their order.
     const position = after + 10 * (rows.length + 1);
     end = Math.max(end, position);
-    rows.push(makeShowing(ctx, day, trained, row.caseKey, 'retest', position));
+    rows.push(
+      makeShowing(ctx, day, trained, {
+        caseKey: row.caseKey,
+        reason: 'retest',
+        plannedSeconds: COSTS.retest,
+        position,
+      }),
+    );
     returning.add(row.caseKey);
   }
   if (rows.length > 0) {

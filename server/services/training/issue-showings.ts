@@ -5,7 +5,6 @@ import { DEFAULT_COSTS, newCaseCap, planQueue, type QueueItem } from '#shared/me
 import type { Ctx } from '../context.ts';
 import { newId } from '../new-id.ts';
 import { betaOf, cardsOf, type DayCard } from './cards.ts';
-import { spentMs } from './day-counts.ts';
 import { gridOf, gridsOf } from './grid.ts';
 import type { TrainedSet } from './member-day.ts';
 import type { ShowingRow, TrainingDay } from './training-day.ts';
@@ -28,8 +27,6 @@ export interface DayPlan {
 /** What the rest of the member's minutes go to, given the day's answers and the showings already issued. */
 export function planRest(day: TrainingDay): DayPlan {
   const cards = cardsOf(day);
-  const spentSeconds = day.answers.reduce((sum, a) => sum + spentMs(a), 0) / 1000;
-  const returning = day.open.filter((s) => s.reason === 'retest').length * COSTS.retest;
   const metToday = cards.filter((card) => card.memory?.firstDay === day.day).length;
   const seconds = day.member.minutesPerDay * 60;
   const issued = new Set(day.open.map((s) => s.caseKey));
@@ -38,11 +35,22 @@ export function planRest(day: TrainingDay): DayPlan {
     cards,
     day: day.day,
     beta: betaOf(day),
-    seconds: Math.max(0, seconds - spentSeconds - returning),
+    seconds: Math.max(0, seconds - secondsUsed(day)),
     newCap: Math.max(0, newCaseCap(seconds, COSTS) - metToday),
     costs: COSTS,
   }).filter(({ key }) => !issued.has(key));
   return { cards, queue };
+}
+
+/**
+ * What the day's answers were reckoned to take. Not what they took: quick answers would bring new showings, and the
+ * end of the sitting would move away from those who do well. Returns of missed cases come on top of the minutes.
+ */
+function secondsUsed(day: TrainingDay): number {
+  return day.answers.reduce((sum, answer) => {
+    const showing = day.answered.get(answer.showingId);
+    return answer.scored && showing && showing.reason !== 'retest' ? sum + showing.plannedSeconds : sum;
+  }, 0);
 }
 
 /** Issues the next showings of the plan, up to what is kept ahead; says how many. */
@@ -56,11 +64,13 @@ export async function issueShowings(
   if (wanted.length === 0) return 0;
   const byKey = new Map(plan.cards.map((card) => [card.key, card]));
   let position = await lastPosition(tx, day);
-  const rows = wanted.flatMap(({ key, kind }) => {
+  const rows = wanted.flatMap(({ key, kind, seconds }) => {
     const card = byKey.get(key);
     if (!card) return [];
     position += STEP;
-    return [makeShowing(ctx, day, card.trained, key, kind, position)];
+    return [
+      makeShowing(ctx, day, card.trained, { caseKey: key, reason: kind, plannedSeconds: seconds, position }),
+    ];
   });
   day.open.push(...(await tx.insert(tables.showing).values(rows).returning()));
   day.open.sort((a, b) => a.position - b.position);
@@ -88,9 +98,12 @@ export function makeShowing(
   ctx: Ctx,
   day: TrainingDay,
   trained: TrainedSet,
-  caseKey: string,
-  reason: ShowingRow['reason'],
-  position: number,
+  {
+    caseKey,
+    reason,
+    plannedSeconds,
+    position,
+  }: Pick<ShowingRow, 'caseKey' | 'reason' | 'plannedSeconds' | 'position'>,
 ): typeof tables.showing.$inferInsert {
   const { entry, set, content } = trained;
   const c = set.byKey(caseKey);
@@ -112,6 +125,7 @@ export function makeShowing(
     asksAuf: entry.asksAuf,
     reason,
     localDay: day.day,
+    plannedSeconds,
     position,
     issuedAt: new Date(now),
   };

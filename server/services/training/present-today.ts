@@ -5,7 +5,7 @@ import { stickersOf } from '#shared/lastlayer/pictures/index.ts';
 import type { Ctx } from '../context.ts';
 import { isoDate } from '../standing/local-date.ts';
 import { gridsOf } from './grid.ts';
-import { COSTS, type DayPlan, issueShowings, planRest } from './issue-showings.ts';
+import { type DayPlan, issueShowings, planRest } from './issue-showings.ts';
 import { summariseDay } from './summarise-day.ts';
 import type { ShowingRow, TrainingDay } from './training-day.ts';
 
@@ -50,7 +50,7 @@ function presentShowing(row: ShowingRow): Showing {
 }
 
 function secondsOf(open: readonly ShowingRow[], plan: DayPlan, waiting: number): number {
-  const issued = open.reduce((sum, s) => sum + (s.reason === 'new' ? COSTS.fresh : COSTS.held), 0);
+  const issued = open.reduce((sum, s) => sum + s.plannedSeconds, 0);
   const later = waiting > 0 ? plan.queue.slice(-waiting) : [];
   return issued + later.reduce((sum, card) => sum + card.seconds, 0);
 }

@@ -7,7 +7,7 @@ import { findingsText } from '#shared/text/findings.ts';
 import { todayWords } from '#shared/text/today-words.ts';
 import { readEditionContent } from '../catalogue/read-edition.ts';
 import { isoDate } from '../standing/local-date.ts';
-import { betaOf, cardsOf, type DayCard } from './cards.ts';
+import { betaOf, cardsOf, type DayCard, tellingDay } from './cards.ts';
 import type { ReviewRow } from './day-counts.ts';
 import { algorithmShown } from './grade-showing.ts';
 import type { TrainingDay } from './training-day.ts';
@@ -80,6 +80,6 @@ async function presentVerdict(
     differsAt: difference ? findingsText.differs(difference, name, namedName) : null,
     lostBy: row.lostBy,
     back: { thisSitting: returns, date: memory ? isoDate(dueDay(memory, wanted)) : null },
-    state: caseStateName(memory, day.day, card?.slipsBelow ?? wanted),
+    state: caseStateName(memory, memory ? tellingDay(day.day, memory) : day.day, card?.slipsBelow ?? wanted),
   };
 }

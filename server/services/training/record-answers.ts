@@ -167,6 +167,7 @@ async function storeAnswers(tx: Transaction, day: TrainingDay, fresh: Sorted['fr
     throw new Problem('conflict', 'This showing was answered meanwhile. Try again.');
   }
   const answered = new Set(rows.map((row) => row.showingId));
+  for (const s of day.open) if (answered.has(s.showingId)) day.answered.set(s.showingId, s);
   const left = day.open.filter((s) => !answered.has(s.showingId));
   day.open.splice(0, day.open.length, ...left);
   return rows;

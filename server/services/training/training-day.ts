@@ -1,4 +1,4 @@
-import { and, asc, eq, inArray, isNull } from 'drizzle-orm';
+import { and, asc, eq } from 'drizzle-orm';
 import { type Transaction, tables } from '#database/client.ts';
 import type { ClubActor, Ctx } from '../context.ts';
 import { answersOfDay, misTapsOfDay, type ReviewRow } from './day-counts.ts';
@@ -14,40 +14,39 @@ export interface TrainingDay extends MemberDay {
   readonly misTaps: Set<string>;
   /** Showings issued and not yet answered, in the order they are to be shown. */
   readonly open: ShowingRow[];
+  /** The day's showings that have been answered, by id. */
+  readonly answered: Map<string, ShowingRow>;
 }
 
 /** Reads a member's training day and holds their membership row until the transaction ends. */
 export async function readTrainingDay(ctx: Ctx, tx: Transaction, actor: ClubActor): Promise<TrainingDay> {
   const day = await readMemberDay(ctx, tx, actor, { hold: true });
+  const showings = await showingsOfDay(tx, day);
   return {
     ...day,
     answers: await answersOfDay(tx, actor, day.day),
     misTaps: await misTapsOfDay(tx, actor, day.day),
-    open: await openShowings(tx, day),
+    open: openOnes(day, showings),
+    answered: new Map(showings.filter((s) => s.reviewId !== null).map((s) => [s.showingId, s])),
   };
 }
 
-async function openShowings(tx: Transaction, { actor, day, sets }: MemberDay): Promise<ShowingRow[]> {
+async function showingsOfDay(tx: Transaction, { actor, day }: MemberDay): Promise<ShowingRow[]> {
   const { showing } = tables;
-  if (sets.length === 0) return [];
-  const rows = await tx
+  return tx
     .select()
     .from(showing)
     .where(
-      and(
-        eq(showing.clubId, actor.clubId),
-        eq(showing.memberId, actor.memberId),
-        eq(showing.localDay, day),
-        isNull(showing.reviewId),
-        inArray(
-          showing.setKey,
-          sets.map(({ entry }) => entry.setKey),
-        ),
-      ),
+      and(eq(showing.clubId, actor.clubId), eq(showing.memberId, actor.memberId), eq(showing.localDay, day)),
     )
     .orderBy(asc(showing.position));
-  // An edition published since may have dropped the case, or the club may have pinned another one.
-  return rows.filter((row) =>
-    sets.some((s) => s.entry.setKey === row.setKey && s.content.cases.has(row.caseKey)),
+}
+
+/** Those still to be answered. An edition published since may have dropped the case, or the club the whole set. */
+function openOnes({ sets }: MemberDay, showings: readonly ShowingRow[]): ShowingRow[] {
+  return showings.filter(
+    (row) =>
+      row.reviewId === null &&
+      sets.some((s) => s.entry.setKey === row.setKey && s.content.cases.has(row.caseKey)),
   );
 }
