@@ -137,7 +137,7 @@ export const deskText = {
       left: 'left',
     },
     misTap: 'mis-tap',
-    seconds: (ms: number) => seconds(ms, 1),
+    seconds: (ms: number) => seconds(ms, 2),
   },
 
   standings: {
@@ -161,8 +161,8 @@ export const deskText = {
     isMe: 'you',
     notOptedIn: (people: number) =>
       people === 1
-        ? '1 more answers for this set and has not opted in.'
-        : `${people} more answer for this set and have not opted in.`,
+        ? 'One other member answers for this set and has not opted in.'
+        : `${people} other members answer for this set and have not opted in.`,
     optInHow: 'Each member decides that under Club.',
     allOptedIn: 'Everyone who answers for this set has opted in.',
     empty: 'Nobody is on this board yet',
@@ -221,7 +221,8 @@ export const deskText = {
       edition === null ? 'Follow the newest' : `Follow the newest, now ${edition}`,
     pinTo: (edition: number) => `Stay on edition ${edition}`,
     limitField: 'Limit, in seconds',
-    limitHint: 'Recognition up to this is held; later is late. From 0.5 to 60.',
+    limitHint:
+      'A recognition time up to the limit is held; later is late. From 0.5 to 60. Figures go on resting on what was answered under the old limit until new answers come.',
     aufField: 'AUF before',
     aufAsk: 'Ask for it',
     aufNot: 'Do not ask',

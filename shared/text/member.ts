@@ -100,7 +100,7 @@ export const memberText = {
     as: (named: string) => `named ${named}`,
     notScored: 'not scored',
     misTap: 'mis-tap',
-    seconds: (ms: number) => `${(ms / 1000).toFixed(1)} s`,
+    seconds: (ms: number) => `${(ms / 1000).toFixed(2)} s`,
     missing: 'There is no such case on your programme.',
   },
 

@@ -44,7 +44,7 @@ it('sees a member’s figures move with twenty answers', async () => {
   await board.getByRole('rowheader', { name: 'Tobi' }).waitFor();
   // Joss has not opted in: on no board, though the captain sees the figures at the desk.
   expect(await board.getByText('Joss').count()).toBe(0);
-  await page.getByText(/1 more answers for this set and has not opted in/).waitFor();
+  await page.getByText(/One other member answers for this set and has not opted in/).waitFor();
   await page.getByText('Quayside board, PLL').waitFor();
 });
 

@@ -12,10 +12,13 @@ export function reportCsv(lines: readonly DraftLine[]): string {
       line.line,
       line.caseName,
       line.algorithm,
+      line.group,
       line.solves,
       line.finding,
       line.column,
-      [line.says, line.hint].filter(Boolean).join('; '),
+      line.decision === 'take'
+        ? text.taken(line.solves ?? '')
+        : [line.says, line.hint].filter(Boolean).join('; '),
       text.standings[line.standing],
       line.note,
     ]),
