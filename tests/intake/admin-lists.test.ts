@@ -85,11 +85,13 @@ describe('the report', () => {
     const csv = reportCsv([
       line(2),
       line(3, { caseName: '=1+1', says: 'Solves F, the file says "=1+1"', hint: '', standing: 'cannot' }),
+      line(4, { caseName: 'Ra', group: 'corners', says: 'Solves T, the file says Ra', decision: 'take' }),
     ]);
     expect(csv.split('\r\n')).toEqual([
-      'line,case,algorithm,solves,finding,column,says,standing,note',
-      '2,T,R U,T,agrees,,Agrees; 4 angles,goes in,',
-      `3,'=1+1,R U,T,agrees,,"Solves F, the file says ""=1+1""",cannot go in,`,
+      'line,case,algorithm,group,solves,finding,column,says,standing,note',
+      '2,T,R U,,T,agrees,,Agrees; 4 angles,goes in,',
+      `3,'=1+1,R U,,T,agrees,,"Solves F, the file says ""=1+1""",cannot go in,`,
+      '4,Ra,R U,corners,T,agrees,,Taken as T,goes in,',
       '',
     ]);
   });
