@@ -26,16 +26,26 @@ async function overflow(page: Page): Promise<string[]> {
 /** The paper of the two themes (look.md), as the browser names colours. */
 const PAPER = { light: 'rgb(244, 242, 236)', dark: 'rgb(20, 22, 27)' } as const;
 
+/** Changes the device's theme and waits until no colour is on its way any more. */
+async function inTheme(page: Page, colorScheme: keyof typeof PAPER): Promise<void> {
+  await page.emulateMedia({ colorScheme, reducedMotion: 'reduce' });
+  await page.waitForFunction(
+    (paper) => getComputedStyle(document.documentElement).backgroundColor === paper,
+    PAPER[colorScheme],
+  );
+  await page.evaluate(async () => {
+    const transitions = document.getAnimations().filter((one) => one instanceof CSSTransition);
+    // One that is cancelled is over too.
+    await Promise.allSettled(transitions.map((one) => one.finished));
+  });
+}
+
 /** Looks at a page as it stands in both themes and all sizes. */
 export async function expectSound(page: Page): Promise<void> {
   for (const size of SIZES) {
     await page.setViewportSize(size);
     for (const colorScheme of ['light', 'dark'] as const) {
-      await page.emulateMedia({ colorScheme, reducedMotion: 'reduce' });
-      await page.waitForFunction(
-        (paper) => getComputedStyle(document.documentElement).backgroundColor === paper,
-        PAPER[colorScheme],
-      );
+      await inTheme(page, colorScheme);
       const faults = await accessibilityFaults(page, colorScheme === 'light' ? 'all' : 'colours');
       expect(faults, `${page.url()}, ${colorScheme}, ${size.width} px wide`).toEqual([]);
     }
