@@ -1,7 +1,7 @@
 import type { Page } from 'playwright-core';
 import { expect, it } from 'vitest';
 import { longLimits, memberOf } from './support/members.ts';
-import { openPage } from './support/open-page.ts';
+import { openPage, takenOver } from './support/open-page.ts';
 import { accountOf, LAPTOP, useSite } from './support/site.ts';
 import { Trainee } from './support/trainee.ts';
 
@@ -39,6 +39,8 @@ it('signs in, trains five showings and takes a mis-tap back without a pointer', 
   await page.keyboard.press('Enter');
   const begin = page.getByRole('button', { name: /^Begin / });
   await begin.waitFor();
+  // The way from the desk is a new document: what the server sent is there before its scripts are.
+  await takenOver(page);
   const trainee = new Trainee(site, page, 'keyboard');
   await trainee.readQueue();
   await page.keyboard.press('Space');
