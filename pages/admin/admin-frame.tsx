@@ -1,3 +1,4 @@
+import type { ComponentType } from 'react';
 import type { FrameProps } from '#renderer/area.tsx';
 import { AreaLink } from '#renderer/area-link.tsx';
 import type { AppLinkProps } from '#renderer/ui/index.ts';
@@ -5,7 +6,7 @@ import { WideFrame } from '#renderer/wide-frame.tsx';
 import { shellText } from '#shared/text/shell.ts';
 
 const PLACES = [
-  { href: '/admin/catalogue', label: shellText.places.catalogue },
+  { href: '/catalogue', label: shellText.places.catalogue },
   { href: '/admin/intake', label: shellText.places.intake },
 ] as const;
 const INSIDE = /^(\/admin(\/|\?|$)|\?)/;
@@ -14,7 +15,10 @@ function AdminLink(props: AppLinkProps) {
   return <AreaLink inside={INSIDE} {...props} />;
 }
 
-/** The administrator's bar and content. */
-export function AdminFrame(props: FrameProps) {
-  return <WideFrame home="/admin/intake" places={PLACES} link={AdminLink} {...props} />;
+/** The administrator's bar and content; `link` where another area shows them. */
+export function AdminFrame({
+  link = AdminLink,
+  ...props
+}: FrameProps & { link?: ComponentType<AppLinkProps> }) {
+  return <WideFrame home="/admin/intake" places={PLACES} link={link} {...props} />;
 }

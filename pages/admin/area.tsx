@@ -1,11 +1,8 @@
 import type { Area, AreaRoute } from '#renderer/area.tsx';
 import { call } from '#shared/contracts/endpoint.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
-import { adminText } from '#shared/text/admin.ts';
 import { intakeText } from '#shared/text/intake.ts';
 import { AdminFrame } from './admin-frame.tsx';
-import { CataloguePage } from './catalogue/catalogue-page.tsx';
-import { EditionPage } from './catalogue/edition-page.tsx';
 import { DraftPage } from './intake/draft-page.tsx';
 import { IntakePage } from './intake/intake-page.tsx';
 
@@ -23,18 +20,6 @@ const routes: readonly AreaRoute[] = [
     title: intakeText.list.title,
     Page: DraftPage,
     calls: ({ draftId = '' }) => [call(endpoints.draft, { draftId })],
-  },
-  {
-    path: '/admin/catalogue',
-    title: adminText.catalogue.title,
-    Page: CataloguePage,
-    calls: () => [call(endpoints.catalogue, {})],
-  },
-  {
-    path: '/admin/catalogue/:setKey/:number',
-    title: adminText.catalogue.title,
-    Page: EditionPage,
-    calls: ({ setKey = '', number = '' }) => [call(endpoints.edition, { setKey, number: Number(number) })],
   },
 ];
 

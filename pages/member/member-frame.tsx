@@ -1,3 +1,4 @@
+import type { ComponentType } from 'react';
 import { useLocation } from 'react-router';
 import type { FrameProps } from '#renderer/area.tsx';
 import { AreaLink } from '#renderer/area-link.tsx';
@@ -17,6 +18,7 @@ const PLACES = [
 ];
 
 const INSIDE = /^\/(today|cases|form|club)(\/|\?|$)/;
+const CATALOGUE = { href: '/catalogue', label: shellText.places.catalogue };
 const DESK = { href: '/desk/squad', label: memberText.club.toDesk };
 
 function MemberLink(props: AppLinkProps) {
@@ -24,13 +26,22 @@ function MemberLink(props: AppLinkProps) {
 }
 
 /** The member's places under the thumb on a phone, in a bar on top where there is room. */
-export function MemberFrame({ titleOf, children }: FrameProps) {
+export function MemberFrame({
+  titleOf,
+  children,
+  link = MemberLink,
+}: FrameProps & {
+  /** Where another area shows the bars. */
+  link?: ComponentType<AppLinkProps>;
+}) {
   const { pathname } = useLocation();
   const session = useSession();
   const content = useMoved(titleOf);
   const items = markCurrent(PLACES, pathname);
+  const [catalogue] = markCurrent([CATALOGUE], pathname);
+  const inBar = [...items, ...(catalogue ? [catalogue] : []), ...(session.role === 'captain' ? [DESK] : [])];
   return (
-    <LinkProvider link={MemberLink}>
+    <LinkProvider link={link}>
       <div className="flex min-h-dvh flex-col">
         <div className="hidden lg:block">
           <TopBar
@@ -38,7 +49,7 @@ export function MemberFrame({ titleOf, children }: FrameProps) {
             homeHref="/today"
             navigationLabel={shellText.navigation}
             skipLabel={shellText.skipToContent}
-            items={session.role === 'captain' ? [...items, DESK] : items}
+            items={inBar}
             aside={
               <>
                 <span>

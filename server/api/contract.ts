@@ -1,5 +1,6 @@
 import type { EndpointName } from '#shared/contracts/endpoints.ts';
 import { adminRows } from './admin/rows.ts';
+import { catalogueRows } from './catalogue/rows.ts';
 import { deskRows } from './desk/rows.ts';
 import { memberRows } from './member/rows.ts';
 import type { AnyRow } from './row.ts';
@@ -16,4 +17,5 @@ export const contract: Record<Exclude<EndpointName, CookieEndpoint>, AnyRow> = {
   ...todayRows,
   ...memberRows,
   ...adminRows,
+  ...catalogueRows,
 };

@@ -123,3 +123,16 @@ export async function asAdministrator<T>(
     return work(tx, { accountId: claims.accountId });
   });
 }
+
+/**
+ * Runs `work` in one transaction as whoever is signed in: a person in their club, who sees that club and what
+ * belongs to everyone, or an administrator, for whom the actor is null.
+ * @throws Problem signed-out.
+ */
+export async function asSignedIn<T>(
+  ctx: Ctx,
+  work: (tx: Transaction, actor: ClubActor | null) => Promise<T>,
+): Promise<T> {
+  if (ctx.claims?.role === 'administrator') return asAdministrator(ctx, (tx) => work(tx, null));
+  return asMember(ctx, work);
+}

@@ -1,3 +1,4 @@
+import type { CatalogueView, EditionView } from './catalogue.ts';
 import type {
   AssignSetInput,
   MemberPageView,
@@ -8,10 +9,8 @@ import type {
 } from './desk.ts';
 import { endpoint } from './endpoint.ts';
 import type {
-  CatalogueView,
   DiscardInput,
   DraftView,
-  EditionView,
   IntakeView,
   PublishInput,
   SettleLineInput,
@@ -70,11 +69,12 @@ export const endpoints = {
     '/api/admin/intake/:draftId/publish',
   ),
   discard: endpoint<DiscardInput, IntakeView>('discard', 'POST', '/api/admin/intake/:draftId/discard'),
-  catalogue: endpoint<Nothing, CatalogueView>('catalogue', 'GET', '/api/admin/catalogue'),
+
+  catalogue: endpoint<Nothing, CatalogueView>('catalogue', 'GET', '/api/catalogue'),
   edition: endpoint<{ setKey: string; number: number }, EditionView>(
     'edition',
     'GET',
-    '/api/admin/catalogue/:setKey/:number',
+    '/api/catalogue/sets/:setKey/editions/:number',
   ),
 } as const;
 

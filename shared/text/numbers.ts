@@ -7,6 +7,9 @@ export const numberText = {
   /** Milliseconds in seconds: `3 s`, `2.5 s`; with `digits`, always so many. */
   seconds: (ms: number, digits?: number) =>
     `${digits === undefined ? Number((ms / 1000).toFixed(2)) : (ms / 1000).toFixed(digits)} s`,
+  /** A prior as one in how many: whole where it is, else with two decimals at most. */
+  oneIn: ({ weight, total }: { readonly weight: number; readonly total: number }) =>
+    `1 in ${(total / weight).toLocaleString('en-GB', { maximumFractionDigits: 2 })}`,
   count: (n: number, one: string, many: string) => `${n} ${n === 1 ? one : many}`,
   /** A change with its sign: `+2`, `−6`, `0`. */
   points: (n: number) => {

@@ -29,6 +29,13 @@ export const shellText = {
   couldNotLoad: 'This could not be loaded.',
   offline: 'No connection. What you see may be old.',
   navigation: 'Places',
+  sortBy: 'sort by',
+  pages: {
+    label: 'Pages',
+    at: (page: number, of: number) => `Page ${page} of ${of}`,
+    previous: 'Previous',
+    next: 'Next',
+  },
 } as const;
 
 /** The sentences of a page that is not there, not yours, or broken. */

@@ -1,5 +1,5 @@
 import { expect, it } from 'vitest';
-import type { CatalogueView, EditionView } from '#shared/contracts/intake.ts';
+import type { CatalogueView, EditionView } from '#shared/contracts/catalogue.ts';
 import { useApi } from '#tests/support/api.ts';
 import { intakeSteps } from '#tests/support/intake.ts';
 
@@ -8,7 +8,7 @@ const { upload, read, publish } = intakeSteps(api);
 
 it('lists every set with what it is and its editions', async () => {
   const admin = await api.factory.administrator();
-  const res = await api.as(admin.claims).get('/api/admin/catalogue');
+  const res = await api.as(admin.claims).get('/api/catalogue');
   expect(res.status).toBe(200);
   const { sets } = res.body as CatalogueView;
   expect(sets.map(({ name }) => name).slice(0, 3)).toEqual(['OLL', 'PLL', 'OCLL']);
@@ -35,7 +35,7 @@ it('lists every set with what it is and its editions', async () => {
 
 it('shows the cases of an edition by name, with priors that add up', async () => {
   const admin = await api.factory.administrator();
-  const res = await api.as(admin.claims).get('/api/admin/catalogue/oll/1');
+  const res = await api.as(admin.claims).get('/api/catalogue/sets/oll/editions/1');
   expect(res.status).toBe(200);
   const view = res.body as EditionView;
   expect(view).toMatchObject({ setKey: 'oll', setName: 'OLL', number: 1, numbers: [1], missing: [] });
@@ -52,10 +52,10 @@ it('shows the cases of an edition by name, with priors that add up', async () =>
 it('knows no edition that was never published', async () => {
   const admin = await api.factory.administrator();
   const as = api.as(admin.claims);
-  expect((await as.get('/api/admin/catalogue/oll/99')).status).toBe(404);
-  expect((await as.get('/api/admin/catalogue/no-such-set/1')).status).toBe(404);
-  expect((await as.get('/api/admin/catalogue/oll/0')).status).toBe(400);
-  expect((await as.get('/api/admin/catalogue/oll/one')).status).toBe(400);
+  expect((await as.get('/api/catalogue/sets/oll/editions/99')).status).toBe(404);
+  expect((await as.get('/api/catalogue/sets/no-such-set/editions/1')).status).toBe(404);
+  expect((await as.get('/api/catalogue/sets/oll/editions/0')).status).toBe(400);
+  expect((await as.get('/api/catalogue/sets/oll/editions/one')).status).toBe(400);
 });
 
 it('counts editions as they are published, newest first', async () => {
@@ -66,7 +66,7 @@ it('counts editions as they are published, newest first', async () => {
   const again = await upload(admin, "case,algorithm\nAntisune,R U2 R' U' R U' R'\n", { setKey: 'ocll' });
   const second = await read(admin, (again.body as { draftId: string }).draftId);
   expect((await publish(admin, second, { note: 'Antisune too.' })).status).toBe(200);
-  const { sets } = (await api.as(admin.claims).get('/api/admin/catalogue')).body as CatalogueView;
+  const { sets } = (await api.as(admin.claims).get('/api/catalogue')).body as CatalogueView;
   expect(
     sets
       .find(({ setKey }) => setKey === 'ocll')

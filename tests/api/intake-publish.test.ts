@@ -1,7 +1,8 @@
 import { readFileSync } from 'node:fs';
 import { fileURLToPath } from 'node:url';
 import { describe, expect, it } from 'vitest';
-import type { DraftView, EditionView } from '#shared/contracts/intake.ts';
+import type { EditionView } from '#shared/contracts/catalogue.ts';
+import type { DraftView } from '#shared/contracts/intake.ts';
 import { useApi } from '#tests/support/api.ts';
 import { intakeSteps, KNOWN } from '#tests/support/intake.ts';
 
@@ -11,7 +12,7 @@ const { upload, read, draftOf, settle, publish } = intakeSteps(api);
 type Administrator = Awaited<ReturnType<typeof api.factory.administrator>>;
 
 async function edition(who: Administrator, setKey: string, number: number): Promise<EditionView> {
-  const res = await api.as(who.claims).get(`/api/admin/catalogue/${setKey}/${number}`);
+  const res = await api.as(who.claims).get(`/api/catalogue/sets/${setKey}/editions/${number}`);
   expect(res.status).toBe(200);
   return res.body as EditionView;
 }

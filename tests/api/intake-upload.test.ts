@@ -204,8 +204,6 @@ describe('who may', () => {
     ['patch', `/api/admin/intake/${id}/lines/2`, { version: 1, decision: 'drop' }],
     ['post', `/api/admin/intake/${id}/publish`, { version: 1, note: '' }],
     ['post', `/api/admin/intake/${id}/discard`, { version: 1 }],
-    ['get', '/api/admin/catalogue'],
-    ['get', '/api/admin/catalogue/pll/1'],
   ];
 
   it.each(requests)('%s %s: administrators only', async (method, path, body) => {

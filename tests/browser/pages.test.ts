@@ -32,8 +32,8 @@ const PAGES: readonly PageOfOurs[] = [
   { name: 'Programme', who: 'ines', path: '/desk/programme', heading: 'Programme' },
   { name: 'Intake', who: 'desk', path: '/admin/intake', heading: 'Intake' },
   { name: 'a draft', who: 'desk', path: aDraft, heading: 'faults.csv' },
-  { name: 'Catalogue', who: 'desk', path: '/admin/catalogue', heading: 'Catalogue' },
-  { name: 'an edition', who: 'desk', path: '/admin/catalogue/oll/1', heading: 'OLL, edition 1' },
+  { name: 'Catalogue', who: 'desk', path: '/catalogue', heading: 'Catalogue' },
+  { name: 'an edition', who: 'desk', path: '/catalogue/oll/editions/1', heading: 'OLL, edition 1' },
 ];
 
 async function aCase({ sql }: Site): Promise<string> {

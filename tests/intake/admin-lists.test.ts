@@ -1,19 +1,20 @@
 import { describe, expect, it } from 'vitest';
-import { editionCsv } from '#pages/admin/catalogue/edition-csv.ts';
+import { wrongPart } from '#pages/admin/intake/line-edit.tsx';
+import { isShown, SHOWS, showFrom } from '#pages/admin/intake/line-filter.ts';
+import { reportCsv } from '#pages/admin/intake/report-csv.ts';
+import { editionCsv } from '#pages/catalogue/edition/edition-csv.ts';
 import {
   type CaseRow,
   filterCases,
   sortCases,
   sortFrom,
   sortWord,
-} from '#pages/admin/catalogue/sort-cases.ts';
-import { wrongPart } from '#pages/admin/intake/line-edit.tsx';
-import { isShown, SHOWS, showFrom } from '#pages/admin/intake/line-filter.ts';
-import { reportCsv } from '#pages/admin/intake/report-csv.ts';
-import { pageOf } from '#pages/admin/page-links.tsx';
-import { queryHref } from '#pages/admin/query-href.ts';
+} from '#pages/catalogue/edition/sort-cases.ts';
+import { pageOf } from '#renderer/page-links.tsx';
+import { queryHref } from '#renderer/query-href.ts';
 import type { DraftLine } from '#shared/contracts/intake.ts';
-import { adminText } from '#shared/text/admin.ts';
+import { catalogueText } from '#shared/text/catalogue.ts';
+import { numberText } from '#shared/text/numbers.ts';
 
 function line(number: number, more: Partial<DraftLine> = {}): DraftLine {
   return {
@@ -146,10 +147,10 @@ describe('long lists', () => {
 });
 
 it('says priors and aspects in words', () => {
-  expect(adminText.oneIn({ weight: 16, total: 288 })).toBe('1 in 18');
+  expect(numberText.oneIn({ weight: 16, total: 288 })).toBe('1 in 18');
   // 4/27 of OCLL's states: common practice.
-  expect(adminText.oneIn({ weight: 4, total: 27 })).toBe('1 in 6.75');
-  const { aspects } = adminText.catalogue;
+  expect(numberText.oneIn({ weight: 4, total: 27 })).toBe('1 in 6.75');
+  const { aspects } = catalogueText.sets;
   expect(
     [['co', 'eo'], ['co', 'cp'], ['co', 'eo', 'cp'], ['co', 'eo', 'cp', 'ep'], ['ep']].map(aspects),
   ).toEqual([

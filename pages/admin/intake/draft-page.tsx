@@ -1,12 +1,12 @@
 import { useLocation, useParams, useSearchParams } from 'react-router';
 import { useCall } from '#renderer/api.ts';
 import { Awaited } from '#renderer/awaited.tsx';
+import { PageLinks, pageOf } from '#renderer/page-links.tsx';
+import { queryHref } from '#renderer/query-href.ts';
 import { Notice, TextLink } from '#renderer/ui/index.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import type { DraftView } from '#shared/contracts/intake.ts';
 import { intakeText } from '#shared/text/intake.ts';
-import { PageLinks, pageOf } from '../page-links.tsx';
-import { queryHref } from '../query-href.ts';
 import { DraftKeys } from './draft-keys.tsx';
 import { DraftNumbers } from './draft-numbers.tsx';
 import { FilterLinks } from './filter-links.tsx';
@@ -97,7 +97,7 @@ function Notices({ view: { draft }, steps }: { view: DraftView; steps: DraftStep
       )}
       {draft.editionNumber !== null && (
         <Notice title={text.publishedNotice(draft.setName, draft.editionNumber)} live>
-          <TextLink href={`/admin/catalogue/${draft.setKey}/${draft.editionNumber}`}>
+          <TextLink href={`/catalogue/${draft.setKey}/editions/${draft.editionNumber}`}>
             {text.openEdition}
           </TextLink>
         </Notice>

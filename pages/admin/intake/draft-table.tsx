@@ -1,8 +1,8 @@
+import { Instant } from '#renderer/instant.tsx';
+import { type LedgerColumn, LedgerTable } from '#renderer/ledger-table.tsx';
 import { AppLink, TextLink } from '#renderer/ui/index.ts';
 import type { IntakeView } from '#shared/contracts/intake.ts';
 import { intakeText } from '#shared/text/intake.ts';
-import { Instant } from '../instant.tsx';
-import { type LedgerColumn, LedgerTable } from '../ledger-table.tsx';
 
 type Draft = IntakeView['drafts'][number];
 const text = intakeText.list;
@@ -51,7 +51,7 @@ const OUTCOME: LedgerColumn<Draft> = {
   className: 'lg:w-40',
   cell: ({ state, setKey, editionNumber }) =>
     state === 'published' && editionNumber !== null ? (
-      <TextLink href={`/admin/catalogue/${setKey}/${editionNumber}`}>
+      <TextLink href={`/catalogue/${setKey}/editions/${editionNumber}`}>
         {text.published(editionNumber)}
       </TextLink>
     ) : (

@@ -1,9 +1,9 @@
 import { type FormEvent, useState } from 'react';
+import { type LedgerColumn, LedgerTable } from '#renderer/ledger-table.tsx';
 import { AlgorithmText, FlatView } from '#renderer/ui/index.ts';
 import type { DraftLine } from '#shared/contracts/intake.ts';
-import { adminText } from '#shared/text/admin.ts';
 import { intakeText } from '#shared/text/intake.ts';
-import { type LedgerColumn, LedgerTable } from '../ledger-table.tsx';
+import { numberText } from '#shared/text/numbers.ts';
 import { AlgorithmInput, CaseInput, formOf, type LineEdit, wrongPart } from './line-edit.tsx';
 import { EditKeys, LineFinding } from './line-finding.tsx';
 import type { DraftSteps, Step } from './use-draft-steps.ts';
@@ -82,7 +82,7 @@ export function LineTable({
           <>
             <span className="break-words">{line.caseName || text.none}</span>
             {line.prior && (
-              <span className="ps-3 font-normal text-ink-2 lg:hidden">{adminText.oneIn(line.prior)}</span>
+              <span className="ps-3 font-normal text-ink-2 lg:hidden">{numberText.oneIn(line.prior)}</span>
             )}
           </>
         );
@@ -117,7 +117,7 @@ export function LineTable({
       header: text.columns.prior,
       className: 'lg:w-26 whitespace-nowrap',
       stacked: 'hidden lg:table-cell',
-      cell: ({ prior }) => prior && adminText.oneIn(prior),
+      cell: ({ prior }) => prior && numberText.oneIn(prior),
     },
     {
       key: 'finding',

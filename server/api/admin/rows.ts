@@ -1,11 +1,8 @@
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import {
-  catalogueView,
   discardInput,
   draftInput,
   draftView,
-  editionInput,
-  editionView,
   intakeView,
   publishInput,
   publishResult,
@@ -13,8 +10,6 @@ import {
   uploadInput,
   uploadResult,
 } from '#shared/contracts/intake.ts';
-import { listCatalogue } from '../../services/catalogue/list-catalogue.ts';
-import { showEdition } from '../../services/catalogue/show-edition.ts';
 import { discardDraft } from '../../services/intake/discard-draft.ts';
 import { listIntake } from '../../services/intake/list-intake.ts';
 import { publishDraft } from '../../services/intake/publish-draft.ts';
@@ -24,7 +19,7 @@ import { uploadCaseFile } from '../../services/intake/upload-case-file.ts';
 import { defineRow } from '../define-row.ts';
 import { nothing } from '../session/rows.ts';
 
-/** The administrator's places: intake and catalogue. */
+/** The administrator's intake. */
 export const adminRows = {
   intake: defineRow({
     endpoint: endpoints.intake,
@@ -67,19 +62,5 @@ export const adminRows = {
     input: discardInput,
     output: intakeView,
     service: discardDraft,
-  }),
-  catalogue: defineRow({
-    endpoint: endpoints.catalogue,
-    who: 'administrator',
-    input: nothing,
-    output: catalogueView,
-    service: listCatalogue,
-  }),
-  edition: defineRow({
-    endpoint: endpoints.edition,
-    who: 'administrator',
-    input: editionInput,
-    output: editionView,
-    service: showEdition,
   }),
 };

@@ -1,8 +1,8 @@
 import { desc, sql } from 'drizzle-orm';
 import { tables } from '#database/client.ts';
-import type { CatalogueView } from '#shared/contracts/intake.ts';
+import type { CatalogueView } from '#shared/contracts/catalogue.ts';
 import { CASE_SETS } from '#shared/lastlayer/index.ts';
-import { asAdministrator, type Ctx } from '../context.ts';
+import { asSignedIn, type Ctx } from '../context.ts';
 
 type SetOfCatalogue = CatalogueView['sets'][number];
 
@@ -15,7 +15,7 @@ export function inTradeOrder(one: string, other: string): number {
 
 /** Every set with its editions, the newest first. */
 export async function listCatalogue(ctx: Ctx): Promise<CatalogueView> {
-  return asAdministrator(ctx, async (tx) => {
+  return asSignedIn(ctx, async (tx) => {
     const { caseSet, edition } = tables;
     const sets = await tx
       .select({

@@ -1,8 +1,8 @@
 import { desc, eq } from 'drizzle-orm';
 import { tables } from '#database/client.ts';
-import type { EditionView } from '#shared/contracts/intake.ts';
+import type { EditionView } from '#shared/contracts/catalogue.ts';
 import { caseSet } from '#shared/lastlayer/index.ts';
-import { asAdministrator, type Ctx } from '../context.ts';
+import { asSignedIn, type Ctx } from '../context.ts';
 import { casePicture } from './case-picture.ts';
 import { inNameOrder, readEditionContent } from './read-edition.ts';
 
@@ -11,7 +11,7 @@ export async function showEdition(
   ctx: Ctx,
   { setKey, number }: { setKey: string; number: number },
 ): Promise<EditionView> {
-  return asAdministrator(ctx, async (tx) => {
+  return asSignedIn(ctx, async (tx) => {
     const content = await readEditionContent(tx, setKey, number);
     const { edition } = tables;
     const numbers = await tx

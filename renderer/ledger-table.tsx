@@ -1,6 +1,6 @@
 import { type ReactNode, useId } from 'react';
-import { AppLink, cx, type SortDirection } from '#renderer/ui/index.ts';
-import { adminText } from '#shared/text/admin.ts';
+import { shellText } from '#shared/text/shell.ts';
+import { AppLink, cx, type SortDirection } from './ui/index.ts';
 
 export interface LedgerColumn<Row> {
   readonly key: string;
@@ -105,7 +105,7 @@ function Header<Row>({ column: { header, headerHidden, sort } }: { column: Ledge
         sort.direction !== 'none' && 'font-bold text-ink',
       )}
     >
-      <span className="sr-only">{adminText.sortBy} </span>
+      <span className="sr-only">{shellText.sortBy} </span>
       {header}
       <span aria-hidden="true" className="ps-1 text-[0.6em]">
         {ARROWS[sort.direction]}

@@ -3,18 +3,18 @@ import { useLocation, useNavigate, useParams, useSearchParams } from 'react-rout
 import { useCall } from '#renderer/api.ts';
 import { Awaited } from '#renderer/awaited.tsx';
 import { downloadCsv } from '#renderer/csv.ts';
+import { Instant } from '#renderer/instant.tsx';
+import { PageLinks, pageOf } from '#renderer/page-links.tsx';
+import { queryHref } from '#renderer/query-href.ts';
 import { AppLink, BigNumber, BigNumbers, Button, cx, TextField } from '#renderer/ui/index.ts';
+import type { EditionView } from '#shared/contracts/catalogue.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
-import type { EditionView } from '#shared/contracts/intake.ts';
-import { adminText } from '#shared/text/admin.ts';
-import { Instant } from '../instant.tsx';
-import { PageLinks, pageOf } from '../page-links.tsx';
-import { queryHref } from '../query-href.ts';
+import { catalogueText } from '#shared/text/catalogue.ts';
 import { CaseTable } from './case-table.tsx';
 import { editionCsv } from './edition-csv.ts';
 import { filterCases, sortCases, sortFrom, sortWord } from './sort-cases.ts';
 
-const text = adminText.edition;
+const text = catalogueText.edition;
 const CASES_ON_A_PAGE = 500;
 
 /** One published edition: every case with its picture, prior and algorithms. */
@@ -53,7 +53,7 @@ function EditionHead({ view }: { view: EditionView }) {
           {numbers.map((one) => (
             <AppLink
               key={one}
-              href={`/admin/catalogue/${setKey}/${one}`}
+              href={`/catalogue/${setKey}/editions/${one}`}
               aria-current={one === number ? 'page' : undefined}
               className={cx(
                 'inline-flex min-h-12 min-w-6 items-center justify-center lg:min-h-8',

@@ -10,6 +10,15 @@ const ENTRIES: Readonly<Record<string, string>> = {
   'co+eo': 'corners and edges oriented',
   corners: 'corners solved',
   'corners+eo': 'corners solved, edges oriented',
+  cp: 'corners permuted',
+  'cp+eo': 'corners permuted, edges oriented',
+  ep: 'edges permuted',
+  'co+ep': 'corners oriented, edges permuted',
+  edges: 'edges solved',
+  'co+edges': 'edges solved, corners oriented',
+  'cp+ep': 'corners and edges permuted',
+  'corners+ep': 'corners solved, edges permuted',
+  'cp+edges': 'edges solved, corners permuted',
 };
 
 /** Aspects in words: orientation before permutation, each with its pieces. */
@@ -30,22 +39,9 @@ function aspects(list: readonly string[]): string {
     .join(', ');
 }
 
-/** A prior as one in how many: whole where it is, else with two decimals at most. */
-function oneIn({ weight, total }: { weight: number; total: number }): string {
-  return `1 in ${(total / weight).toLocaleString('en-GB', { maximumFractionDigits: 2 })}`;
-}
-
-/** Words of the administrator's places other than Intake. */
-export const adminText = {
-  oneIn,
-  sortBy: 'sort by',
-  pages: {
-    label: 'Pages',
-    at: (page: number, of: number) => `Page ${page} of ${of}`,
-    previous: 'Previous',
-    next: 'Next',
-  },
-  catalogue: {
+/** Words of the Catalogue. */
+export const catalogueText = {
+  sets: {
     title: 'Catalogue',
     lead: 'Case sets, what each tells apart and solves, and the editions published of them.',
     caption: 'Case sets',

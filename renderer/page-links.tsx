@@ -1,5 +1,5 @@
-import { TextLink } from '#renderer/ui/index.ts';
-import { adminText } from '#shared/text/admin.ts';
+import { shellText } from '#shared/text/shell.ts';
+import { TextLink } from './ui/index.ts';
 
 /** The part of a long list that a page number shows; numbers outside the list mean its nearest end. */
 export function pageOf<T>(
@@ -24,16 +24,16 @@ export function PageLinks({
 }) {
   if (of === 1) return null;
   return (
-    <nav aria-label={adminText.pages.label} className="flex flex-wrap items-center gap-x-6 py-4">
-      <span className="text-ink-2">{adminText.pages.at(page, of)}</span>
+    <nav aria-label={shellText.pages.label} className="flex flex-wrap items-center gap-x-6 py-4">
+      <span className="text-ink-2">{shellText.pages.at(page, of)}</span>
       {page > 1 && (
         <TextLink href={hrefOf(page - 1)} className="inline-flex min-h-12 items-center">
-          {adminText.pages.previous}
+          {shellText.pages.previous}
         </TextLink>
       )}
       {page < of && (
         <TextLink href={hrefOf(page + 1)} className="inline-flex min-h-12 items-center">
-          {adminText.pages.next}
+          {shellText.pages.next}
         </TextLink>
       )}
     </nav>

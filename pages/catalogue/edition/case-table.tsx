@@ -1,9 +1,10 @@
+import { type LedgerColumn, LedgerTable } from '#renderer/ledger-table.tsx';
 import { AlgorithmText, FlatView } from '#renderer/ui/index.ts';
-import { adminText } from '#shared/text/admin.ts';
-import { type LedgerColumn, LedgerTable } from '../ledger-table.tsx';
+import { catalogueText } from '#shared/text/catalogue.ts';
+import { numberText } from '#shared/text/numbers.ts';
 import type { CaseRow, Sort, SortOrder } from './sort-cases.ts';
 
-const text = adminText.edition;
+const text = catalogueText.edition;
 
 /** The cases of an edition with all their algorithms, the one shown first on top. */
 export function CaseTable({
@@ -60,7 +61,7 @@ export function CaseTable({
       sort: sort('prior'),
       className: 'lg:w-28 whitespace-nowrap',
       stacked: 'col-start-2 row-start-2 text-ink-2 lg:text-ink',
-      cell: ({ prior }) => adminText.oneIn(prior),
+      cell: ({ prior }) => numberText.oneIn(prior),
     },
     {
       key: 'angles',

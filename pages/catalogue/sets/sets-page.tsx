@@ -1,14 +1,15 @@
 import { useCall } from '#renderer/api.ts';
 import { Awaited } from '#renderer/awaited.tsx';
+import { Instant } from '#renderer/instant.tsx';
+import { type LedgerColumn, LedgerTable } from '#renderer/ledger-table.tsx';
+import { useSession } from '#renderer/session.tsx';
 import { LinkButton, PageTitle, TextLink } from '#renderer/ui/index.ts';
+import type { CatalogueView } from '#shared/contracts/catalogue.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
-import type { CatalogueView } from '#shared/contracts/intake.ts';
-import { adminText } from '#shared/text/admin.ts';
-import { Instant } from '../instant.tsx';
-import { type LedgerColumn, LedgerTable } from '../ledger-table.tsx';
+import { catalogueText } from '#shared/text/catalogue.ts';
 
 type SetRow = CatalogueView['sets'][number];
-const text = adminText.catalogue;
+const text = catalogueText.sets;
 
 /** A cell whose header stands before it where the table has fallen into stacks. */
 function Labelled({ label, children }: { label: string; children: string }) {
@@ -74,7 +75,7 @@ const COLUMNS: readonly LedgerColumn<SetRow>[] = [
 function Editions({ set: { setKey, editions } }: { set: SetRow }) {
   const [newest, ...earlier] = editions;
   if (!newest) return <span className="text-ink-2">{text.noEdition}</span>;
-  const href = (number: number) => `/admin/catalogue/${setKey}/${number}`;
+  const href = (number: number) => `/catalogue/${setKey}/editions/${number}`;
   return (
     <>
       <p>
@@ -109,14 +110,17 @@ function Editions({ set: { setKey, editions } }: { set: SetRow }) {
 }
 
 /** Every case set in words, with the editions published of it. */
-export function CataloguePage() {
+export function SetsPage() {
+  const { role } = useSession();
   const query = useCall(endpoints.catalogue, {});
   return (
     <>
       <PageTitle title={text.title} lead={text.lead}>
-        <LinkButton kind="outlined" href="/admin/intake">
-          {text.toIntake}
-        </LinkButton>
+        {role === 'administrator' && (
+          <LinkButton kind="outlined" href="/admin/intake">
+            {text.toIntake}
+          </LinkButton>
+        )}
       </PageTitle>
       <Awaited query={query}>
         {({ sets }) => (

@@ -1,4 +1,4 @@
-import type { EditionView } from '#shared/contracts/intake.ts';
+import type { EditionView } from '#shared/contracts/catalogue.ts';
 
 export type CaseRow = EditionView['cases'][number];
 

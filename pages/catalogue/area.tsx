@@ -1,0 +1,26 @@
+import type { Area, AreaRoute } from '#renderer/area.tsx';
+import { call } from '#shared/contracts/endpoint.ts';
+import { endpoints } from '#shared/contracts/endpoints.ts';
+import { catalogueText } from '#shared/text/catalogue.ts';
+import { CatalogueFrame } from './catalogue-frame.tsx';
+import { EditionPage } from './edition/edition-page.tsx';
+import { SetsPage } from './sets/sets-page.tsx';
+
+// Addresses of one word stand before those with a set's key in that place.
+const routes: readonly AreaRoute[] = [
+  {
+    path: '/catalogue',
+    title: catalogueText.sets.title,
+    Page: SetsPage,
+    calls: () => [call(endpoints.catalogue, {})],
+  },
+  {
+    path: '/catalogue/:setKey/editions/:number',
+    title: catalogueText.sets.title,
+    Page: EditionPage,
+    calls: ({ setKey = '', number = '' }) => [call(endpoints.edition, { setKey, number: Number(number) })],
+  },
+];
+
+/** The catalogue's screens, for whoever is signed in. */
+export const catalogueArea: Area = { Frame: CatalogueFrame, routes };
