@@ -3,11 +3,11 @@
  * alike, so that a showing can offer the names of one cluster and tell nothing more. Mirror cases share a
  * cluster. Everything is deterministic: the same definition gives the same clusters for ever.
  */
-import { AUFS, act, mirror } from './action.ts';
-import { type Aspect, seenThrough } from './aspects.ts';
+import { mirror } from './action.ts';
+import { seenThrough } from './aspects.ts';
 import { type Classes, classify } from './classes.ts';
-import { seatCodes, stickersApart } from './seat-codes.ts';
 import type { CaseSetDefinition } from './sets.ts';
+import { leastApart, viewCodes } from './view-distance.ts';
 
 /** Up to this many cases, the skip not counted, a set offers every name. */
 export const OFFERED_WHOLE = 24;
@@ -20,34 +20,6 @@ const ROUNDS_OF_SWAPS = 20;
 
 /** Cases that must stay together: a case and its mirror. */
 type Unit = readonly number[];
-
-/** Distance of two cases: fewest visible stickers they differ in, over all angles and top colours. */
-function distances(
-  seen: readonly Aspect[],
-  canonical: readonly number[],
-): (one: number, other: number) => number {
-  const codes = seatCodes(seen, 'right');
-  const tops = new Int32Array(canonical.length * 16);
-  const sides = new Int32Array(canonical.length * 16);
-  canonical.forEach((state, at) => {
-    for (const before of AUFS)
-      for (const after of AUFS) {
-        const image = act(state, before, after);
-        tops[at * 16 + after * 4 + before] = codes.top(image);
-        sides[at * 16 + after * 4 + before] = codes.sides(image);
-      }
-  });
-  const turns = seen.includes('cp') || seen.includes('ep') ? 16 : 4;
-  return (one, other) => {
-    let least = 15;
-    for (let a = one * 16; a < one * 16 + 4; a++)
-      for (let b = other * 16; b < other * 16 + turns; b++) {
-        const apart = stickersApart(tops[a]!, tops[b]!) + stickersApart(sides[a]!, sides[b]!);
-        if (apart < least) least = apart;
-      }
-    return least;
-  };
-}
 
 /** Mean distance between the cases of two units, for every pair of units. */
 function unitDistances(
@@ -157,7 +129,8 @@ function comparable(classes: Classes): number[][] {
 export function clustersOf(set: CaseSetDefinition, classes: Classes): Int16Array {
   const numbers = new Int16Array(classes.canonical.length);
   if (classes.canonical.length - 1 <= OFFERED_WHOLE) return numbers;
-  const distance = distances(seenThrough(set.entry, set.toldApart), classes.canonical);
+  const codes = viewCodes(seenThrough(set.entry, set.toldApart), classes.canonical, 'right');
+  const distance = (one: number, other: number) => leastApart(codes, one, other);
   const mirrorOf = (at: number) => classes.caseOf[mirror(classes.canonical[at]!)]!;
 
   const clusters: number[][] = [];

@@ -20,6 +20,7 @@ export {
 } from './case-lines.ts';
 export { buildCaseSet, type CaseOfSet, type CaseSet, caseSet } from './case-set.ts';
 export { OFFERED_WHOLE } from './clusters.ts';
+export { type Confusable, type ConfusableOptions, confusableWith } from './confusable.ts';
 export { burnsideTable, type CaseCount, countCases, type FixedStates } from './counting.ts';
 export { type Difference, differsAt } from './differs-at.ts';
 export { type LostBy, lostBy } from './lost-by.ts';
