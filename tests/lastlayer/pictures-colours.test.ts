@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
+import { deltaE2000, type Lab } from '#shared/lastlayer/pictures/colour-difference.ts';
 import {
-  COLOUR_NAMES,
   COLOURING_COUNT,
   colouringsFor,
   colouringWith,
@@ -9,9 +9,10 @@ import {
   PALETTES,
   paint,
   pale,
+  shadesApart,
+  tooNear,
 } from '#shared/lastlayer/pictures/index.ts';
 import { contrast, letterShade } from '#shared/lastlayer/pictures/palettes.ts';
-import { deltaE2000, type Lab, labOf, type Vision } from '#tests/support/colour-difference.ts';
 
 describe('ways of holding a cube', () => {
   it('has 24, all different, each with six colours and opposite faces opposite', () => {
@@ -71,14 +72,23 @@ describe('palettes', () => {
   });
 
   it('keeps every pair of the safe one at least 20 apart, in normal and deficient vision', () => {
-    const shades = COLOUR_NAMES.map((name) => PALETTES.safe.colours[name]);
-    const distances = (['normal', 'protan', 'deutan', 'tritan'] as Vision[]).flatMap((vision) =>
-      shades.flatMap((a, k) =>
-        shades.slice(k + 1).map((b) => deltaE2000(labOf(a, vision), labOf(b, vision))),
-      ),
+    const pairs = shadesApart(PALETTES.safe.colours);
+    expect(pairs).toHaveLength(60); // derived: 15 pairs of six, in four kinds of vision
+    expect(Math.min(...pairs.map(({ difference }) => difference))).toBeGreaterThanOrEqual(20);
+    expect(tooNear(PALETTES.safe.colours)).toEqual([]);
+  });
+
+  it('warns of own shades that come too near each other, each pair once and in its worst vision', () => {
+    const own = { ...PALETTES.safe.colours, red: '#CD6421' };
+    const [first, ...rest] = tooNear(own);
+    expect(first).toMatchObject({ one: 'orange', other: 'red' });
+    expect(first!.difference).toBeLessThan(1);
+    expect(new Set(rest.map(({ one, other }) => `${one} ${other}`)).size).toBe(rest.length);
+    // The usual saturated shades: red and green are near for those without long-wave cones (common practice).
+    expect(tooNear({ ...own, red: '#C8313A', green: '#2E8B57' })).toContainEqual(
+      expect.objectContaining({ one: 'green', other: 'red' }),
     );
-    expect(distances).toHaveLength(60);
-    expect(Math.min(...distances)).toBeGreaterThanOrEqual(20);
+    expect(() => tooNear({ ...own, blue: 'navy' })).toThrow(/blue must look like #RRGGBB/);
   });
 
   it('can lay a readable letter on every shade', () => {

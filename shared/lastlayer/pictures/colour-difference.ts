@@ -1,10 +1,12 @@
-/** Colour science for the palette tests: colour-vision deficiency, CIELAB and CIEDE2000. */
+/** How different two shades look: colour-vision deficiency, CIELAB and CIEDE2000. */
 
 type Triple = readonly [number, number, number];
 export type Lab = Triple;
 type Matrix = readonly [Triple, Triple, Triple];
 
-export type Vision = 'normal' | 'protan' | 'deutan' | 'tritan';
+/** Normal colour vision, or without the long-, middle- or short-wave cones. */
+export const VISIONS = ['normal', 'protan', 'deutan', 'tritan'] as const;
+export type Vision = (typeof VISIONS)[number];
 
 /**
  * Simulation matrices for linear RGB at severity 1.0: Machado, Oliveira and Fernandes, "A
@@ -51,7 +53,7 @@ function each(v: Triple, f: (value: number, k: number) => number): Triple {
   return [f(v[0], 0), f(v[1], 1), f(v[2], 2)];
 }
 
-/** CIELAB of `#RRGGBB` as someone with this vision sees it. */
+/** CIELAB (D65) of `#RRGGBB` as someone with this vision sees it. */
 export function labOf(shade: string, vision: Vision): Lab {
   const value = Number.parseInt(shade.slice(1), 16);
   const linear = each([(value >> 16) & 255, (value >> 8) & 255, value & 255], (channel) => {
@@ -68,7 +70,7 @@ export function labOf(shade: string, vision: Vision): Lab {
 
 const rad = (degrees: number) => (degrees * Math.PI) / 180;
 
-/** CIEDE2000 with k = 1 (CIE 142-2001; formula as set out by Sharma, Wu and Dalal, 2005). */
+/** CIEDE2000, 0 for the same colour, with k = 1 (CIE 142-2001; formula as set out by Sharma, Wu and Dalal, 2005). */
 export function deltaE2000([l1, a1, b1]: Lab, [l2, a2, b2]: Lab): number {
   const meanC = (Math.hypot(a1, b1) + Math.hypot(a2, b2)) / 2;
   const g = 0.5 * (1 - Math.sqrt(meanC ** 7 / (meanC ** 7 + 25 ** 7)));
