@@ -1,12 +1,13 @@
 import { drizzle } from 'drizzle-orm/node-postgres';
 import pg from 'pg';
+import * as alias from './schema/alias.ts';
 import * as catalogue from './schema/catalogue.ts';
 import * as club from './schema/club.ts';
 import * as identity from './schema/identity.ts';
 import * as intake from './schema/intake.ts';
 import * as training from './schema/training.ts';
 
-export const tables = { ...identity, ...club, ...catalogue, ...intake, ...training };
+export const tables = { ...identity, ...club, ...catalogue, ...alias, ...intake, ...training };
 
 /**
  * A pool of connections and the query builder on it. `end()` the pool when done.

@@ -1,34 +1,77 @@
+import { sql } from 'drizzle-orm';
 import {
+  type AnyPgColumn,
   boolean,
+  check,
   foreignKey,
+  index,
   integer,
+  jsonb,
   pgTable,
   primaryKey,
   smallint,
   text,
   unique,
+  uniqueIndex,
   uuid,
 } from 'drizzle-orm/pg-core';
+import type { Entry } from '#shared/lastlayer/index.ts';
 import { createdAt, instant } from './columns.ts';
 
-/** A case set: entry condition, aspects told apart, aspects solved (shared/lastlayer defines the words). */
-export const caseSet = pgTable('case_set', {
-  setKey: text('set_key').primaryKey(),
-  name: text('name').notNull().unique(),
-  entry: text('entry').notNull(),
-  toldApart: text('told_apart').array().notNull(),
-  solved: text('solved').array().notNull(),
-  createdAt: createdAt(),
-});
+/**
+ * A case set: entry condition, aspects told apart, aspects solved (shared/lastlayer defines the words). The trade's
+ * sets and what an administrator adds belong to the installation; a club's own set is seen by that club alone.
+ * Once made it never changes; what is no longer wanted is retired, because answers still speak of it.
+ */
+export const caseSet = pgTable(
+  'case_set',
+  {
+    setKey: text('set_key').primaryKey(),
+    /**
+     * The set whose editions serve this one too: a subset's whole, or for a mix of entries the set with the same
+     * cases. One step only: that set has no parent itself. null: the set has editions of its own.
+     */
+    parentKey: text('parent_key').references((): AnyPgColumn => caseSet.setKey),
+    /** null: the installation's. References club; the migration says so, these files import one another one way. */
+    clubId: uuid('club_id'),
+    name: text('name').notNull(),
+    /** For a mix of entries what all of them have in common. */
+    entry: text('entry').notNull(),
+    /** How many parts of the solves that reach the set come by which entry; empty for a single entry. */
+    mix: jsonb('mix').$type<readonly EntryPart[]>().notNull().default([]),
+    toldApart: text('told_apart').array().notNull(),
+    solved: text('solved').array().notNull(),
+    createdAt: createdAt(),
+    /** The account that defined it; null for the trade's sets. */
+    createdBy: uuid('created_by'),
+    retiredAt: instant('retired_at'),
+  },
+  (t) => [
+    uniqueIndex('case_set_name')
+      .on(sql`coalesce(${t.clubId}, '00000000-0000-0000-0000-000000000000'::uuid)`, sql`lower(${t.name})`)
+      .where(sql`${t.retiredAt} is null`),
+    index('case_set_parent').on(t.parentKey),
+    check('case_set_name_length', sql`char_length(${t.name}) between 1 and 40`),
+  ],
+);
 
-/** Every case of a set as the engine counts them, the skip included (number 0). Memory hangs on case_key. */
+/** As shared/lastlayer has it: an entry condition and its share in whole parts. */
+interface EntryPart {
+  readonly entry: Entry;
+  readonly parts: number;
+}
+
+/**
+ * Every case of a set as the engine counts them, the skip included (number 0). Memory hangs on case_key, which a
+ * subset's case shares with its parent's.
+ */
 export const setCase = pgTable(
   'set_case',
   {
-    caseKey: text('case_key').primaryKey(),
     setKey: text('set_key')
       .notNull()
       .references(() => caseSet.setKey),
+    caseKey: text('case_key').notNull(),
     number: integer('number').notNull(),
     canonical: integer('canonical').notNull(),
     weight: integer('weight').notNull(),
@@ -37,10 +80,7 @@ export const setCase = pgTable(
     cluster: smallint('cluster').notNull(),
     isSkip: boolean('is_skip').notNull(),
   },
-  (t) => [
-    unique('set_case_number').on(t.setKey, t.number),
-    unique('set_case_in_set').on(t.setKey, t.caseKey),
-  ],
+  (t) => [primaryKey({ columns: [t.setKey, t.caseKey] }), unique('set_case_number').on(t.setKey, t.number)],
 );
 
 /** A published, numbered, immutable version of a set: rows are inserted once and never changed. */

@@ -1,5 +1,5 @@
 import { sql } from 'drizzle-orm';
-import { boolean, check, index, integer, pgTable, text, uuid } from 'drizzle-orm/pg-core';
+import { boolean, check, index, integer, jsonb, pgTable, text, uuid } from 'drizzle-orm/pg-core';
 import { bytes, createdAt, instant } from './columns.ts';
 
 /**
@@ -20,8 +20,18 @@ export const account = pgTable(
     /** Rises when every token of this person must stop working. */
     epoch: integer('epoch').notNull().default(0),
     createdAt: createdAt(),
+    /** How pictures are drawn for this person, in every club: a palette's key, or `own`. */
+    palette: text('palette', { enum: ['standard', 'safe', 'stickerless', 'greys', 'own'] })
+      .notNull()
+      .default('standard'),
+    letters: boolean('letters').notNull().default(false),
+    /** `#RRGGBB` by colour name; kept while another palette is chosen. */
+    ownShades: jsonb('own_shades').$type<Readonly<Record<string, string>>>(),
   },
-  (t) => [check('account_has_a_name', sql`${t.email} is not null or ${t.signInName} is not null`)],
+  (t) => [
+    check('account_has_a_name', sql`${t.email} is not null or ${t.signInName} is not null`),
+    check('account_own_shades', sql`${t.palette} <> 'own' or ${t.ownShades} is not null`),
+  ],
 );
 
 /** One row per refresh token ever issued; a family is one signed-in device. Only a hash is kept. */

@@ -22,9 +22,7 @@ export const showing = pgTable(
     memberId: memberId(),
     showingId: uuid('showing_id').notNull(),
     setKey: text('set_key').notNull(),
-    caseKey: text('case_key')
-      .notNull()
-      .references(() => setCase.caseKey),
+    caseKey: text('case_key').notNull(),
     editionNumber: integer('edition_number').notNull(),
     /** Full last-layer state shown, 0..62207. */
     state: integer('state').notNull(),
@@ -50,6 +48,11 @@ export const showing = pgTable(
       columns: [t.clubId, t.memberId],
       foreignColumns: [membership.clubId, membership.memberId],
     }).onDelete('cascade'),
+    foreignKey({
+      name: 'showing_case',
+      columns: [t.setKey, t.caseKey],
+      foreignColumns: [setCase.setKey, setCase.caseKey],
+    }),
     index('showing_day').on(t.clubId, t.memberId, t.localDay, t.position),
   ],
 );
@@ -139,9 +142,8 @@ export const caseState = pgTable(
   {
     clubId: clubId(),
     memberId: memberId(),
-    caseKey: text('case_key')
-      .notNull()
-      .references(() => setCase.caseKey),
+    caseKey: text('case_key').notNull(),
+    /** The set its last answer came through. */
     setKey: text('set_key').notNull(),
     stability: doublePrecision('stability').notNull(),
     difficulty: doublePrecision('difficulty').notNull(),
@@ -158,7 +160,11 @@ export const caseState = pgTable(
       columns: [t.clubId, t.memberId],
       foreignColumns: [membership.clubId, membership.memberId],
     }).onDelete('cascade'),
-    index('case_state_set').on(t.clubId, t.memberId, t.setKey),
+    foreignKey({
+      name: 'case_state_case',
+      columns: [t.setKey, t.caseKey],
+      foreignColumns: [setCase.setKey, setCase.caseKey],
+    }),
   ],
 );
 
@@ -185,7 +191,7 @@ export const firstAnswer = pgTable(
       columns: [t.clubId, t.memberId],
       foreignColumns: [membership.clubId, membership.memberId],
     }).onDelete('cascade'),
-    index('first_answer_day').on(t.clubId, t.memberId, t.setKey, t.localDay),
+    index('first_answer_day').on(t.clubId, t.memberId, t.localDay),
   ],
 );
 

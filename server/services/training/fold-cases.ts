@@ -38,8 +38,8 @@ export async function foldCases(
   const states: (typeof caseState.$inferInsert)[] = [];
   const firsts: (typeof firstAnswer.$inferInsert)[] = [];
   for (const [caseKey, log] of byCase) {
-    const setKey = log[0]?.setKey ?? '';
-    const onBoards = new Map(log.map((row) => [row.reviewId, row.onBoards && !row.carried]));
+    // A case can have been answered through a subset first and its parent later: each row says which.
+    const answers = new Map(log.map((row) => [row.reviewId, row]));
     const fold = foldCase(log.map((row) => logRow(row, misTaps)));
     if (fold.memory) {
       folded.set(caseKey, fold.memory);
@@ -48,24 +48,25 @@ export async function foldCases(
         clubId: actor.clubId,
         memberId: actor.memberId,
         caseKey,
-        setKey,
+        setKey: answers.get(lastId)?.setKey ?? '',
         ...memory,
         lastReviewId: lastId,
       });
     }
     for (const first of fold.firsts) {
       if (first.localDay < fromDay) continue;
+      const answer = answers.get(first.id);
       firsts.push({
         clubId: actor.clubId,
         memberId: actor.memberId,
         caseKey,
-        setKey,
+        setKey: answer?.setKey ?? '',
         localDay: first.localDay,
         reviewId: first.id,
         recallBefore: first.recallBefore,
         keysOffered: first.keysOffered,
         held: first.held,
-        onBoards: onBoards.get(first.id) ?? true,
+        onBoards: answer?.onBoards === true && !answer.carried,
       });
     }
   }
