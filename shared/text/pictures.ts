@@ -18,6 +18,9 @@ export const pictureText = {
   sticker: (side: string, letter: string) => `${side} ${letter}`,
   piece: (place: string, stickers: readonly string[]) => `${place}: ${stickers.join(', ')}.`,
   centres: (stickers: readonly string[]) => `Centres: ${stickers.join(', ')}.`,
+  cubeFaces: { top: 'Top', front: 'Front', right: 'Right', left: 'Left' },
+  cubeFace: (face: string, rows: readonly (readonly string[])[]) =>
+    `${face}, row by row: ${rows.map((row) => row.join(' ')).join(', ')}.`,
   palettes: {
     standard: 'Standard',
     safe: 'Safe for colour-vision deficiency',

@@ -1,5 +1,5 @@
 import type { Colouring, ColourName } from './colours.ts';
-import type { Holding } from './seat-view.ts';
+import { type PictureView, sidesInView } from './marks.ts';
 import {
   CORNER_SITES,
   EDGE_SITES,
@@ -32,7 +32,7 @@ export interface DescribeOptions {
   readonly stickers: Stickers;
   readonly colouring: Colouring;
   /** The sides that can be seen: from a seat the top and two more, on a flat picture all. */
-  readonly view: { readonly kind: 'seat'; readonly holding: Holding } | { readonly kind: 'flat' };
+  readonly view: PictureView;
   readonly words: PictureWords;
 }
 
@@ -59,8 +59,7 @@ const CENTRES: readonly (readonly [Side, Face])[] = [
  * then the centres. It names what is seen and never the case.
  */
 export function describeStickers({ stickers, colouring, view, words }: DescribeOptions): string {
-  const sides: readonly Side[] =
-    view.kind === 'flat' ? ['top', 'front', 'right', 'back', 'left'] : ['top', 'front', view.holding];
+  const sides = sidesInView(view);
   const letter = (site: Site) => {
     const colour = colourOf(stickerAt(stickers, site), colouring);
     return words.sticker(words.sides[site[0]], colour ? words.letters[colour] : words.hidden);

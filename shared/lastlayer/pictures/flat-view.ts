@@ -1,5 +1,6 @@
 import type { Colouring } from './colours.ts';
 import { type FaceMap, hatchPath, polygonPath, svgElement, tilePath } from './geometry.ts';
+import { isMarked, markMarkup } from './marks.ts';
 import { PALETTES, type Palette } from './palettes.ts';
 import { type Site, type Stickers, stickerAt } from './stickers.ts';
 import { INK, type Tile, tileMarkup } from './tiles.ts';
@@ -10,6 +11,8 @@ export interface FlatViewOptions {
   readonly palette?: Palette;
   /** Lays each colour's letter on the top stickers and bars. */
   readonly letters?: boolean;
+  /** Stickers to be outlined. */
+  readonly marks?: readonly Site[];
   /** Text alternative; without one the drawing is hidden from assistive technology. */
   readonly title?: string;
 }
@@ -61,12 +64,15 @@ const NOTCH = polygonPath([
 
 /** The drawing inside the svg element of {@link flatViewSvg}. */
 export function flatViewInner(options: FlatViewOptions): string {
-  const { stickers, colouring, palette = PALETTES.standard, letters = false } = options;
+  const { stickers, colouring, palette = PALETTES.standard, letters = false, marks } = options;
   const style = { colouring, palette, letters, kind: 'flat' } as const;
   return [
     '<g stroke-width="1.9" stroke-linejoin="round">',
     ...TILES.map(({ site, tile }) => tileMarkup(tile, stickerAt(stickers, site), style)),
     '</g>',
+    ...(marks
+      ? TILES.flatMap(({ site, tile }) => (isMarked(marks, site) ? [markMarkup(tile, 'flat')] : []))
+      : []),
     `<path class="flat-notch" d="${NOTCH}" fill="${INK}"/>`,
   ].join('');
 }

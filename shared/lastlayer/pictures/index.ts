@@ -1,6 +1,8 @@
 export * from './colours.ts';
+export * from './cube-view.ts';
 export * from './describe.ts';
 export * from './flat-view.ts';
+export { sitesApart } from './marks.ts';
 export * from './mask.ts';
 export * from './palettes.ts';
 export * from './seat-view.ts';

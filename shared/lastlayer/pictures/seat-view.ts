@@ -1,11 +1,13 @@
+import type { Holding } from '../seat-codes.ts';
+import { CELL, facesHeld, faceTile, LETTER_SIZES, SPAN, WIDTH } from './cabinet.ts';
 import type { Colouring } from './colours.ts';
-import { type FaceMap, hatchPath, type Point, polygonPath, svgElement, tilePath } from './geometry.ts';
+import { type FaceMap, polygonPath, svgElement, tilePath } from './geometry.ts';
+import { isMarked, markMarkup } from './marks.ts';
 import { PALETTES, type Palette } from './palettes.ts';
 import { type Site, type Stickers, stickerAt } from './stickers.ts';
 import { HATCH_PAPER, INK, type Tile, tileMarkup } from './tiles.ts';
 
-/** Which second side a person sees: the right one, or the left one. */
-export type Holding = 'right' | 'left';
+export type { Holding };
 
 export interface SeatViewOptions {
   readonly stickers: Stickers;
@@ -14,17 +16,14 @@ export interface SeatViewOptions {
   readonly palette?: Palette;
   /** Lays each colour's letter on it. */
   readonly letters?: boolean;
+  /** Stickers to be outlined; those out of view are passed over. */
+  readonly marks?: readonly Site[];
   /** Text alternative; without one the drawing is hidden from assistive technology. */
   readonly title?: string;
 }
 
-/** One piece is 100 units wide; depth k goes to (0.47 k, −0.42 k), a cabinet projection. */
-const CELL = 100;
-const SPAN = 3 * CELL;
-const DEPTH_X = 0.47;
-const DEPTH_Y = 0.42;
+/** Height of the row of centres below the layer. */
 const FOOT = 49;
-const WIDTH = SPAN * (1 + DEPTH_X);
 
 /** Room for the layer, the row of centres below it and their outlines. */
 export const SEAT_VIEW_BOX = `-8 -134 ${WIDTH + 16} 286`;
@@ -38,18 +37,9 @@ interface Scene {
 
 /** All geometry of one way of holding and one kind of body; the left-front view is the mirror image. */
 function scene(holding: Holding, body: Palette['body']): Scene {
-  const place = (x: number, y: number): Point => (holding === 'left' ? [WIDTH - x, y] : [x, y]);
-  const front: FaceMap = (a, b) => place(a, b);
-  const top: FaceMap = (a, k) => place(a + DEPTH_X * k, -DEPTH_Y * k);
-  const side: FaceMap = (k, b) => place(SPAN + DEPTH_X * k, b - DEPTH_Y * k);
-  const [gap, radius] = body === 'black' ? [5, 8.5] : [1.6, 11];
-
-  const tile = (map: FaceMap, a: number, b: number, letterSize: number): Tile => ({
-    path: tilePath(map, a + gap, b + gap, a + CELL - gap, b + CELL - gap, radius),
-    hatch: hatchPath(map, a + gap + 3, b + gap + 3, a + CELL - gap - 3, b + CELL - gap - 3, 15),
-    middle: map(a + CELL / 2, b + CELL / 2),
-    letterSize,
-  });
+  const { front, top, side } = facesHeld(holding);
+  const tile = (map: FaceMap, a: number, b: number, letterSize: number): Tile =>
+    faceTile(map, a, b, letterSize, body);
   const centre = (map: FaceMap, a: number, letterSize: number): Tile => ({
     path: tilePath(map, a + 6.5, CELL + 10.5, a + CELL - 6.5, CELL + FOOT - 6.5, 4.5),
     hatch: '',
@@ -81,13 +71,16 @@ function scene(holding: Holding, body: Palette['body']): Scene {
       ...columns.flatMap((row) =>
         columns.map((k) => ({
           site: ['top', row * 3 + column(k)] as const,
-          tile: tile(top, k * CELL, (2 - row) * CELL, 30),
+          tile: tile(top, k * CELL, (2 - row) * CELL, LETTER_SIZES.top),
         })),
       ),
-      ...columns.map((k) => ({ site: ['front', column(k)] as const, tile: tile(front, k * CELL, 0, 44) })),
+      ...columns.map((k) => ({
+        site: ['front', column(k)] as const,
+        tile: tile(front, k * CELL, 0, LETTER_SIZES.front),
+      })),
       ...columns.map((k) => ({
         site: holding === 'left' ? (['left', 2 - k] as const) : (['right', k] as const),
-        tile: tile(side, k * CELL, 0, 32),
+        tile: tile(side, k * CELL, 0, LETTER_SIZES.side),
       })),
     ],
     centres: [
@@ -111,7 +104,7 @@ function sceneFor(holding: Holding, body: Palette['body']): Scene {
 
 /** The drawing inside the svg element of {@link seatViewSvg}. */
 export function seatViewInner(options: SeatViewOptions): string {
-  const { stickers, colouring, holding, palette = PALETTES.standard, letters = false } = options;
+  const { stickers, colouring, holding, palette = PALETTES.standard, letters = false, marks } = options;
   const { rim, foot, tiles, centres } = sceneFor(holding, palette.body);
   const style = { colouring, palette, letters, kind: 'cube' } as const;
   return [
@@ -122,6 +115,9 @@ export function seatViewInner(options: SeatViewOptions): string {
     '<g stroke-width="1.6">',
     ...tiles.map(({ site, tile }) => tileMarkup(tile, stickerAt(stickers, site), style)),
     '</g>',
+    ...(marks
+      ? tiles.flatMap(({ site, tile }) => (isMarked(marks, site) ? [markMarkup(tile, 'cube')] : []))
+      : []),
   ].join('');
 }
 
