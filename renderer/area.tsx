@@ -20,6 +20,8 @@ export interface AreaRoute {
   calls(
     params: Readonly<Record<string, string>>,
     search: Readonly<Record<string, string>>,
+    /** The query as it stands, for names that may be there more than once. */
+    query: URLSearchParams,
   ): readonly Call<unknown, unknown>[];
 }
 
@@ -32,13 +34,16 @@ export interface Area {
   readonly routes: readonly AreaRoute[];
   /** Bars and navigation around every screen of the area. */
   readonly Frame: ComponentType<FrameProps>;
+  /** Anyone may see it, signed in or not. */
+  readonly open?: boolean;
 }
 
 export interface AreaData {
   readonly title: string;
   /** Path and query as asked for: what the router starts from on the server. */
   readonly location: string;
-  readonly session: SessionView;
+  /** Null only where the area is open and nobody is signed in. */
+  readonly session: SessionView | null;
   readonly queries: DehydratedState;
 }
 

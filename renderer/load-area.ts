@@ -23,11 +23,12 @@ export async function loadArea(area: Area, pageContext: PageContextServer): Prom
   const { server, urlParsed } = pageContext;
   if (!server) throw new Error('loadArea runs on the server.');
   const session = await server.readSession();
-  if (!session) throw redirect(signInPath(pageContext));
+  if (!session && !area.open) throw redirect(signInPath(pageContext));
   const found = routeOf(area, urlParsed.pathname);
   if (!found) throw render(404);
   const client = new QueryClient();
-  for (const call of found.route.calls(found.params, urlParsed.search)) {
+  const query = new URLSearchParams(urlParsed.searchOriginal ?? '');
+  for (const call of found.route.calls(found.params, urlParsed.search, query)) {
     const answer = await server.run(call as Call<unknown, unknown>);
     if (!answer.ok) {
       if (answer.status === 401) throw redirect(signInPath(pageContext));

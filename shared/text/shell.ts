@@ -19,6 +19,7 @@ export const shellText = {
     standings: 'Standings',
     programme: 'Programme',
     catalogue: 'Catalogue',
+    ledger: 'Ledger',
     intake: 'Intake',
     training: 'My training',
     desk: 'Desk',
