@@ -6,8 +6,27 @@ import { cornerRank, edgeRank, FLIPS, flipOf, TWISTS, twistOf } from './state.ts
 export type Aspect = 'co' | 'eo' | 'cp' | 'ep';
 export const ASPECTS: readonly Aspect[] = ['co', 'eo', 'cp', 'ep'];
 
-/** Which states reach a step. "corners" are permuted up to AUF and oriented. */
-export type Entry = 'any' | 'eo' | 'co' | 'co+eo' | 'corners' | 'corners+eo';
+/**
+ * Which states reach a step: what is done on arrival. "corners" are permuted and oriented, "edges" likewise. A
+ * permutation counts as done up to AUF, both permutations together up to one AUF.
+ */
+export type Entry =
+  | 'any'
+  | 'eo'
+  | 'co'
+  | 'co+eo'
+  | 'corners'
+  | 'corners+eo'
+  | 'cp'
+  | 'cp+eo'
+  | 'ep'
+  | 'co+ep'
+  | 'edges'
+  | 'co+edges'
+  | 'cp+ep'
+  | 'corners+ep'
+  | 'cp+edges';
+/** The entries that the trade's own sets begin from. */
 export const ENTRIES: readonly Entry[] = ['any', 'eo', 'co', 'co+eo', 'corners', 'corners+eo'];
 
 const FIXED: Readonly<Record<Entry, readonly Aspect[]>> = {
@@ -17,13 +36,30 @@ const FIXED: Readonly<Record<Entry, readonly Aspect[]>> = {
   'co+eo': ['co', 'eo'],
   corners: ['co', 'cp'],
   'corners+eo': ['co', 'eo', 'cp'],
+  cp: ['cp'],
+  'cp+eo': ['eo', 'cp'],
+  ep: ['ep'],
+  'co+ep': ['co', 'ep'],
+  edges: ['eo', 'ep'],
+  'co+edges': ['co', 'eo', 'ep'],
+  'cp+ep': ['cp', 'ep'],
+  'corners+ep': ['co', 'cp', 'ep'],
+  'cp+edges': ['eo', 'cp', 'ep'],
 };
+/** All fifteen: every choice of aspects but all four, which would leave nothing to do. */
+export const EVERY_ENTRY: readonly Entry[] = Object.keys(FIXED) as Entry[];
 
-export const isEntry = (word: string): word is Entry => (ENTRIES as readonly string[]).includes(word);
+export const isEntry = (word: string): word is Entry => (EVERY_ENTRY as readonly string[]).includes(word);
 export const isAspect = (word: string): word is Aspect => (ASPECTS as readonly string[]).includes(word);
 
-/** The aspects an entry condition has already solved (cp up to AUF). */
+/** The aspects an entry condition has already solved, permutations up to AUF. */
 export const fixedBy = (entry: Entry): readonly Aspect[] => FIXED[entry];
+
+/** The entry that has exactly these aspects done; null for all four, which is a solved last layer. */
+export const entryFixing = (aspects: readonly Aspect[]): Entry | null => {
+  const wanted = inOrder(aspects).join();
+  return EVERY_ENTRY.find((entry) => FIXED[entry].join() === wanted) ?? null;
+};
 
 /** Aspects in the order co, eo, cp, ep, each once. */
 export const inOrder = (aspects: Iterable<Aspect>): readonly Aspect[] => {
@@ -40,13 +76,7 @@ export const isTurnOfTop = (rank: number): boolean =>
   [0, 1, 2, 3].some((turn) => PERMUTATION_ACT[turn * 4] === rank);
 
 /** Whether a state reaches the step with this entry condition. `index` 0..62207. */
-export function isEntryState(entry: Entry, index: number): boolean {
-  return FIXED[entry].every((aspect) => {
-    if (aspect === 'co') return twistOf(index) === 0;
-    if (aspect === 'eo') return flipOf(index) === 0;
-    return isTurnOfTop(cornerRank(index));
-  });
-}
+export const isEntryState = (entry: Entry, index: number): boolean => isSolvedIn(index, FIXED[entry]);
 
 /** Whether these aspects of a state are solved, permutations together up to one AUF after. */
 export function isSolvedIn(index: number, aspects: readonly Aspect[]): boolean {

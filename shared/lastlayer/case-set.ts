@@ -1,9 +1,12 @@
 /** A case set ready for use: its cases, and which of them a state belongs to. */
 import { mirror } from './action.ts';
+import { isEntryState } from './aspects.ts';
+import { clusterFinder, lookUps } from './case-look-ups.ts';
 import { type Classes, classify } from './classes.ts';
-import { clustersOf } from './clusters.ts';
-import { labelsOf, plainName } from './naming.ts';
-import { CASE_SETS, type CaseSetDefinition, caseKey, requireSolvable } from './sets.ts';
+import { dealOf } from './mix.ts';
+import { labelsOf } from './naming.ts';
+import { requireDefinition } from './requirements.ts';
+import { CASE_SETS, type CaseSetDefinition, caseKey } from './sets.ts';
 import { requireStateIndex, STATES } from './state.ts';
 
 export interface CaseOfSet {
@@ -13,7 +16,7 @@ export interface CaseOfSet {
   readonly number: number;
   /** Smallest full entry state of the case, 0..62207. */
   readonly canonical: number;
-  /** Full entry states in the case, AUF included: prior = weight / set.states. */
+  /** Full entry states in the case, AUF included, or its share of a mix: prior = weight / set.total. */
   readonly weight: number;
   /** Really different pictures as one walks round the cube. */
   readonly angles: 1 | 2 | 4;
@@ -28,82 +31,108 @@ export interface CaseOfSet {
 
 export interface CaseSet {
   readonly definition: CaseSetDefinition;
+  /** The set whose cases these are chosen from; null for a set of its own. */
+  readonly parent: CaseSet | null;
   /** In canonical order, without the skip. */
   readonly cases: readonly CaseOfSet[];
   readonly skip: CaseOfSet;
-  /** Number of entry states: the total of the priors. */
+  /** Number of different full states that reach the step. */
   readonly states: number;
-  /** The case of a full state, null if the state does not meet the entry condition. */
+  /** Denominator of the priors: the entry states, or for a mix what its shares come to. */
+  readonly total: number;
+  /**
+   * The case of a full state; null if the state does not meet the entry condition, or its case is none that the
+   * mix can deal or the subset has chosen.
+   */
   caseOfState(index: number): CaseOfSet | null;
   byKey(key: string): CaseOfSet | undefined;
   /** Forgiving: `T`, `PLL T`, `T-perm`, `OLL 07`, `#17`, `skip`, `solved`. */
   byName(name: string): CaseOfSet | undefined;
-  /** The full states of a case, rising; as many as its weight. */
+  /** The full states of a case that can be dealt, rising. */
   statesOf(of: CaseOfSet): ArrayLike<number>;
-  /** A full state of the case, each equally likely. `random` gives numbers in [0, 1). */
+  /**
+   * A full state of the case: each equally likely, in a mix as likely as its entries deal it.
+   * `random` gives numbers in [0, 1).
+   */
   drawState(of: CaseOfSet, random: () => number): number;
-  /** The case of the mirrored states; the skip's mirror is the skip. */
+  /** The case of the mirrored states; the skip's mirror is the skip. A subset may have left it out. */
   mirrorOf(of: CaseOfSet): CaseOfSet;
 }
 
 /** Full states sorted by case, with the place at which each case begins. */
-function membersOf(classes: Classes): { members: Uint16Array; begins: Int32Array } {
-  const begins = new Int32Array(classes.weight.length + 1);
-  classes.weight.forEach((weight, at) => {
-    begins[at + 1] = begins[at]! + weight;
-  });
-  const next = begins.slice();
-  const members = new Uint16Array(classes.states);
+function membersOf(
+  classes: Classes,
+  isDealt: (index: number) => boolean,
+): { members: Uint16Array; begins: Int32Array } {
+  const begins = new Int32Array(classes.canonical.length + 1);
+  const dealt = (index: number): number => (isDealt(index) ? classes.caseOf[index]! : -1);
   for (let index = 0; index < STATES; index++) {
-    const of = classes.caseOf[index]!;
+    const of = dealt(index);
+    if (of >= 0) begins[of + 1]!++;
+  }
+  for (let at = 1; at < begins.length; at++) begins[at]! += begins[at - 1]!;
+  const next = begins.slice();
+  const members = new Uint16Array(begins.at(-1)!);
+  for (let index = 0; index < STATES; index++) {
+    const of = dealt(index);
     if (of >= 0) members[next[of]!++] = index;
   }
   return { members, begins };
 }
 
 /**
- * Makes a set from its definition: 10 to 20 ms, and up to a few hundred more for clusters of thousands of
- * cases.
- * @throws RangeError if the definition could not be solved: see requireSolvable.
+ * Makes a set from its definition: 10 to 20 ms, for a mix some more. Clusters are found when the first of them is
+ * asked for, which takes up to a few hundred milliseconds for thousands of cases.
+ * @throws RangeError if there can be no such set: see requireDefinition.
  */
 export function buildCaseSet(definition: CaseSetDefinition): CaseSet {
-  requireSolvable(definition);
+  requireDefinition(definition);
   const classes = classify(definition.entry, definition.toldApart);
   const labels = labelsOf(definition, classes.canonical);
-  const clusters = clustersOf(definition, classes);
-  const all: readonly CaseOfSet[] = classes.canonical.map((canonical, number) => ({
-    key: caseKey(definition, canonical),
+  const deal = definition.mix.length > 0 ? dealOf(definition.mix, classes) : null;
+  const { weight, total, states } = deal ?? { ...classes, total: classes.states };
+  const everyCase = classes.canonical.map((_, number) => number).filter((number) => weight[number]! > 0);
+  const clusterAt = clusterFinder(definition, () => classes, everyCase);
+  const all: readonly CaseOfSet[] = everyCase.map((number) => ({
+    key: caseKey(definition, classes.canonical[number]!),
     number,
-    canonical,
-    weight: classes.weight[number]!,
+    canonical: classes.canonical[number]!,
+    weight: weight[number]!,
     angles: classes.angles[number]!,
     name: labels[number]!.name,
     group: labels[number]!.group,
     skip: number === 0,
-    cluster: clusters[number]!,
+    get cluster() {
+      return clusterAt(number);
+    },
   }));
-  const keys = new Map(all.map((one) => [one.key, one]));
-  const names = new Map(all.map((one) => [plainName(definition, one.name), one]));
-  let states: ReturnType<typeof membersOf> | undefined;
+  const byNumber: CaseOfSet[] = [];
+  for (const one of all) byNumber[one.number] = one;
+  let sorted: ReturnType<typeof membersOf> | undefined;
 
   const statesOf = (of: CaseOfSet): Uint16Array => {
-    states ??= membersOf(classes);
-    return states.members.subarray(states.begins[of.number], states.begins[of.number + 1]);
+    sorted ??= membersOf(classes, deal?.isDealt ?? (() => true));
+    return sorted.members.subarray(sorted.begins[of.number], sorted.begins[of.number + 1]);
   };
   const caseOfState = (index: number): CaseOfSet | null => {
     requireStateIndex(index);
-    return all[classes.caseOf[index]!] ?? null;
+    return byNumber[classes.caseOf[index]!] ?? null;
   };
   return {
     definition,
+    parent: null,
     cases: all.slice(1),
     skip: all[0]!,
-    states: classes.states,
+    states,
+    total,
     caseOfState,
-    byKey: (key) => keys.get(key),
-    byName: (name) => names.get(plainName(definition, name)),
+    ...lookUps(definition, all),
     statesOf,
-    drawState: (of, random) => statesOf(of)[Math.floor(random() * of.weight)]!,
+    drawState: (of, random) => {
+      const entry = deal?.drawEntry(of.number, random);
+      const from = entry ? statesOf(of).filter((index) => isEntryState(entry, index)) : statesOf(of);
+      return from[Math.floor(random() * from.length)]!;
+    },
     mirrorOf: (of) => caseOfState(mirror(of.canonical))!,
   };
 }

@@ -27,6 +27,7 @@ export function classify(entry: Entry, toldApart: readonly Aspect[]): Classes {
   const turned = viewTurner(seen);
   const perAngle = cornersSeen || edgesSeen ? 4 : 1;
   const fixed = fixedBy(entry);
+  const [cornersDone, edgesDone] = [fixed.includes('cp'), fixed.includes('ep')];
   const twists = fixed.includes('co') ? 1 : TWISTS;
   const flips = fixed.includes('eo') ? 1 : FLIPS;
 
@@ -54,9 +55,12 @@ export function classify(entry: Entry, toldApart: readonly Aspect[]): Classes {
 
   // In the order of the index, so that the first state met of a case is its smallest.
   for (let corners = 0; corners < PERMUTATIONS; corners++) {
-    if (fixed.includes('cp') && !isTurnOfTop(corners)) continue;
+    if (cornersDone && !isTurnOfTop(corners)) continue;
     for (let half = 0; half < PERMUTATIONS / 2; half++) {
       const edges = edgeRankOf(corners, half);
+      if (edgesDone && !isTurnOfTop(edges)) continue;
+      // Both done are done together: turned by the same AUF.
+      if (cornersDone && edgesDone && edges !== corners) continue;
       const permutations = (cornersSeen ? corners : 0) * PERMUTATIONS + (edgesSeen ? edges : 0);
       for (let twist = 0; twist < twists; twist++) {
         for (let flip = 0; flip < flips; flip++) {

@@ -131,7 +131,11 @@ export function clustersOf(set: CaseSetDefinition, classes: Classes): Int16Array
   if (classes.canonical.length - 1 <= OFFERED_WHOLE) return numbers;
   const codes = viewCodes(seenThrough(set.entry, set.toldApart), classes.canonical, 'right');
   const distance = (one: number, other: number) => leastApart(codes, one, other);
-  const mirrorOf = (at: number) => classes.caseOf[mirror(classes.canonical[at]!)]!;
+  const mirrorOf = (at: number) => {
+    const found = classes.caseOf[mirror(classes.canonical[at]!)]!;
+    // A choice of cases may leave the mirror out.
+    return found < 0 ? at : found;
+  };
 
   const clusters: number[][] = [];
   for (const cases of comparable(classes)) {

@@ -4,7 +4,10 @@ export {
   type Aspect,
   ENTRIES,
   type Entry,
+  EVERY_ENTRY,
+  entryFixing,
   fixedBy,
+  inOrder,
   isAspect,
   isEntry,
   isEntryState,
@@ -25,6 +28,7 @@ export { burnsideTable, type CaseCount, countCases, type FixedStates } from './c
 export { type Difference, differsAt } from './differs-at.ts';
 export { type Facelets, type Frame, faceletsAfter, playAlgorithm } from './facelets.ts';
 export { type LostBy, lostBy } from './lost-by.ts';
+export { type EntryShare, MOST_PARTS, meetOf } from './mix.ts';
 export { countMoves, type MoveCounts, moveCounts } from './move-counts.ts';
 export type { Move } from './moves.ts';
 export { nearestView } from './nearest-view.ts';
@@ -33,6 +37,7 @@ export { type Reading, readAlgorithm } from './reading.ts';
 export { cancelledKey, sameAlgorithm } from './same-algorithm.ts';
 export { AlgorithmSyntaxError } from './scanner.ts';
 export type { Holding } from './seat-codes.ts';
-export { CASE_SETS, type CaseSetDefinition, caseKey } from './sets.ts';
+export { CASE_SETS, type CaseSetDefinition, caseKey, openIn, type Structure, tradeSetLike } from './sets.ts';
 export { rightAufsAfter, rightAufsBefore, type Solves, solvesCase } from './solving.ts';
 export { type LastLayerState, STATES, stateAt, stateIndex } from './state.ts';
+export { type Grouped, groupsOf, type SubsetChoice, subsetOf } from './subset.ts';

@@ -1,12 +1,12 @@
 /** Trade names and groups of cases, read from the name tables through the engine. */
-import type { Aspect } from './aspects.ts';
+import { type Aspect, seenThrough } from './aspects.ts';
 import { type Classes, classify } from './classes.ts';
 import { OLL_NAMES } from './names-oll.ts';
 import { PLL_NAMES } from './names-pll.ts';
 import { parseMoves } from './notation.ts';
 import { stateSolved } from './reading.ts';
-import type { CaseSetDefinition } from './sets.ts';
-import { cornerRank, flipOf, indexOf, twistOf } from './state.ts';
+import { type CaseSetDefinition, openIn } from './sets.ts';
+import { cornerRank, edgeRank, flipOf, indexOf, twistOf } from './state.ts';
 
 export interface Label {
   readonly name: string;
@@ -48,8 +48,10 @@ const cornerSwap: LabelOf = lookUp(
     [{ name: 'diagonal', group: '' }, PLL_NAMES.find(([name]) => name === 'Y')![1]],
   ],
 );
+/** The corners of a state alone, oriented, the edges carried along. */
+const permuted = (state: number): number => indexOf(cornerRank(state), 0, cornerRank(state), 0);
 const cornerGroup = (state: number): string => {
-  const swap = cornerSwap(indexOf(cornerRank(state), 0, cornerRank(state), 0))?.name;
+  const swap = cornerSwap(permuted(state))?.name;
   return swap === 'adjacent' || swap === 'diagonal' ? CORNER_GROUPS[swap] : CORNER_GROUPS.none;
 };
 
@@ -61,6 +63,13 @@ const pll: LabelOf = lookUp(
   () => classify('co+eo', ['cp', 'ep']),
   PLL_NAMES.map(([name, algorithm]) => [{ name, group: '' }, algorithm] as const),
 );
+
+/** PLL letter of the pieces' permutation, whatever their orientation. */
+const permutationName = (state: number): string | undefined =>
+  pll(indexOf(cornerRank(state), 0, edgeRank(state), 0))?.name;
+
+const CORNERS_ORIENTED = 'corners oriented';
+const EDGES_ORIENTED = 'edges oriented';
 
 /** OCLL names by OLL number; common practice. */
 const OCLL: Readonly<Record<string, string>> = {
@@ -84,45 +93,73 @@ const flipName = (state: number): string | undefined => {
   return flips === 5 || flips === 2 ? 'line' : 'L';
 };
 
-/** Trade name of the case that holds `state`, in the sets that have names. */
-function tradeName(set: CaseSetDefinition, state: number): string | undefined {
-  switch (set.key) {
-    case 'oll':
+/** What names hang on: the aspects that cases differ in, and whether both permutations are seen. */
+interface Naming {
+  readonly open: readonly Aspect[];
+  readonly both: boolean;
+}
+const namingOf = (set: CaseSetDefinition): Naming => {
+  const seen = seenThrough(set.entry, set.toldApart);
+  return { open: openIn(set), both: seen.includes('cp') && seen.includes('ep') };
+};
+
+/** Trade name of the case that holds `state`; sets that tell orientation and permutation apart have none. */
+function tradeName({ open, both }: Naming, state: number): string | undefined {
+  switch (open.join()) {
+    case 'co,eo':
       return oll(state)?.name;
-    case 'pll':
-    case 'epll':
-      return pll(state)?.name;
-    case 'ocll':
+    case 'co':
       return twistName(state);
-    case 'eoll':
+    case 'eo':
       return flipName(state);
-    case 'cpll':
-      return cornerSwap(state)?.name;
+    case 'cp,ep':
+      return permutationName(state);
+    case 'cp':
+      return both ? permutationName(state) : cornerSwap(permuted(state))?.name;
+    case 'ep':
+      return both ? permutationName(state) : undefined;
     default:
       return undefined;
   }
 }
 
-const NAMED_WITHOUT_GROUPS = new Set(['epll', 'ocll', 'eoll', 'cpll']);
-
 /** Group of the case that holds `state`, by what the set tells apart first: orientation, then permutation. */
-function groupOf(set: CaseSetDefinition, state: number): string {
-  if (set.key === 'oll') return oll(state)?.group ?? '';
-  if (NAMED_WITHOUT_GROUPS.has(set.key)) return '';
-  const tells = (aspect: Aspect) => set.toldApart.includes(aspect);
+function groupOf({ open }: Naming, state: number): string {
+  if (open.length < 2) return '';
+  const tells = (aspect: Aspect) => open.includes(aspect);
   if (tells('co') && tells('eo')) {
-    const number = oll(state)?.name;
-    return number ? `OLL ${number}` : 'oriented';
+    const label = oll(state);
+    if (open.length === 2) return label?.group ?? '';
+    return label ? `OLL ${label.name}` : 'oriented';
   }
-  if (tells('co')) return twistName(state) ?? 'corners oriented';
-  if (tells('eo')) return flipName(state) ?? 'edges oriented';
-  return tells('cp') ? cornerGroup(state) : '';
+  if (tells('co')) return twistName(state) ?? CORNERS_ORIENTED;
+  if (tells('eo')) return flipName(state) ?? EDGES_ORIENTED;
+  return cornerGroup(state);
+}
+
+/** What a case shows of each aspect that its set tells apart; null where it does not. */
+export interface Traits {
+  /** Corner orientation by its trade name: `Sune`, or `corners oriented`. */
+  readonly corners: string | null;
+  /** Edge orientation by its shape: `dot`, `line`, `L`, or `edges oriented`. */
+  readonly edges: string | null;
+  /** Corner permutation: `adjacent corners`, `diagonal corners`, or `edges only`. */
+  readonly swap: string | null;
+}
+
+/** The traits of the case that holds `state`. */
+export function traitsOf(set: CaseSetDefinition, state: number): Traits {
+  const open = openIn(set);
+  return {
+    corners: open.includes('co') ? (twistName(state) ?? CORNERS_ORIENTED) : null,
+    edges: open.includes('eo') ? (flipName(state) ?? EDGES_ORIENTED) : null,
+    swap: open.includes('cp') ? cornerGroup(state) : null,
+  };
 }
 
 /** Where a set told apart by corner twist sees both permutations, groups are split by corner permutation. */
 function splitByCorners(set: CaseSetDefinition, canonical: readonly number[], groups: string[]): string[] {
-  const tells = (aspect: Aspect) => set.toldApart.includes(aspect);
-  if (!(tells('co') && tells('cp') && tells('ep')) || tells('eo')) return groups;
+  if (openIn(set).join() !== 'co,cp,ep') return groups;
   const corners = classify(set.entry, ['co', 'cp']);
   const numbers = new Map<number, number>();
   const inGroup = new Map<string, number>();
@@ -143,20 +180,29 @@ function splitByCorners(set: CaseSetDefinition, canonical: readonly number[], gr
  * solved class, which comes first, is called "skip".
  */
 export function labelsOf(set: CaseSetDefinition, canonical: readonly number[]): readonly Label[] {
+  const naming = namingOf(set);
   const groups = splitByCorners(
     set,
     canonical,
-    canonical.map((state) => groupOf(set, state)),
+    canonical.map((state) => groupOf(naming, state)),
   );
   return canonical.map((state, at) =>
-    at === 0 ? { name: 'skip', group: '' } : { name: tradeName(set, state) ?? `#${at}`, group: groups[at]! },
+    at === 0
+      ? { name: 'skip', group: '' }
+      : { name: tradeName(naming, state) ?? `#${at}`, group: groups[at]! },
   );
 }
+
+/** A set called "U" must not swallow the first letter of "Ua". */
+const SHORTEST_PREFIX = 3;
 
 /** What people write around a name, taken away: `PLL T-perm`, `oll 07`, `# 17`, `J b`. */
 export function plainName(set: CaseSetDefinition, text: string): string {
   const lower = text.normalize('NFKC').trim().toLowerCase();
-  const inner = lower.startsWith(set.key) ? lower.slice(set.key.length) : lower;
+  const prefix = [set.name.toLowerCase(), set.key].find(
+    (word) => word.length >= SHORTEST_PREFIX && lower.startsWith(word),
+  );
+  const inner = lower.slice(prefix?.length ?? 0);
   const bare = inner
     .replace(/\b(?:case|number|no\.?|nr\.?)(?=[\s\d#])/gu, '')
     .replace(/[\s_-]*perm(?:utation)?$/u, '')

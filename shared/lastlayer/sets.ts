@@ -1,14 +1,18 @@
 /** The trade's case sets as data: entry condition, aspects told apart, aspects solved. */
-import { ASPECTS, type Aspect, type Entry, inOrder, seenThrough } from './aspects.ts';
+import { ASPECTS, type Aspect, type Entry, fixedBy, inOrder, seenThrough } from './aspects.ts';
+import type { EntryShare } from './mix.ts';
 
 export interface CaseSetDefinition {
   /** Lower case, for addresses and storage: `pll`. */
   readonly key: string;
   /** As the trade writes it: `PLL`. */
   readonly name: string;
+  /** What is done on arrival; for a mix what all its entries have in common. */
   readonly entry: Entry;
   readonly toldApart: readonly Aspect[];
   readonly solved: readonly Aspect[];
+  /** The entries of a solver who arrives now one way, now another; empty for a single entry. */
+  readonly mix: readonly EntryShare[];
 }
 
 const define = (
@@ -16,7 +20,7 @@ const define = (
   entry: Entry,
   toldApart: readonly Aspect[],
   solved: readonly Aspect[],
-): CaseSetDefinition => ({ key: name.toLowerCase(), name, entry, toldApart, solved });
+): CaseSetDefinition => ({ key: name.toLowerCase(), name, entry, toldApart, solved, mix: [] });
 
 /** Common practice. CLL here is the 3×3 step: corners only, edges as they fall. */
 export const CASE_SETS: readonly CaseSetDefinition[] = [
@@ -34,6 +38,10 @@ export const CASE_SETS: readonly CaseSetDefinition[] = [
   define('1LLL', 'any', ASPECTS, ASPECTS),
 ];
 
+/** The aspects a set tells apart that are not done on arrival anyway: those its cases differ in. */
+export const openIn = ({ entry, toldApart }: Pick<CaseSetDefinition, 'entry' | 'toldApart'>) =>
+  inOrder(toldApart).filter((aspect) => !fixedBy(entry).includes(aspect));
+
 const joined = (aspects: readonly Aspect[]): string =>
   aspects.length === ASPECTS.length ? 'all' : inOrder(aspects).join('-') || 'none';
 
@@ -42,24 +50,33 @@ const joined = (aspects: readonly Aspect[]): string =>
  * as `co-eo.cp-ep.all.2s`. Letters, digits, dots and hyphens only. A subset's case has its parent's key.
  */
 export function caseKey(set: CaseSetDefinition, canonical: number): string {
-  return [
-    set.entry.replace('+', '-'),
-    joined(set.toldApart),
-    joined(set.solved),
-    canonical.toString(36),
-  ].join('.');
+  return [set.entry.replace('+', '-'), joined(openIn(set)), joined(set.solved), canonical.toString(36)].join(
+    '.',
+  );
 }
 
+const sameAspects = (one: readonly Aspect[], other: readonly Aspect[]): boolean =>
+  inOrder(one).join() === inOrder(other).join();
+
+/** What decides which cases a set has; without `solved`, whatever its algorithms solve. */
+export type Structure = Pick<CaseSetDefinition, 'entry' | 'toldApart'> &
+  Partial<Pick<CaseSetDefinition, 'solved' | 'mix'>>;
+
 /**
- * Refuses a set whose algorithms could not be said to solve one case of it.
- * @throws RangeError if an aspect is to be solved that is neither told apart nor fixed by the entry, or is
- *   told apart without being solved.
+ * The trade's set with the same cases, or undefined. A mix has all the cases of what its entries have in common
+ * only if that is one of them. Where `solved` is given it must agree too: then the case keys are the same.
  */
-export function requireSolvable(set: CaseSetDefinition): void {
-  const seen = seenThrough(set.entry, set.toldApart);
-  const unseen = set.solved.find((aspect) => !seen.includes(aspect));
-  if (unseen)
-    throw new RangeError(`${set.name} solves ${unseen}, which is neither told apart nor done on entry.`);
-  const unsolved = set.toldApart.find((aspect) => !set.solved.includes(aspect));
-  if (unsolved) throw new RangeError(`${set.name} tells ${unsolved} apart but does not solve it.`);
+export function tradeSetLike({
+  entry,
+  toldApart,
+  solved,
+  mix = [],
+}: Structure): CaseSetDefinition | undefined {
+  if (mix.length > 0 && !mix.some((share) => share.entry === entry)) return undefined;
+  return CASE_SETS.find(
+    (set) =>
+      set.entry === entry &&
+      sameAspects(seenThrough(set.entry, set.toldApart), seenThrough(entry, toldApart)) &&
+      (solved === undefined || sameAspects(set.solved, solved)),
+  );
 }

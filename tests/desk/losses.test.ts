@@ -46,7 +46,7 @@ describe('what a squad loses', () => {
       return dealtRecall(cases, { b: shift, information: 4 }).theta;
     });
     const mean = thetas.reduce((sum, theta) => sum + theta, 0) / thetas.length;
-    const skips = pll.skip.weight / pll.states;
+    const skips = pll.skip.weight / pll.total;
     expect(losses.reduce((sum, { share }) => sum + share, 0)).toBeCloseTo((1 - mean) * (1 - skips), 12);
   });
 
@@ -55,7 +55,7 @@ describe('what a squad loses', () => {
     const odd = losses.find((loss) => loss.case.key === pll.cases[1]?.key);
     const even = losses.find((loss) => loss.case.key === pll.cases[0]?.key);
     expect(odd).toMatchObject({ unmet: ['Arun'], members: 2 });
-    expect(odd?.unmetShare).toBeCloseTo((pll.cases[1]?.weight ?? 0) / pll.states / 2, 12);
+    expect(odd?.unmetShare).toBeCloseTo((pll.cases[1]?.weight ?? 0) / pll.total / 2, 12);
     expect(even).toMatchObject({ unmet: [], unmetShare: 0 });
   });
 

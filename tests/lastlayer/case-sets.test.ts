@@ -29,6 +29,7 @@ describe('every case set', () => {
     expect(weights.size).toBe(set.cases.length + 1);
     expect([...weights].every(([found, weight]) => found.weight === weight)).toBe(true);
     expect([...weights.values()].reduce((sum, weight) => sum + weight, 0)).toBe(set.states);
+    expect(set.total).toBe(set.states);
     expect(set.caseOfState(0)).toBe(set.skip);
   });
 
@@ -59,10 +60,12 @@ describe('every case set', () => {
   });
 
   it('refuses sets whose algorithms could not be said to solve one case', () => {
-    const set = { key: 'x', name: 'X', entry: 'any' as const };
-    expect(() => buildCaseSet({ ...set, toldApart: ['co'], solved: ['co', 'eo'] })).toThrow(/solves eo/u);
+    const set = { key: 'x', name: 'X', entry: 'any' as const, mix: [] };
+    expect(() => buildCaseSet({ ...set, toldApart: ['co'], solved: ['co', 'eo'] })).toThrow(
+      /solves edge orientation/u,
+    );
     expect(() => buildCaseSet({ ...set, toldApart: ['co', 'eo'], solved: ['co'] })).toThrow(
-      /tells eo apart/u,
+      /tells edge orientation apart/u,
     );
   });
 });

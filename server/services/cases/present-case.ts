@@ -30,7 +30,7 @@ export function presentCase(
     group: edition?.group ?? '',
     picture: casePicture(set, c, algorithm),
     algorithm: algorithm ?? '',
-    prior: { weight: c.weight, total: set.states },
+    prior: { weight: c.weight, total: set.total },
     angles: c.angles,
     state: caseStateName(memory, told, slipsBelow),
     recall: memory ? calibrated(recall(memory, told), shift) : null,

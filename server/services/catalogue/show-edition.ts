@@ -35,7 +35,7 @@ export async function showEdition(
           name,
           group,
           picture: casePicture(set, c, algorithms[0]?.algorithm),
-          prior: { weight: c.weight, total: set.states },
+          prior: { weight: c.weight, total: set.total },
           angles: c.angles,
           algorithms: algorithms.map(({ algorithm, note }) => ({ algorithm, note })),
         };

@@ -63,7 +63,7 @@ function presentLine(set: CaseSet, { kept, read, solves, decision, standing }: J
     says: intakeText.says(facts),
     hint: intakeText.hint(facts),
     solves: facts.solves,
-    prior: solves ? { weight: solves.weight, total: set.states } : null,
+    prior: solves ? { weight: solves.weight, total: set.total } : null,
     angles: facts.angles,
     picture: solves ? casePicture(set, solves, read.normalised ?? undefined) : null,
     decision,

@@ -35,7 +35,7 @@ export function lossesOf(set: CaseSet, content: EditionContent, squad: readonly 
   return [...content.cases.keys()].flatMap((key) => {
     const c = set.byKey(key);
     if (!c || c.skip) return [];
-    const prior = c.weight / set.states;
+    const prior = c.weight / set.total;
     let lost = 0;
     const unmet: string[] = [];
     for (const { nickname, memory, shift, day } of squad) {

@@ -1,4 +1,4 @@
-import { caseSet } from '#shared/lastlayer/index.ts';
+import type { CaseSet } from '#shared/lastlayer/index.ts';
 import { deskText } from '#shared/text/desk.ts';
 import type { EditionContent } from '../catalogue/read-edition.ts';
 import { groupBy } from '../group-by.ts';
@@ -30,8 +30,7 @@ export function columnsOfSets(programme: readonly ProgrammeEntry[]): Column[] {
 }
 
 /** A column for each group of the set, in the order of its cases, and one for all of it at the end. */
-export function columnsOfGroups(entry: ProgrammeEntry, content: EditionContent): Column[] {
-  const set = caseSet(entry.setKey);
+export function columnsOfGroups(entry: ProgrammeEntry, set: CaseSet, content: EditionContent): Column[] {
   const all: Column = { key: ALL, name: deskText.squad.all, entry, group: null, dealt: null };
   const groups = groupBy(content.cases.values(), (c) => c.group);
   if (groups.size < 2) return [all];
@@ -41,7 +40,7 @@ export function columnsOfGroups(entry: ProgrammeEntry, content: EditionContent):
       name: group === '' ? deskText.squad.ungrouped : group,
       entry,
       group,
-      dealt: cases.reduce((sum, { key }) => sum + (set.byKey(key)?.weight ?? 0), 0) / set.states,
+      dealt: cases.reduce((sum, { key }) => sum + (set.byKey(key)?.weight ?? 0), 0) / set.total,
     })),
     all,
   ];

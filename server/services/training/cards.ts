@@ -35,7 +35,7 @@ export function cardsOf(day: MemberDay): DayCard[] {
   const found = day.sets.flatMap((trained) =>
     [...trained.content.cases.keys()].flatMap((key) => {
       const c = trained.set.byKey(key);
-      return c && !c.skip ? [{ trained, case: c, chance: c.weight / trained.set.states }] : [];
+      return c && !c.skip ? [{ trained, case: c, chance: c.weight / trained.set.total }] : [];
     }),
   );
   const all = found.reduce((sum, { chance }) => sum + chance, 0);
