@@ -1,4 +1,11 @@
-import type { CatalogueView, EditionView } from './catalogue.ts';
+import type {
+  CatalogueCasesInput,
+  CatalogueCasesView,
+  CatalogueSetInput,
+  CatalogueSetView,
+  CatalogueView,
+  EditionView,
+} from './catalogue.ts';
 import type {
   AssignSetInput,
   MemberPageView,
@@ -71,6 +78,16 @@ export const endpoints = {
   discard: endpoint<DiscardInput, IntakeView>('discard', 'POST', '/api/admin/intake/:draftId/discard'),
 
   catalogue: endpoint<Nothing, CatalogueView>('catalogue', 'GET', '/api/catalogue'),
+  catalogueSet: endpoint<CatalogueSetInput, CatalogueSetView>(
+    'catalogueSet',
+    'GET',
+    '/api/catalogue/sets/:setKey',
+  ),
+  catalogueCases: endpoint<CatalogueCasesInput, CatalogueCasesView>(
+    'catalogueCases',
+    'GET',
+    '/api/catalogue/sets/:setKey/cases',
+  ),
   edition: endpoint<{ setKey: string; number: number }, EditionView>(
     'edition',
     'GET',

@@ -1,7 +1,17 @@
-import { catalogueView, editionInput, editionView } from '#shared/contracts/catalogue.ts';
+import {
+  catalogueCasesInput,
+  catalogueCasesView,
+  catalogueSetInput,
+  catalogueSetView,
+  catalogueView,
+  editionInput,
+  editionView,
+} from '#shared/contracts/catalogue.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
+import { listCases } from '../../services/catalogue/list-cases.ts';
 import { listCatalogue } from '../../services/catalogue/list-catalogue.ts';
 import { showEdition } from '../../services/catalogue/show-edition.ts';
+import { showSet } from '../../services/catalogue/show-set.ts';
 import { defineRow } from '../define-row.ts';
 import { nothing } from '../session/rows.ts';
 
@@ -13,6 +23,20 @@ export const catalogueRows = {
     input: nothing,
     output: catalogueView,
     service: listCatalogue,
+  }),
+  catalogueSet: defineRow({
+    endpoint: endpoints.catalogueSet,
+    who: 'signed-in',
+    input: catalogueSetInput,
+    output: catalogueSetView,
+    service: showSet,
+  }),
+  catalogueCases: defineRow({
+    endpoint: endpoints.catalogueCases,
+    who: 'signed-in',
+    input: catalogueCasesInput,
+    output: catalogueCasesView,
+    service: listCases,
   }),
   edition: defineRow({
     endpoint: endpoints.edition,
