@@ -106,6 +106,8 @@ function hint(line: LineFacts): string {
 /** Sentences of refusals. */
 const problems = {
   noSet: 'There is no such set.',
+  noEditions: (name: string) =>
+    `${name} takes its algorithms from another set. Bring the file in for that one.`,
   noDraft: 'There is no such draft.',
   noLine: (line: number) => `The draft has no line ${line}.`,
   noLines: 'The file names its columns, but no line follows.',
@@ -299,4 +301,7 @@ const draft = {
   openEdition: 'Open the edition',
 } as const;
 
-export const intakeText = { says, hint, printed, grouped, problems, list, draft } as const;
+/** A club's own set, as the administrator's lists name it. */
+const ofAClub = (name: string) => `${name} (a club’s own)`;
+
+export const intakeText = { ofAClub, says, hint, printed, grouped, problems, list, draft } as const;

@@ -1,6 +1,10 @@
-import { and, asc, desc, eq } from 'drizzle-orm';
+import { and, asc, desc, eq, sql } from 'drizzle-orm';
 import { type Transaction, tables } from '#database/client.ts';
+import type { CaseSet } from '#shared/lastlayer/index.ts';
 import { notFound } from '../../http/problem.ts';
+import { groupBy } from '../group-by.ts';
+import { isTradeSet, loadCaseSet } from './load-set.ts';
+import { readSetRow } from './set-row.ts';
 
 export interface EditionAlgorithm {
   readonly algorithm: string;
@@ -31,18 +35,38 @@ const kept = new Map<string, EditionContent>();
 
 /**
  * Reads a published edition. Never call it for one that this transaction is only about to publish: what is read
- * is kept.
- * @throws Problem not-found.
+ * is kept. A set without editions of its own (a subset, a mix) shows its parent's, as far as it has their cases.
+ * @throws Problem not-found, for a set this session may not see too.
  */
 export async function readEditionContent(
   tx: Transaction,
   setKey: string,
   number: number,
 ): Promise<EditionContent> {
+  // Before what is kept is looked at: it is kept for all sessions, and not every session may see it.
+  const parentKey = isTradeSet(setKey) ? null : (await readSetRow(tx, setKey)).parentKey;
   const id = `${setKey} ${number}`;
   const known = kept.get(id);
   if (known) return known;
+  const content =
+    parentKey === null
+      ? await readOwnEdition(tx, setKey, number)
+      : restrict(await readEditionContent(tx, parentKey, number), await loadCaseSet(tx, setKey));
+  if (kept.size >= KEPT) kept.delete(kept.keys().next().value ?? '');
+  kept.set(id, content);
+  return content;
+}
 
+function restrict(content: EditionContent, { definition, byKey }: CaseSet): EditionContent {
+  return {
+    ...content,
+    setKey: definition.key,
+    setName: definition.name,
+    cases: new Map([...content.cases].filter(([key]) => byKey(key))),
+  };
+}
+
+async function readOwnEdition(tx: Transaction, setKey: string, number: number): Promise<EditionContent> {
   const { edition, editionCase, editionAlgorithm, caseSet } = tables;
   const [head] = await tx
     .select({ publishedAt: edition.publishedAt, note: edition.note, setName: caseSet.name })
@@ -79,10 +103,7 @@ export async function readEditionContent(
     if (algorithm !== null) entry.algorithms.push({ algorithm, note: note ?? '' });
     cases.set(key, entry);
   }
-  const content: EditionContent = { setKey, number, ...head, cases };
-  if (kept.size >= KEPT) kept.delete(kept.keys().next().value ?? '');
-  kept.set(id, content);
-  return content;
+  return { setKey, number, ...head, cases };
 }
 
 const collator = new Intl.Collator('en', { numeric: true });
@@ -92,12 +113,18 @@ export function inNameOrder(a: string, b: string): number {
   return collator.compare(a, b);
 }
 
-/** The newest edition's number by set. */
+/** The newest edition's number by set; a subset's is its parent's. */
 export async function newestEditions(tx: Transaction): Promise<Map<string, number>> {
-  const { edition } = tables;
+  return new Map([...(await editionNumbers(tx))].map(([setKey, [newest = 0]]) => [setKey, newest]));
+}
+
+/** Numbers of all editions that serve a set, newest first, by set: its own, or its parent's. */
+export async function editionNumbers(tx: Transaction): Promise<Map<string, number[]>> {
+  const { caseSet, edition } = tables;
   const rows = await tx
-    .selectDistinctOn([edition.setKey], { setKey: edition.setKey, number: edition.number })
-    .from(edition)
-    .orderBy(edition.setKey, desc(edition.number));
-  return new Map(rows.map((row) => [row.setKey, row.number]));
+    .select({ setKey: caseSet.setKey, number: edition.number })
+    .from(caseSet)
+    .innerJoin(edition, eq(edition.setKey, sql`coalesce(${caseSet.parentKey}, ${caseSet.setKey})`))
+    .orderBy(asc(caseSet.setKey), desc(edition.number));
+  return new Map([...groupBy(rows, (row) => row.setKey)].map(([key, of]) => [key, of.map((o) => o.number)]));
 }

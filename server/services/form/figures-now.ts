@@ -26,12 +26,12 @@ export async function figuresNow(tx: Transaction, day: MemberDay): Promise<(setK
   const rowsOf = groupBy(rows, (row) => row.setKey);
   const cardsOfSet = groupBy(cardsOf(day), (card) => card.trained.entry.setKey);
   const figures = new Map<string, Figure>();
-  for (const { entry } of day.sets) {
+  for (const { entry, set } of day.sets) {
     const cards = cardsOfSet.get(entry.setKey) ?? [];
     const answers = (rowsOf.get(entry.setKey) ?? []).reduce((sum, row) => sum + row.answers, 0);
     if (cards.length === 0) continue;
     const calibrations = await readCalibrations(tx, day.actor, {
-      setKey: entry.setKey,
+      set,
       fromDay: day.day,
       toDay: day.day,
     });

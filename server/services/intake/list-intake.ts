@@ -1,6 +1,7 @@
-import { eq, sql } from 'drizzle-orm';
+import { and, eq, isNull, sql } from 'drizzle-orm';
 import { type Transaction, tables } from '#database/client.ts';
 import type { IntakeView } from '#shared/contracts/intake.ts';
+import { intakeText } from '#shared/text/intake.ts';
 import { inTradeOrder } from '../catalogue/list-catalogue.ts';
 import { newestEditions } from '../catalogue/read-edition.ts';
 import { asAdministrator, type Ctx } from '../context.ts';
@@ -9,7 +10,7 @@ import { readDraftSummaries } from './read-draft.ts';
 /** More than anyone looks through; older files stay in the database. */
 const MOST_DRAFTS = 500;
 
-/** The sets a file can be for, and the files brought in so far. */
+/** The sets a file can be for (those with editions of their own), and the files brought in so far. */
 export async function listIntake(ctx: Ctx): Promise<IntakeView> {
   return asAdministrator(ctx, (tx) => intakeView(tx));
 }
@@ -21,16 +22,22 @@ export async function intakeView(tx: Transaction): Promise<IntakeView> {
     .select({
       setKey: caseSet.setKey,
       name: caseSet.name,
+      clubId: caseSet.clubId,
       cases: sql<number>`count(*) filter (where not ${setCase.isSkip})::int`,
     })
     .from(caseSet)
     .innerJoin(setCase, eq(setCase.setKey, caseSet.setKey))
+    .where(and(isNull(caseSet.parentKey), isNull(caseSet.retiredAt)))
     .groupBy(caseSet.setKey);
   const newest = await newestEditions(tx);
   return {
     sets: sets
       .sort((one, other) => inTradeOrder(one.setKey, other.setKey))
-      .map((set) => ({ ...set, newestEdition: newest.get(set.setKey) ?? null })),
+      .map(({ clubId, name, ...set }) => ({
+        ...set,
+        name: clubId === null ? name : intakeText.ofAClub(name),
+        newestEdition: newest.get(set.setKey) ?? null,
+      })),
     drafts: await readDraftSummaries(tx, MOST_DRAFTS),
   };
 }

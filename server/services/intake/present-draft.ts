@@ -1,8 +1,9 @@
 import type { Transaction } from '#database/client.ts';
 import type { DraftLine, DraftView } from '#shared/contracts/intake.ts';
-import { type CaseSet, caseSet } from '#shared/lastlayer/index.ts';
+import type { CaseSet } from '#shared/lastlayer/index.ts';
 import { intakeText } from '#shared/text/intake.ts';
 import { casePicture } from '../catalogue/case-picture.ts';
+import { loadCaseSet } from '../catalogue/load-set.ts';
 import { inNameOrder, newestEditions, readEditionContent } from '../catalogue/read-edition.ts';
 import { type JudgedLine, judgeLines, wordsOf } from './judge-lines.ts';
 import { mergeEdition } from './merge-edition.ts';
@@ -10,7 +11,7 @@ import type { Draft } from './read-draft.ts';
 
 /** A draft as its page shows it: findings read anew, and what publishing would do to the newest edition. */
 export async function presentDraft(tx: Transaction, draft: Draft): Promise<DraftView> {
-  const set = caseSet(draft.setKey);
+  const set = await loadCaseSet(tx, draft.setKey);
   const newestEdition = (await newestEditions(tx)).get(draft.setKey) ?? null;
   const newest = newestEdition === null ? null : await readEditionContent(tx, draft.setKey, newestEdition);
   const lines = judgeLines(set, draft.kept);

@@ -1,9 +1,9 @@
 import { and, eq, ne, sql } from 'drizzle-orm';
 import { type Transaction, tables } from '#database/client.ts';
 import type { PublishInput } from '#shared/contracts/intake.ts';
-import { caseSet } from '#shared/lastlayer/index.ts';
 import { intakeText } from '#shared/text/intake.ts';
 import { notFound, Problem } from '../../http/problem.ts';
+import { loadCaseSet } from '../catalogue/load-set.ts';
 import { type EditionCase, newestEditions, readEditionContent } from '../catalogue/read-edition.ts';
 import { asAdministrator, type Ctx } from '../context.ts';
 import { blocking, judgeLines } from './judge-lines.ts';
@@ -62,7 +62,7 @@ async function contentOf(
   tx: Transaction,
   draft: Draft,
 ): Promise<{ cases: readonly EditionCase[]; newest: number }> {
-  const set = caseSet(draft.setKey);
+  const set = await loadCaseSet(tx, draft.setKey);
   const lines = judgeLines(set, draft.kept);
   const left = blocking(lines);
   if (left > 0) throw new Problem('cannot-take', text.blocked(left));

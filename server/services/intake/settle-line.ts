@@ -1,9 +1,9 @@
 import { and, eq } from 'drizzle-orm';
 import { tables } from '#database/client.ts';
 import type { DraftView, SettleLineInput } from '#shared/contracts/intake.ts';
-import { caseSet } from '#shared/lastlayer/index.ts';
 import { intakeText } from '#shared/text/intake.ts';
 import { notFound, Problem } from '../../http/problem.ts';
+import { loadCaseSet } from '../catalogue/load-set.ts';
 import { asAdministrator, type Ctx } from '../context.ts';
 import { canBeTaken, judgeLines, type KeptLine } from './judge-lines.ts';
 import { plainText } from './plain-text.ts';
@@ -26,7 +26,9 @@ export async function settleLine(ctx: Ctx, input: SettleLineInput): Promise<Draf
     const settled = withInput(before, input);
     const kept = draft.kept.map((line) => (line === before ? settled : line));
     if (input.decision === 'take') {
-      const judged = judgeLines(caseSet(draft.setKey), kept).find((line) => line.kept === settled);
+      const judged = judgeLines(await loadCaseSet(tx, draft.setKey), kept).find(
+        (line) => line.kept === settled,
+      );
       if (!judged || !canBeTaken(judged)) {
         const detail = text.cannotTake(input.line);
         throw new Problem('cannot-take', detail, { errors: [{ pointer: '/decision', detail }] });

@@ -1,5 +1,5 @@
 import { createHash } from 'node:crypto';
-import { eq } from 'drizzle-orm';
+import { and, eq, isNull } from 'drizzle-orm';
 import { type Transaction, tables } from '#database/client.ts';
 import type { UploadInput } from '#shared/contracts/intake.ts';
 import { intakeText } from '#shared/text/intake.ts';
@@ -20,16 +20,17 @@ const COLUMN_NAME = 60;
 /**
  * Takes in a case file: the bytes are kept with their SHA-256, its lines become a draft. Nothing is kept of a
  * file that cannot be read.
- * @throws Problem not-found for no such set; cannot-take, with the line where there is one, for such a file.
+ * @throws Problem not-found for no such set; cannot-take for one without editions of its own, and, with the line where there is one, for such a file.
  */
 export async function uploadCaseFile(ctx: Ctx, input: UploadInput): Promise<{ draftId: string }> {
   return asAdministrator(ctx, async (tx, { accountId }) => {
     const { caseSet, intakeDraft } = tables;
     const [set] = await tx
-      .select({ setKey: caseSet.setKey })
+      .select({ setKey: caseSet.setKey, name: caseSet.name, parentKey: caseSet.parentKey })
       .from(caseSet)
-      .where(eq(caseSet.setKey, input.setKey));
+      .where(and(eq(caseSet.setKey, input.setKey), isNull(caseSet.retiredAt)));
     if (!set) throw notFound(text.noSet);
+    if (set.parentKey !== null) throw refuseSet(text.noEditions(set.name));
     const file = Buffer.from(input.content, 'base64');
     const { lines, unknownColumns } = readable(file);
     const draftId = newId(ctx);
@@ -71,6 +72,10 @@ function refuse(detail: string, line: number | null): Problem {
   return new Problem('cannot-take', detail, {
     errors: [{ pointer: '/content', detail, ...(line === null ? {} : { row: line }) }],
   });
+}
+
+function refuseSet(detail: string): Problem {
+  return new Problem('cannot-take', detail, { errors: [{ pointer: '/setKey', detail }] });
 }
 
 async function insertLines(tx: Transaction, draftId: string, lines: CaseFile['lines']): Promise<void> {

@@ -3,8 +3,9 @@ import { type Transaction, tables } from '#database/client.ts';
 import type { AssignSetInput, ProgrammeView } from '#shared/contracts/desk.ts';
 import { deskText } from '#shared/text/desk.ts';
 import { notFound, Problem, stale } from '../../http/problem.ts';
+import { editionNumbers } from '../catalogue/read-edition.ts';
 import { asCaptain, type Ctx } from '../context.ts';
-import { allEditions, programmeView } from './read-programme-view.ts';
+import { programmeView } from './read-programme-view.ts';
 
 const text = deskText.programme.problems;
 
@@ -29,7 +30,7 @@ async function checkEdition(tx: Transaction, { setKey, pinnedEdition }: AssignSe
   const { caseSet } = tables;
   const [set] = await tx.select({ key: caseSet.setKey }).from(caseSet).where(eq(caseSet.setKey, setKey));
   if (!set) throw notFound(text.noSet);
-  const editions = (await allEditions(tx)).get(setKey) ?? [];
+  const editions = (await editionNumbers(tx)).get(setKey) ?? [];
   if (editions.length === 0) throw refuse('/setKey', text.noEdition);
   if (pinnedEdition !== null && !editions.includes(pinnedEdition)) {
     throw refuse('/pinnedEdition', text.noSuchEdition(pinnedEdition));

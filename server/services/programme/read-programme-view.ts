@@ -1,6 +1,7 @@
 import { and, asc, eq, isNull, sql } from 'drizzle-orm';
 import { type Transaction, tables } from '#database/client.ts';
 import type { ProgrammeView } from '#shared/contracts/desk.ts';
+import { editionNumbers } from '../catalogue/read-edition.ts';
 import { asCaptain, type Ctx } from '../context.ts';
 import { groupBy } from '../group-by.ts';
 
@@ -11,7 +12,7 @@ export async function readProgrammeView(ctx: Ctx): Promise<ProgrammeView> {
 
 /** The view within a transaction that is open already: edits answer with it. */
 export async function programmeView(tx: Transaction, clubId: string): Promise<ProgrammeView> {
-  const editions = await allEditions(tx);
+  const editions = await editionNumbers(tx);
   const rows = await assigned(tx, clubId);
   const chosen = groupBy(await answering(tx, clubId), (row) => row.setKey);
   const names = await setNames(tx);
@@ -73,21 +74,11 @@ async function people(tx: Transaction, clubId: string): Promise<ProgrammeView['m
     .orderBy(asc(sql`lower(${membership.nickname})`));
 }
 
-/** Numbers of all editions by set, newest first. */
-export async function allEditions(tx: Transaction): Promise<Map<string, number[]>> {
-  const { edition } = tables;
-  const rows = await tx
-    .select({ setKey: edition.setKey, number: edition.number })
-    .from(edition)
-    .orderBy(asc(edition.setKey), sql`${edition.number} desc`);
-  return new Map([...groupBy(rows, (row) => row.setKey)].map(([key, of]) => [key, of.map((o) => o.number)]));
-}
-
 async function setNames(tx: Transaction): Promise<Map<string, { name: string; cases: number }>> {
   const { rows } = await tx.execute<{ set_key: string; name: string; cases: number }>(sql`
     select s.set_key, s.name,
       (select count(*)::int from set_case c where c.set_key = s.set_key and not c.is_skip) as cases
-    from case_set s where exists (select 1 from edition e where e.set_key = s.set_key)
+    from case_set s where exists (select 1 from edition e where e.set_key = coalesce(s.parent_key, s.set_key))
       or exists (select 1 from programme p where p.set_key = s.set_key)`);
   return new Map(rows.map((row) => [row.set_key, { name: row.name, cases: row.cases }]));
 }

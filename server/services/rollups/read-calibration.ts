@@ -1,5 +1,6 @@
 import { and, asc, between, eq, isNotNull } from 'drizzle-orm';
 import { type Transaction, tables } from '#database/client.ts';
+import type { CaseSet } from '#shared/lastlayer/index.ts';
 import { CALIBRATION_DAYS, type Calibration, logitCalibration } from '#shared/standing/index.ts';
 import type { ClubActor } from '../context.ts';
 
@@ -7,23 +8,25 @@ import type { ClubActor } from '../context.ts';
 const DAYS = CALIBRATION_DAYS;
 
 export interface CalibrationSpan {
-  readonly setKey: string;
+  readonly set: CaseSet;
   readonly fromDay: number;
   readonly toDay: number;
 }
 
 /**
  * The calibration in force on each day of the span: from the first answers of the 30 days *before* it, so that
- * a day's own answers never move the yardstick they are measured with.
+ * a day's own answers never move the yardstick they are measured with. First answers count by their case, whichever
+ * set of the case's family they came through: a member who moves from a subset to the whole keeps their calibration.
  */
 export async function readCalibrations(
   tx: Transaction,
   actor: Pick<ClubActor, 'clubId' | 'memberId'>,
-  { setKey, fromDay, toDay }: CalibrationSpan,
+  { set, fromDay, toDay }: CalibrationSpan,
 ): Promise<(day: number) => Calibration> {
   const { firstAnswer } = tables;
-  const rows = await tx
+  const all = await tx
     .select({
+      caseKey: firstAnswer.caseKey,
       day: firstAnswer.localDay,
       recall: firstAnswer.recallBefore,
       keys: firstAnswer.keysOffered,
@@ -34,7 +37,6 @@ export async function readCalibrations(
       and(
         eq(firstAnswer.clubId, actor.clubId),
         eq(firstAnswer.memberId, actor.memberId),
-        eq(firstAnswer.setKey, setKey),
         eq(firstAnswer.onBoards, true),
         isNotNull(firstAnswer.recallBefore),
         between(firstAnswer.localDay, fromDay - DAYS, toDay - 1),
@@ -42,6 +44,7 @@ export async function readCalibrations(
     )
     // The sums of the fit depend on the order of their terms in the last bits: keep it the same for ever.
     .orderBy(asc(firstAnswer.localDay), asc(firstAnswer.caseKey));
+  const rows = all.filter((row) => set.byKey(row.caseKey));
   return (day) =>
     logitCalibration(
       rows.flatMap((row) =>

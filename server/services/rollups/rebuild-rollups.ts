@@ -1,7 +1,7 @@
 import { and, asc, between, eq } from 'drizzle-orm';
 import { type Transaction, tables } from '#database/client.ts';
-import { caseSet } from '#shared/lastlayer/index.ts';
 import { type CaseMemory, foldCase } from '#shared/memory/index.ts';
+import { loadCaseSet } from '../catalogue/load-set.ts';
 import { readEditionContent } from '../catalogue/read-edition.ts';
 import type { ClubActor } from '../context.ts';
 import { groupBy } from '../group-by.ts';
@@ -32,14 +32,14 @@ export async function rebuildRollups(
     .from(rollup)
     .where(inSpan)
     .orderBy(asc(rollup.day));
-  const set = caseSet(setKey);
+  const set = await loadCaseSet(tx, setKey);
   const { rows: log, misTaps } = await logOfCases(
     tx,
     actor,
     set.cases.map((c) => c.key),
   );
   const byCase = groupBy(log, (row) => row.caseKey);
-  const calibration = await readCalibrations(tx, actor, { setKey, ...span });
+  const calibration = await readCalibrations(tx, actor, { set, ...span });
   const rows: RollupRow[] = [];
   for (const { day, edition } of days) {
     const memory = new Map<string, CaseMemory>();
@@ -57,7 +57,7 @@ export async function rebuildRollups(
         content: await readEditionContent(tx, setKey, edition),
         memory,
         calibration: calibration(day),
-        answers: log.filter((row) => row.localDay === day),
+        answers: log.filter((row) => row.localDay === day && row.setKey === setKey),
         misTaps,
       }),
     );

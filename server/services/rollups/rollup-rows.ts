@@ -16,7 +16,7 @@ export interface RollupDay {
   readonly content: EditionContent;
   readonly memory: ReadonlyMap<string, CaseMemory>;
   readonly calibration: Calibration;
-  /** The day's answers of this set. */
+  /** The day's answers that came through this set: what came through a subset stands in the subset's row. */
   readonly answers: readonly LoggedAnswer[];
   readonly misTaps: ReadonlySet<string>;
 }

@@ -14,7 +14,7 @@ export async function writeDay(
   const { rollup } = tables;
   const { clubId, memberId } = day.actor;
   const calibration = await readCalibrations(tx, day.actor, {
-    setKey: entry.setKey,
+    set,
     fromDay: day.day,
     toDay: day.day,
   });

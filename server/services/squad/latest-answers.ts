@@ -1,9 +1,9 @@
 import { sql } from 'drizzle-orm';
 import type { Transaction } from '#database/client.ts';
 import type { MemberPageView } from '#shared/contracts/desk.ts';
-import { caseSet } from '#shared/lastlayer/index.ts';
 import type { Outcome } from '#shared/memory/index.ts';
 import { deskText } from '#shared/text/desk.ts';
+import { loadCaseSet } from '../catalogue/load-set.ts';
 import { readEditionContent } from '../catalogue/read-edition.ts';
 import type { MemberDay } from '../training/member-day.ts';
 
@@ -39,7 +39,7 @@ export async function latestAnswers(
     limit ${count}`);
   const lately: MemberPageView['lately'] = [];
   for (const row of rows) {
-    const set = caseSet(row.set_key);
+    const set = await loadCaseSet(tx, row.set_key);
     const { cases } = await readEditionContent(tx, row.set_key, row.edition_number);
     const nameOf = (key: string) => cases.get(key)?.name ?? set.byKey(key)?.name ?? key;
     lately.push({

@@ -1,6 +1,7 @@
 import type { SquadView } from '#shared/contracts/desk.ts';
 import { localDay } from '#shared/memory/index.ts';
 import { notFound } from '../../http/problem.ts';
+import { loadCaseSet } from '../catalogue/load-set.ts';
 import { readEditionContent } from '../catalogue/read-edition.ts';
 import { asCaptain, type Ctx } from '../context.ts';
 import { dayOf, isoDate } from '../standing/local-date.ts';
@@ -28,7 +29,11 @@ export async function readSquad(ctx: Ctx, input: { setKey?: string | undefined }
     if (input.setKey !== undefined && !chosen)
       throw notFound('That set is not on the programme of your club.');
     const columns = chosen
-      ? columnsOfGroups(chosen, await readEditionContent(tx, chosen.setKey, chosen.edition))
+      ? columnsOfGroups(
+          chosen,
+          await loadCaseSet(tx, chosen.setKey),
+          await readEditionContent(tx, chosen.setKey, chosen.edition),
+        )
       : columnsOfSets(programme);
     const entries = chosen ? [chosen] : programme;
     const members = await squadMembers(tx, clubId);

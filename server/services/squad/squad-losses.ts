@@ -1,9 +1,10 @@
-import { and, eq, inArray } from 'drizzle-orm';
+import { eq } from 'drizzle-orm';
 import { type Transaction, tables } from '#database/client.ts';
 import type { SquadView } from '#shared/contracts/desk.ts';
-import { caseSet } from '#shared/lastlayer/index.ts';
+import type { CaseSet } from '#shared/lastlayer/index.ts';
 import type { CaseMemory } from '#shared/memory/index.ts';
 import { casePicture } from '../catalogue/case-picture.ts';
+import { loadCaseSets } from '../catalogue/load-set.ts';
 import { readEditionContent } from '../catalogue/read-edition.ts';
 import { memoryOfRow } from '../training/member-day.ts';
 import { type ProgrammeEntry, programmeOfMember } from '../training/read-programme.ts';
@@ -28,15 +29,17 @@ export interface LossesRequest {
 /** The cases of these sets that cost the squad most, each with what is behind it. */
 export async function squadLosses(tx: Transaction, request: LossesRequest): Promise<SquadView['lost']> {
   const { clubId, entries, count } = request;
-  const memories = await readMemories(
+  const sets = await loadCaseSets(
     tx,
-    clubId,
     entries.map((entry) => entry.setKey),
   );
+  const memories = await readMemories(tx, clubId, [...sets.values()]);
   const all: Loss[] = [];
   for (const entry of entries) {
+    const set = sets.get(entry.setKey);
+    if (!set) continue;
     const content = await readEditionContent(tx, entry.setKey, entry.edition);
-    all.push(...lossesOf(caseSet(entry.setKey), content, squadOf(request, entry, memories)));
+    all.push(...lossesOf(set, content, squadOf(request, entry, memories)));
   }
   const worst = costliest(all, count);
   const mostly = await explainLosses(tx, request, worst);
@@ -72,20 +75,18 @@ function squadOf(
     });
 }
 
-/** Memory of the club's members, by member and case. */
+/** What the club's members remember of these sets' cases, whichever set they answered them through. */
 async function readMemories(
   tx: Transaction,
   clubId: string,
-  setKeys: readonly string[],
+  sets: readonly CaseSet[],
 ): Promise<Map<string, Map<string, CaseMemory>>> {
   const { caseState } = tables;
   const found = new Map<string, Map<string, CaseMemory>>();
-  if (setKeys.length === 0) return found;
-  const rows = await tx
-    .select()
-    .from(caseState)
-    .where(and(eq(caseState.clubId, clubId), inArray(caseState.setKey, [...setKeys])));
+  if (sets.length === 0) return found;
+  const rows = await tx.select().from(caseState).where(eq(caseState.clubId, clubId));
   for (const row of rows) {
+    if (!sets.some((set) => set.byKey(row.caseKey))) continue;
     const own = found.get(row.memberId) ?? new Map<string, CaseMemory>();
     own.set(row.caseKey, memoryOfRow(row));
     found.set(row.memberId, own);

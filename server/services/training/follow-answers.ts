@@ -1,4 +1,6 @@
+import { and, between, eq } from 'drizzle-orm';
 import { type Transaction, tables } from '#database/client.ts';
+import { loadCaseSet } from '../catalogue/load-set.ts';
 import type { Ctx } from '../context.ts';
 import { completeDays } from '../rollups/complete-days.ts';
 import { rebuildRollups } from '../rollups/rebuild-rollups.ts';
@@ -36,14 +38,18 @@ export async function followAnswers(
   return { returning: await bringBack(ctx, tx, day, stored) };
 }
 
-/** Rollups of the days these answers touch, today's always. */
+/**
+ * Rollups of the days these answers touch, today's always: of every set that has their cases, whichever of them
+ * the answers came through, because memory hangs on the case.
+ */
 export async function writeRollups(
   tx: Transaction,
   day: TrainingDay,
   touched: readonly ReviewRow[],
 ): Promise<void> {
+  if (touched.length === 0) return;
   for (const trained of day.sets) {
-    const rows = touched.filter((row) => row.setKey === trained.entry.setKey);
+    const rows = touched.filter((row) => trained.set.byKey(row.caseKey));
     if (rows.length === 0) continue;
     const earliest = Math.min(...rows.map((row) => row.localDay));
     if (earliest < day.day) {
@@ -51,6 +57,30 @@ export async function writeRollups(
     }
     await writeDay(tx, day, trained);
   }
+  const fromDay = Math.min(...touched.map((row) => row.localDay));
+  for (const setKey of await laidAside(tx, day, fromDay)) {
+    const set = await loadCaseSet(tx, setKey);
+    if (!touched.some((row) => set.byKey(row.caseKey))) continue;
+    await rebuildRollups(tx, day.actor, setKey, { fromDay, toDay: day.day });
+  }
+}
+
+/** Sets the member no longer answers for that have rows of these days: one moves from a subset to the whole. */
+async function laidAside(tx: Transaction, day: TrainingDay, fromDay: number): Promise<string[]> {
+  const { rollup } = tables;
+  const rows = await tx
+    .selectDistinct({ setKey: rollup.setKey })
+    .from(rollup)
+    .where(
+      and(
+        eq(rollup.clubId, day.actor.clubId),
+        eq(rollup.memberId, day.actor.memberId),
+        between(rollup.day, fromDay, day.day),
+      ),
+    );
+  return rows
+    .map(({ setKey }) => setKey)
+    .filter((key) => !day.sets.some(({ entry }) => entry.setKey === key));
 }
 
 /** Issues a missed case again, a few showings on, from a newly drawn angle. */
@@ -67,9 +97,9 @@ async function bringBack(
   const rows: (typeof tables.showing.$inferInsert)[] = [];
   let end = missed.length > 0 ? await lastPosition(tx, day) : 0;
   for (const row of missed) {
-    const trained = day.sets.find((s) => s.entry.setKey === row.setKey);
+    const trained = day.sets.find((s) => s.content.cases.has(row.caseKey));
     const times = day.answers.filter((a) => a.caseKey === row.caseKey).length;
-    if (!trained?.content.cases.has(row.caseKey) || returning.has(row.caseKey)) continue;
+    if (!trained || returning.has(row.caseKey)) continue;
     if (times > MOST_RETURNS || day.open.some((s) => s.caseKey === row.caseKey)) continue;
     const after: number = day.open[Math.min(RETURNS_AFTER, day.open.length) - 1]?.position ?? end + STEP;
     // Several that come back at the same place keep their order.

@@ -1,6 +1,6 @@
 import type { tables } from '#database/client.ts';
 import type { AnswerInput } from '#shared/contracts/today.ts';
-import { caseSet, lostBy, rightAufsBefore } from '#shared/lastlayer/index.ts';
+import { type CaseSet, lostBy, rightAufsBefore } from '#shared/lastlayer/index.ts';
 import { boundTimes, gradeAnswer, localDay, NAMING_LIMIT_MS } from '#shared/memory/index.ts';
 import { Problem } from '../../http/problem.ts';
 import type { EditionContent } from '../catalogue/read-edition.ts';
@@ -18,10 +18,10 @@ export function algorithmShown(content: EditionContent, caseKey: string): string
 /** What is wrong with a raw choice, or null: it must be one of the keys that were offered. */
 export function wrongChoice(
   showing: ShowingRow,
+  set: CaseSet,
   content: EditionContent,
   answer: AnswerInput,
 ): string | null {
-  const set = caseSet(showing.setKey);
   const c = set.byKey(showing.caseKey);
   const offered = c ? (gridsOf(set, content)[gridOf(c)] ?? []) : [];
   const isWord = (OTHER_CHOICES as readonly string[]).includes(answer.named);
@@ -40,11 +40,10 @@ export function wrongChoice(
 export function gradeShowing(
   day: TrainingDay,
   showing: ShowingRow,
-  content: EditionContent,
+  { set, content }: { set: CaseSet; content: EditionContent },
   answer: AnswerInput,
   receivedAt: number,
 ): NewReview {
-  const set = caseSet(showing.setKey);
   const issuedAt = showing.issuedAt.getTime();
   const times = boundTimes({
     issuedAt,

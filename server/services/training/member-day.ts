@@ -1,7 +1,8 @@
 import { and, eq } from 'drizzle-orm';
 import { type Transaction, tables } from '#database/client.ts';
-import { type CaseSet, caseSet } from '#shared/lastlayer/index.ts';
+import type { CaseSet } from '#shared/lastlayer/index.ts';
 import type { CaseMemory } from '#shared/memory/index.ts';
+import { loadCaseSet } from '../catalogue/load-set.ts';
 import { type EditionContent, readEditionContent } from '../catalogue/read-edition.ts';
 import type { ClubActor, Ctx } from '../context.ts';
 import { dayOf } from '../standing/local-date.ts';
@@ -46,7 +47,7 @@ export async function readMemberDay(
   for (const entry of programmeOfMember(await readProgramme(tx, actor.clubId), actor.memberId)) {
     sets.push({
       entry,
-      set: caseSet(entry.setKey),
+      set: await loadCaseSet(tx, entry.setKey),
       content: await readEditionContent(tx, entry.setKey, entry.edition),
     });
   }

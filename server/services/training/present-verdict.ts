@@ -1,10 +1,11 @@
 import type { Transaction } from '#database/client.ts';
 import type { Verdict } from '#shared/contracts/today.ts';
-import { caseSet, differsAt, nearestView, rightAufsBefore, seenThrough } from '#shared/lastlayer/index.ts';
+import { differsAt, nearestView, rightAufsBefore, seenThrough } from '#shared/lastlayer/index.ts';
 import { stickersOf } from '#shared/lastlayer/pictures/index.ts';
 import { caseStateName, dueDay, wantedRecall } from '#shared/memory/index.ts';
 import { findingsText } from '#shared/text/findings.ts';
 import { todayWords } from '#shared/text/today-words.ts';
+import { loadCaseSet } from '../catalogue/load-set.ts';
 import { readEditionContent } from '../catalogue/read-edition.ts';
 import { isoDate } from '../standing/local-date.ts';
 import { betaOf, cardsOf, type DayCard, tellingDay } from './cards.ts';
@@ -38,7 +39,7 @@ async function presentVerdict(
   { row, status, returns }: Judged,
   card: DayCard | null,
 ): Promise<Verdict> {
-  const set = caseSet(row.setKey);
+  const set = await loadCaseSet(tx, row.setKey);
   const content = await readEditionContent(tx, row.setKey, row.editionNumber);
   const algorithm = algorithmShown(content, row.caseKey);
   const named = row.caseRight ? undefined : row.named === 'solved' ? set.skip : set.byKey(row.named);

@@ -2,6 +2,7 @@ import { and, eq, inArray, sql } from 'drizzle-orm';
 import { type Transaction, tables } from '#database/client.ts';
 import type { AnswerInput, AnswersInput, AnswersResult } from '#shared/contracts/today.ts';
 import { Problem } from '../../http/problem.ts';
+import { loadCaseSet } from '../catalogue/load-set.ts';
 import { readEditionContent } from '../catalogue/read-edition.ts';
 import { asMember, type Ctx } from '../context.ts';
 import { bodyHash } from './body-hash.ts';
@@ -128,13 +129,14 @@ async function sortAnswers(
       refuse('This showing was answered before, here or on another device. The first answer stands.');
     } else {
       const content = await readEditionContent(tx, shown.setKey, shown.editionNumber);
-      const wrong = wrongChoice(shown, content, answer);
+      const set = await loadCaseSet(tx, shown.setKey);
+      const wrong = wrongChoice(shown, set, content, answer);
       if (wrong) {
         refuse(wrong);
         continue;
       }
       try {
-        sorted.fresh.push({ answer, row: gradeShowing(day, shown, content, answer, now) });
+        sorted.fresh.push({ answer, row: gradeShowing(day, shown, { set, content }, answer, now) });
         taken.set(shown.showingId, answer.id);
         hashes.set(answer.id, hash);
       } catch (error) {
