@@ -1,4 +1,4 @@
-import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
+import { keepPreviousData, useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
 import type { Problem } from '#shared/contracts/common.ts';
 import { type Call, call, callKey, type Endpoint, fillPath } from '#shared/contracts/endpoint.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
@@ -69,10 +69,21 @@ export async function send<I, O>({ endpoint, input }: Call<I, O>): Promise<O> {
   throw new ApiError(res.status, problem);
 }
 
-/** Reads an endpoint: on the server and right after it, the answer is there already. */
-export function useCall<I, O>(endpoint: Endpoint<I, O>, input: I) {
+/**
+ * Reads an endpoint: on the server and right after it, the answer is there already. With `keepWhileLoading` the
+ * answer to the input before stays until the new one is there: for filters, which would make the page flicker.
+ */
+export function useCall<I, O>(
+  endpoint: Endpoint<I, O>,
+  input: I,
+  { keepWhileLoading = false }: { keepWhileLoading?: boolean } = {},
+) {
   const c = call(endpoint, input);
-  return useQuery<O, ApiError>({ queryKey: callKey(c as Call<unknown, unknown>), queryFn: () => send(c) });
+  return useQuery<O, ApiError>({
+    queryKey: callKey(c as Call<unknown, unknown>),
+    queryFn: () => send(c),
+    placeholderData: keepWhileLoading ? keepPreviousData : undefined,
+  });
 }
 
 /** Writes through an endpoint; `onDone` usually puts the answer into the cache with `useStore`. */

@@ -4,6 +4,8 @@ import { endpoints } from '#shared/contracts/endpoints.ts';
 import { catalogueText } from '#shared/text/catalogue.ts';
 import { CatalogueFrame } from './catalogue-frame.tsx';
 import { EditionPage } from './edition/edition-page.tsx';
+import { setInput } from './set/set-input.ts';
+import { SetPage } from './set/set-page.tsx';
 import { SetsPage } from './sets/sets-page.tsx';
 
 // Addresses of one word stand before those with a set's key in that place.
@@ -13,6 +15,12 @@ const routes: readonly AreaRoute[] = [
     title: catalogueText.sets.title,
     Page: SetsPage,
     calls: () => [call(endpoints.catalogue, {})],
+  },
+  {
+    path: '/catalogue/:setKey',
+    title: catalogueText.set.title,
+    Page: SetPage,
+    calls: ({ setKey = '' }, search) => [call(endpoints.catalogueSet, setInput(setKey, search))],
   },
   {
     path: '/catalogue/:setKey/editions/:number',

@@ -63,6 +63,62 @@ export const catalogueText = {
     noEdition: 'no edition yet',
     toIntake: 'Bring in a file',
   },
+  set: {
+    title: 'Case set',
+    lead: (entry: string, toldApart: string, solved: string) =>
+      `Reached with ${entry}. Told apart: ${toldApart}. Solved: ${solved}.`,
+    cases: (n: number) => (n === 1 ? 'case beside the skip' : 'cases beside the skip'),
+    skip: 'solves skip it',
+    withAlgorithm: (n: number, of: number) => (n === of ? 'all' : `${numberText.whole(n)}`),
+    withAlgorithmLabel: 'with an algorithm',
+    sheet: 'Algorithm sheet',
+    csv: 'Cases, CSV',
+    csvFile: (setKey: string) => `${setKey}-cases.csv`,
+    csvColumns: ['number', 'case', 'alias', 'group', 'angles', 'weight', 'of', 'algorithms'],
+    csvFailed: 'The file could not be made. Try again.',
+    noEdition: 'No edition is published yet: the cases are there, algorithms are not.',
+    showIn: 'shown in edition',
+    find: 'Find',
+    findHint: 'name, number or moves',
+    group: 'Group',
+    allGroups: 'all groups',
+    angles: 'Angles',
+    anyAngles: 'any',
+    algorithms: 'Algorithms',
+    anyAlgorithms: 'with or without',
+    with: 'with',
+    without: 'without',
+    choice: (name: string, cases: number) => `${name} (${numberText.whole(cases)})`,
+    show: 'Show',
+    shown: (from: number, to: number, found: number, all: number) => {
+      const of =
+        found === all
+          ? numberText.whole(all)
+          : `${numberText.whole(found)} found among ${numberText.whole(all)}`;
+      if (found === 0) return `None of ${numberText.whole(all)}`;
+      return to - from + 1 === found
+        ? `${of} ${all === 1 ? 'case' : 'cases'}`
+        : `${numberText.whole(from)} to ${numberText.whole(to)} of ${of} cases`;
+    },
+    caption: 'Cases of the set',
+    columns: {
+      picture: 'picture',
+      name: 'case',
+      number: 'number',
+      group: 'group',
+      prior: 'prior',
+      angles: 'angles',
+      algorithm: 'algorithm',
+    },
+    noGroup: '–',
+    noAlgorithm: 'none yet',
+    more: (n: number) => `and ${n} more`,
+    none: 'No case fits.',
+    showAll: 'Show all',
+    pages: 'Pages',
+    previous: 'Previous page',
+    next: 'Next page',
+  },
   edition: {
     title: (set: string, number: number) => `${set}, edition ${number}`,
     loading: 'Reading the edition',

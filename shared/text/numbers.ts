@@ -10,6 +10,8 @@ export const numberText = {
   /** A prior as one in how many: whole where it is, else with two decimals at most. */
   oneIn: ({ weight, total }: { readonly weight: number; readonly total: number }) =>
     `1 in ${(total / weight).toLocaleString('en-GB', { maximumFractionDigits: 2 })}`,
+  /** A whole number, thousands set off. */
+  whole: (n: number) => n.toLocaleString('en-GB'),
   count: (n: number, one: string, many: string) => `${n} ${n === 1 ? one : many}`,
   /** A change with its sign: `+2`, `−6`, `0`. */
   points: (n: number) => {

@@ -28,7 +28,11 @@ const COLUMNS: readonly LedgerColumn<SetRow>[] = [
     rowHeader: true,
     className: 'lg:w-28 align-top',
     stacked: '',
-    cell: ({ name }) => <span className="text-xl leading-6">{name}</span>,
+    cell: ({ setKey, name }) => (
+      <TextLink href={`/catalogue/${setKey}`} className="text-xl leading-6">
+        {name}
+      </TextLink>
+    ),
   },
   {
     key: 'entry',

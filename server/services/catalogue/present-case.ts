@@ -13,7 +13,7 @@ export function presentCaseOfCatalogue(
     name,
     alias,
     group,
-    prior: { weight: c.weight, total: set.states },
+    prior: { weight: c.weight, total: set.total },
     angles: c.angles,
   };
 }

@@ -33,7 +33,7 @@ export async function showSet(ctx: Ctx, input: CatalogueSetInput): Promise<Catal
       edition: content?.number ?? null,
       editions: [...editions],
       cases: all.length,
-      skip: { key: set.skip.key, prior: { weight: set.skip.weight, total: set.states } },
+      skip: { key: set.skip.key, prior: { weight: set.skip.weight, total: set.total } },
       withAlgorithm: all.filter(({ algorithms }) => algorithms.length > 0).length,
       groups: groupsOf(all),
       angles: ([4, 2, 1] as const).map((angles) => ({

@@ -1,0 +1,127 @@
+import { type FormEvent, useEffect, useRef, useState } from 'react';
+import { useLocation, useNavigate, useSearchParams } from 'react-router';
+import { queryHref } from '#renderer/query-href.ts';
+import { Button, SelectField, TextField } from '#renderer/ui/index.ts';
+import { useScripts } from '#renderer/use-scripts.ts';
+import type { CatalogueSetView } from '#shared/contracts/catalogue.ts';
+import { catalogueText } from '#shared/text/catalogue.ts';
+
+const text = catalogueText.set;
+
+/** A moment's rest in typing: browsers limit how often an address may change. */
+const REST_MS = 250;
+
+/** What narrows the list. It all stands in the address, and works as a plain form before scripts are there. */
+export function SetFilters({ view }: { view: CatalogueSetView }) {
+  const [search] = useSearchParams();
+  const { pathname } = useLocation();
+  const navigate = useNavigate();
+  const scripts = useScripts();
+  const at = (name: string) => search.get(name) ?? '';
+  const change = (part: Record<string, string>) => {
+    const words = Object.entries(part).map(([name, value]) => [name, value.trim() === '' ? null : value]);
+    const href = queryHref(search, pathname, { ...Object.fromEntries(words), after: null, before: null });
+    void navigate(href, { replace: true, preventScrollReset: true });
+  };
+  const submit = (event: FormEvent<HTMLFormElement>) => {
+    event.preventDefault();
+    const data = new FormData(event.currentTarget);
+    change({ q: String(data.get('q') ?? '') });
+  };
+  return (
+    <search className="screen-only block pb-4">
+      <form
+        action={pathname}
+        method="get"
+        onSubmit={submit}
+        className="grid grid-cols-2 items-end gap-x-4 gap-y-3 lg:grid-cols-[minmax(0,2fr)_minmax(0,1.4fr)_minmax(0,1fr)_minmax(0,1fr)_auto]"
+      >
+        {['sort', 'edition'].map((name) =>
+          at(name) ? <input key={name} type="hidden" name={name} value={at(name)} /> : null,
+        )}
+        <div className="col-span-2 lg:col-span-1">
+          <FindField inAddress={at('q')} onFind={(q) => change({ q })} />
+        </div>
+        <SelectField
+          id="set-group"
+          name="group"
+          label={text.group}
+          value={at('group')}
+          disabled={view.groups.length === 0}
+          onChange={(event) => change({ group: event.target.value })}
+          options={[
+            { value: '', label: text.allGroups },
+            ...view.groups.map(({ name, cases }) => ({ value: name, label: text.choice(name, cases) })),
+          ]}
+        />
+        <SelectField
+          id="set-angles"
+          name="angles"
+          label={text.angles}
+          value={at('angles')}
+          onChange={(event) => change({ angles: event.target.value })}
+          options={[
+            { value: '', label: text.anyAngles },
+            ...view.angles.map(({ angles, cases }) => ({
+              value: String(angles),
+              label: text.choice(String(angles), cases),
+            })),
+          ]}
+        />
+        <SelectField
+          id="set-algorithms"
+          name="algorithms"
+          label={text.algorithms}
+          value={at('algorithms')}
+          onChange={(event) => change({ algorithms: event.target.value })}
+          options={[
+            { value: '', label: text.anyAlgorithms },
+            { value: 'with', label: text.choice(text.with, view.withAlgorithm) },
+            { value: 'without', label: text.choice(text.without, view.cases - view.withAlgorithm) },
+          ]}
+        />
+        {!scripts && (
+          <Button kind="outlined" type="submit">
+            {text.show}
+          </Button>
+        )}
+      </form>
+    </search>
+  );
+}
+
+/** The letters are the field's own; the address follows when typing rests, and leads when it changes by itself. */
+function FindField({ inAddress, onFind }: { inAddress: string; onFind: (text: string) => void }) {
+  const [letters, setLetters] = useState(inAddress);
+  const written = useRef(inAddress);
+  const find = useRef(onFind);
+  useEffect(() => {
+    find.current = onFind;
+  });
+  useEffect(() => {
+    if (inAddress === written.current) return;
+    written.current = inAddress;
+    setLetters(inAddress);
+  }, [inAddress]);
+  useEffect(() => {
+    if (letters === written.current) return;
+    const timer = setTimeout(() => {
+      written.current = letters;
+      find.current(letters);
+    }, REST_MS);
+    return () => clearTimeout(timer);
+  }, [letters]);
+  return (
+    <TextField
+      id="set-find"
+      name="q"
+      type="search"
+      label={text.find}
+      placeholder={text.findHint}
+      value={letters}
+      maxLength={100}
+      autoComplete="off"
+      onChange={(event) => setLetters(event.target.value)}
+    />
+  );
+}

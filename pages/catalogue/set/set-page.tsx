@@ -1,0 +1,73 @@
+import { useEffect } from 'react';
+import { useParams, useSearchParams } from 'react-router';
+import { useCall } from '#renderer/api.ts';
+import { Awaited } from '#renderer/awaited.tsx';
+import { BigNumber, BigNumbers, LinkButton, PageTitle } from '#renderer/ui/index.ts';
+import type { CatalogueSetView } from '#shared/contracts/catalogue.ts';
+import { endpoints } from '#shared/contracts/endpoints.ts';
+import { catalogueText } from '#shared/text/catalogue.ts';
+import { numberText } from '#shared/text/numbers.ts';
+import { shellText } from '#shared/text/shell.ts';
+import { CasesCsvButton } from './cases-csv.tsx';
+import { CasesTable } from './cases-table.tsx';
+import { EditionLinks } from './edition-links.tsx';
+import { SetFilters } from './set-filters.tsx';
+import { setInput, wordsOf } from './set-input.ts';
+
+const text = catalogueText.set;
+
+/** A set's cases: what it is, how many, and each with its picture, prior and algorithm. */
+export function SetPage() {
+  const { setKey = '' } = useParams();
+  const [search] = useSearchParams();
+  const query = useCall(endpoints.catalogueSet, setInput(setKey, wordsOf(search)), {
+    keepWhileLoading: true,
+  });
+  const title = query.data?.setName ?? text.title;
+  useEffect(() => {
+    document.title = `${title} · ${shellText.product}`;
+  }, [title]);
+  return (
+    <Awaited query={query}>
+      {(view) => (
+        <>
+          <SetHead view={view} />
+          <SetFilters key={setKey} view={view} />
+          <CasesTable view={view} />
+        </>
+      )}
+    </Awaited>
+  );
+}
+
+function SetHead({ view }: { view: CatalogueSetView }) {
+  const { setKey, setName, edition, cases, skip, withAlgorithm } = view;
+  const { entry, aspects } = catalogueText.sets;
+  return (
+    <>
+      <PageTitle
+        title={setName}
+        lead={text.lead(entry(view.entry), aspects(view.toldApart), aspects(view.solved))}
+      >
+        {edition !== null && (
+          <LinkButton kind="outlined" href={`/catalogue/${setKey}/sheet`}>
+            {text.sheet}
+          </LinkButton>
+        )}
+        <CasesCsvButton setKey={setKey} />
+      </PageTitle>
+      <div className="flex flex-wrap items-end justify-between gap-x-8 gap-y-4 pb-5">
+        <BigNumbers>
+          <BigNumber value={numberText.whole(cases)} label={text.cases(cases)} />
+          <BigNumber tone="quiet" value={numberText.oneIn(skip.prior)} label={text.skip} />
+          <BigNumber
+            tone="quiet"
+            value={text.withAlgorithm(withAlgorithm, cases)}
+            label={text.withAlgorithmLabel}
+          />
+        </BigNumbers>
+        <EditionLinks view={view} />
+      </div>
+    </>
+  );
+}
