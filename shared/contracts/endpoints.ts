@@ -23,7 +23,9 @@ import type {
   SettleLineInput,
   UploadInput,
 } from './intake.ts';
+import type { LedgerCasesInput, LedgerCasesView, LedgerInput, LedgerView } from './ledger.ts';
 import type { ClubView, FormView, MemberSettings, MyCasesView, MyCaseView } from './member.ts';
+import type { PictureSettings } from './pictures.ts';
 import type { SessionView, SignedIn, SignInInput, SignInPage, SwitchClubInput } from './session.ts';
 import type { AnswersInput, AnswersResult, MisTapInput, TodayView } from './today.ts';
 
@@ -37,6 +39,10 @@ export const endpoints = {
   refreshSession: endpoint<Nothing, SessionView>('refreshSession', 'POST', '/api/session/refresh'),
   switchClub: endpoint<SwitchClubInput, SignedIn>('switchClub', 'POST', '/api/session/club'),
   signOut: endpoint<Nothing, Nothing>('signOut', 'DELETE', '/api/session'),
+  changePictures: endpoint<PictureSettings, PictureSettings>('changePictures', 'PUT', '/api/pictures'),
+
+  ledger: endpoint<LedgerInput, LedgerView>('ledger', 'GET', '/api/ledger'),
+  ledgerCases: endpoint<LedgerCasesInput, LedgerCasesView>('ledgerCases', 'GET', '/api/ledger/cases'),
 
   today: endpoint<Nothing, TodayView>('today', 'GET', '/api/today'),
   answer: endpoint<AnswersInput, AnswersResult>('answer', 'POST', '/api/today/answers'),

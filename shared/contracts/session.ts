@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { uuid } from './common.ts';
+import { pictureSettings } from './pictures.ts';
 
 export const signInInput = z.strictObject({
   signIn: z.string().trim().min(1, 'Type your e-mail address or sign-in name.').max(254),
@@ -21,6 +22,8 @@ export const sessionView = z.strictObject({
   club: z.strictObject({ clubId: uuid, name: z.string() }).nullable(),
   clubs: z.array(clubOfMine),
   isAdministrator: z.boolean(),
+  /** How this person wants pictures drawn. */
+  pictures: pictureSettings,
 });
 export type SessionView = z.infer<typeof sessionView>;
 

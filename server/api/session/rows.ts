@@ -1,6 +1,8 @@
 import { z } from 'zod';
 import { endpoints } from '#shared/contracts/endpoints.ts';
+import { changePicturesInput, pictureSettings } from '#shared/contracts/pictures.ts';
 import { sessionView } from '#shared/contracts/session.ts';
+import { changePictures } from '../../services/pictures/change-pictures.ts';
 import { readSession } from '../../services/session/read-session.ts';
 import { defineRow } from '../define-row.ts';
 
@@ -14,5 +16,12 @@ export const sessionRows = {
     input: nothing,
     output: sessionView,
     service: readSession,
+  }),
+  changePictures: defineRow({
+    endpoint: endpoints.changePictures,
+    who: 'signed-in',
+    input: changePicturesInput,
+    output: pictureSettings,
+    service: changePictures,
   }),
 };

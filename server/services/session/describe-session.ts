@@ -20,7 +20,7 @@ export async function membershipsOf(db: Database | Transaction, accountId: strin
 export function presentSession(
   memberships: readonly MembershipRow[],
   session: { role: Role; clubId: string | null },
-  isAdministrator: boolean,
+  { isAdministrator, pictures }: Pick<SessionView, 'isAdministrator' | 'pictures'>,
 ): SessionView {
   const here = memberships.find((m) => m.club_id === session.clubId);
   return {
@@ -34,6 +34,7 @@ export function presentSession(
       nickname: m.nickname,
     })),
     isAdministrator,
+    pictures,
   };
 }
 

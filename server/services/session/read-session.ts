@@ -2,6 +2,7 @@ import { sql } from 'drizzle-orm';
 import type { SessionView } from '#shared/contracts/session.ts';
 import { signedOut } from '../../http/problem.ts';
 import type { Ctx } from '../context.ts';
+import { picturesOf } from '../pictures/read-pictures.ts';
 import { membershipsOf, presentSession } from './describe-session.ts';
 import { sessionSubject } from './session-subject.ts';
 
@@ -17,6 +18,7 @@ export async function readSession(ctx: Ctx): Promise<SessionView> {
     const memberships = await membershipsOf(tx, claims.accountId);
     const isAdministrator =
       claims.role === 'administrator' || (await sessionSubject(tx, claims.accountId, null)) !== null;
-    return presentSession(memberships, claims, isAdministrator);
+    const pictures = await picturesOf(tx, claims.accountId);
+    return presentSession(memberships, claims, { isAdministrator, pictures });
   });
 }

@@ -4,6 +4,7 @@ import type { SignedIn, SignInInput } from '#shared/contracts/session.ts';
 import { hashPassword, needsRehash, verifyPassword } from '../../auth/passwords.ts';
 import { newRefreshToken, REFRESH_SECONDS, signAccessToken } from '../../auth/tokens.ts';
 import { Problem } from '../../http/problem.ts';
+import { picturesOf } from '../pictures/read-pictures.ts';
 import { homeOf, membershipsOf, presentSession } from './describe-session.ts';
 import type { SessionCtx, Tokens } from './session-context.ts';
 import { sessionSubject } from './session-subject.ts';
@@ -60,7 +61,14 @@ export async function signIn(
     tokens: { access, refresh: refresh.token },
     signedIn: {
       next: homeOf(subject.role),
-      session: presentSession(memberships, { role: subject.role, clubId }, account.is_administrator),
+      session: presentSession(
+        memberships,
+        { role: subject.role, clubId },
+        {
+          isAdministrator: account.is_administrator,
+          pictures: await picturesOf(ctx.db, account.account_id),
+        },
+      ),
     },
   };
 }

@@ -1,5 +1,6 @@
 import type { SignedIn, SwitchClubInput } from '#shared/contracts/session.ts';
 import { notFound, signedOut } from '../../http/problem.ts';
+import { picturesOf } from '../pictures/read-pictures.ts';
 import { homeOf, membershipsOf, presentSession } from './describe-session.ts';
 import { refreshSession } from './refresh-session.ts';
 import type { SessionCtx, Tokens } from './session-context.ts';
@@ -19,8 +20,12 @@ export async function switchClub(
   const { tokens, claims } = await refreshSession(ctx, refreshToken, { clubId: input.clubId });
   const memberships = await membershipsOf(ctx.db, claims.accountId);
   const isAdministrator = (await sessionSubject(ctx.db, claims.accountId, null)) !== null;
+  const pictures = await picturesOf(ctx.db, claims.accountId);
   return {
     tokens,
-    signedIn: { next: homeOf(claims.role), session: presentSession(memberships, claims, isAdministrator) },
+    signedIn: {
+      next: homeOf(claims.role),
+      session: presentSession(memberships, claims, { isAdministrator, pictures }),
+    },
   };
 }
