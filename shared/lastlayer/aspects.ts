@@ -96,6 +96,13 @@ export function isSolvedIn(index: number, aspects: readonly Aspect[]): boolean {
 export type View = number;
 export const VIEWS = 24 * 24 * TWISTS * FLIPS;
 
+/** What of a state is seen. `index` 0..62207. */
+export const viewOf = (index: number, aspects: readonly Aspect[]): View => {
+  const sees = (aspect: Aspect, value: number): number => (aspects.includes(aspect) ? value : 0);
+  const permutations = sees('cp', cornerRank(index)) * 24 + sees('ep', edgeRank(index));
+  return (permutations * TWISTS + sees('co', twistOf(index))) * FLIPS + sees('eo', flipOf(index));
+};
+
 /**
  * The sixteen images of views through these aspects, as `(view, turn) => view` with turn = before·4 + after.
  * An aspect not looked at stays solved.

@@ -1,8 +1,6 @@
-/** Counts of cases for any step, and the lemma they are checked against. */
-import { AUFS, type Auf, act } from './action.ts';
+/** Counts of cases for any step. */
 import { type Aspect, type Entry, inOrder } from './aspects.ts';
 import { classify } from './classes.ts';
-import { STATES } from './state.ts';
 
 export interface CaseCount {
   readonly entry: Entry;
@@ -29,25 +27,4 @@ export function countCases(entry: Entry, aspects: readonly Aspect[]): CaseCount 
       .map(([weight, cases]) => ({ weight, cases }))
       .sort((one, other) => one.weight - other.weight),
   };
-}
-
-export interface FixedStates {
-  readonly before: Auf;
-  readonly after: Auf;
-  /** States that this element of the sixteen-fold action leaves as they are. */
-  readonly fixed: number;
-}
-
-/**
- * Burnside's table by enumeration: the number of states fixed by each of the sixteen elements. Their mean
- * is the number of cases of the full last layer (Cauchy–Frobenius lemma).
- */
-export function burnsideTable(): readonly FixedStates[] {
-  return AUFS.flatMap((before) =>
-    AUFS.map((after) => {
-      let fixed = 0;
-      for (let index = 0; index < STATES; index++) if (act(index, before, after) === index) fixed++;
-      return { before, after, fixed };
-    }),
-  );
 }

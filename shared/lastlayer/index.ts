@@ -14,6 +14,7 @@ export {
   isSolvedIn,
   seenThrough,
 } from './aspects.ts';
+export { burnsideOf, type FixedStates } from './burnside.ts';
 export {
   type CaseLine,
   type Finding,
@@ -24,9 +25,11 @@ export {
 export { buildCaseSet, type CaseOfSet, type CaseSet, caseSet } from './case-set.ts';
 export { OFFERED_WHOLE } from './clusters.ts';
 export { type Confusable, type ConfusableOptions, confusableWith } from './confusable.ts';
-export { burnsideTable, type CaseCount, countCases, type FixedStates } from './counting.ts';
+export { type CaseCount, countCases } from './counting.ts';
 export { type Difference, differsAt } from './differs-at.ts';
 export { type Facelets, type Frame, faceletsAfter, playAlgorithm } from './facelets.ts';
+export { type Fraction, fraction } from './fractions.ts';
+export { type Ledger, type LedgerClass, type LedgerCount, ledgerOf } from './ledger.ts';
 export { type LostBy, lostBy } from './lost-by.ts';
 export { type EntryShare, MOST_PARTS, meetOf } from './mix.ts';
 export { countMoves, type MoveCounts, moveCounts } from './move-counts.ts';
@@ -34,6 +37,14 @@ export type { Move } from './moves.ts';
 export { nearestView } from './nearest-view.ts';
 export { type Expander, type ParsedAlgorithm, parseAlgorithm } from './notation.ts';
 export { type Reading, readAlgorithm } from './reading.ts';
+export {
+  hasInverse,
+  inverseOf,
+  mirrorInverseOf,
+  orientationOf,
+  permutationOf,
+  stabiliser,
+} from './relations.ts';
 export { cancelledKey, sameAlgorithm } from './same-algorithm.ts';
 export { AlgorithmSyntaxError } from './scanner.ts';
 export type { Holding } from './seat-codes.ts';

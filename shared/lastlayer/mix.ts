@@ -1,6 +1,7 @@
 /** Mixes of entries: a solver who only sometimes has more done on arrival, and what that does to the priors. */
 import { type Entry, entryFixing, fixedBy, isEntryState } from './aspects.ts';
 import type { Classes } from './classes.ts';
+import { greatestDivisor } from './fractions.ts';
 import { STATES } from './state.ts';
 
 /** So many parts of the solves arrive with this entry: 2 parts and 3 parts are 40 % and 60 %. */
@@ -22,9 +23,6 @@ export function meetOf(entries: readonly Entry[]): Entry {
   if (!first) throw new RangeError('A mix needs entries.');
   return entryFixing(first.filter((aspect) => rest.every((fixed) => fixed.includes(aspect))))!;
 }
-
-export const greatestDivisor = (one: number, other: number): number =>
-  other === 0 ? one : greatestDivisor(other, one % other);
 
 export interface Deal {
   /** Chance of each class of being dealt, in `total`ths: whole numbers, in lowest terms all together. */

@@ -1,6 +1,6 @@
 /** What an algorithm does for the cases of a set, and the AUFs that go with it. */
 import { AUFS, type Auf, act, inverse, PERMUTATION_ACT, product } from './action.ts';
-import { type Aspect, fixedBy, isSolvedIn } from './aspects.ts';
+import { type Aspect, fixedBy, isEntryState, isSolvedIn } from './aspects.ts';
 import type { CaseOfSet, CaseSet } from './case-set.ts';
 import { type Expander, parseMoves } from './notation.ts';
 import { type Reading, readAlgorithm, stateSolved } from './reading.ts';
@@ -10,29 +10,37 @@ export type Solves =
   | { readonly kind: 'case' | 'skip'; readonly case: CaseOfSet; readonly normalised: string }
   | {
       readonly kind: 'not-in-set';
-      /** Aspects done on entry that the algorithm undoes. */
+      /** Aspects done on entry that the algorithm undoes; none if its case is one the set has left out. */
       readonly undoes: readonly Aspect[];
       readonly normalised: string;
     }
   | Exclude<Reading, { kind: 'state' }>;
 
+/** A permutation of this parity that counts as done: the identity, or one quarter turn of the top. */
+const doneWith = (rank: number): number => (PARITY[rank] === 0 ? 0 : PERMUTATION_ACT[1]!);
+
 /**
  * The state with the aspects that are done on entry, and that the set's algorithms need not keep, taken as
- * done: an algorithm may do with them what it likes.
+ * done: an algorithm may do with them what it likes. A permutation so freed is turned as the other one is if that
+ * is done too, and else as the other one's parity asks.
  */
 function withEntryDone(set: CaseSet, state: number): number {
   const { entry, solved } = set.definition;
-  const free = fixedBy(entry).filter((aspect) => !solved.includes(aspect));
-  if (free.length === 0) return state;
-  const edges = edgeRank(state);
-  // Corners count as permuted up to AUF: one turn of the top round where the edges' parity asks for it.
-  const permuted = PARITY[edges] === 0 ? 0 : PERMUTATION_ACT[1]!;
-  return indexOf(
-    free.includes('cp') ? permuted : cornerRank(state),
-    free.includes('co') ? 0 : twistOf(state),
-    edges,
-    free.includes('eo') ? 0 : flipOf(state),
-  );
+  const done = fixedBy(entry);
+  const isFree = (aspect: Aspect) => done.includes(aspect) && !solved.includes(aspect);
+  let [corners, edges] = [cornerRank(state), edgeRank(state)];
+  if (isFree('cp') && isFree('ep')) [corners, edges] = [0, 0];
+  else if (isFree('cp')) corners = done.includes('ep') ? edges : doneWith(edges);
+  else if (isFree('ep')) edges = done.includes('cp') ? corners : doneWith(corners);
+  return indexOf(corners, isFree('co') ? 0 : twistOf(state), edges, isFree('eo') ? 0 : flipOf(state));
+}
+
+/** The aspects done on entry that a state does not have done; of two that are turned apart, the edges'. */
+function undoneBy(set: CaseSet, state: number): readonly Aspect[] {
+  const { entry, solved } = set.definition;
+  if (isEntryState(entry, state)) return [];
+  const undone = fixedBy(entry).filter((aspect) => solved.includes(aspect) && !isSolvedIn(state, [aspect]));
+  return undone.length > 0 ? undone : ['ep'];
 }
 
 /**
@@ -48,8 +56,7 @@ export function solvesCase(set: CaseSet, text: string, expand?: Expander): Solve
   const state = withEntryDone(set, reading.state);
   const solved = set.caseOfState(state);
   if (solved) return { kind: solved.skip ? 'skip' : 'case', case: solved, normalised };
-  const undoes = fixedBy(set.definition.entry).filter((aspect) => !isSolvedIn(state, [aspect]));
-  return { kind: 'not-in-set', undoes, normalised };
+  return { kind: 'not-in-set', undoes: undoneBy(set, state), normalised };
 }
 
 /** What an algorithm does to the last layer as a state, or null if it breaks the first two layers. */
