@@ -45,6 +45,7 @@ export {
   permutationOf,
   stabiliser,
 } from './relations.ts';
+export { type Look, type TwoLookRoute, twoLookRoutes } from './routes.ts';
 export { cancelledKey, sameAlgorithm } from './same-algorithm.ts';
 export { AlgorithmSyntaxError } from './scanner.ts';
 export type { Holding } from './seat-codes.ts';

@@ -59,8 +59,11 @@ export function solvesCase(set: CaseSet, text: string, expand?: Expander): Solve
   return { kind: 'not-in-set', undoes: undoneBy(set, state), normalised };
 }
 
-/** What an algorithm does to the last layer as a state, or null if it breaks the first two layers. */
-function effectOf(algorithm: string): number | null {
+/**
+ * What an algorithm does to the last layer as a state, or null if it breaks the first two layers.
+ * @throws AlgorithmSyntaxError if the algorithm cannot be read.
+ */
+export function effectOf(algorithm: string): number | null {
   const state = stateSolved(parseMoves(algorithm));
   return state === null ? null : inverse(state);
 }
