@@ -30,6 +30,9 @@ export function facesHeld(holding: Holding): Faces {
   };
 }
 
+/** How far outside a sticker its mark runs. */
+const RING = 5;
+
 /** One sticker of a face at column a and row b, in units of the drawing; gaps as the body has them. */
 export function faceTile(
   map: FaceMap,
@@ -41,7 +44,15 @@ export function faceTile(
   const [gap, radius] = body === 'black' ? [5, 8.5] : [1.6, 11];
   return {
     path: tilePath(map, a + gap, b + gap, a + CELL - gap, b + CELL - gap, radius),
-    hatch: hatchPath(map, a + gap + 3, b + gap + 3, a + CELL - gap - 3, b + CELL - gap - 3, 15),
+    hatch: hatchPath(map, a + gap + 3, b + gap + 3, a + CELL - gap - 3, b + CELL - gap - 3, 17),
+    ring: tilePath(
+      map,
+      a + gap - RING,
+      b + gap - RING,
+      a + CELL - gap + RING,
+      b + CELL - gap + RING,
+      radius + RING,
+    ),
     middle: map(a + CELL / 2, b + CELL / 2),
     letterSize,
   };

@@ -24,6 +24,8 @@ const BAR = 8.6;
 /** From the top's outer edge to the bar's near edge. */
 const GAP = 6;
 const RADIUS = 1.4;
+/** How far outside a sticker its mark runs. */
+const RING = 1.9;
 
 export const FLAT_VIEW_BOX = '-16 -16 104 112';
 
@@ -33,6 +35,7 @@ function tile(x: number, y: number, width: number, height: number): Tile {
   return {
     path: tilePath(flat, x, y, x + width, y + height, RADIUS),
     hatch: hatchPath(flat, x + 1, y + 1, x + width - 1, y + height - 1, 4),
+    ring: tilePath(flat, x - RING, y - RING, x + width + RING, y + height + RING, RADIUS + RING),
     middle: [x + width / 2, y + height / 2],
     letterSize: Math.min(width, height) > BAR ? 14 : 8,
   };

@@ -22,13 +22,19 @@ export function sitesApart(one: Stickers, other: Stickers, view: PictureView): r
 export const isMarked = (marks: readonly Site[], [side, index]: Site): boolean =>
   marks.some(([markedSide, markedIndex]) => markedSide === side && markedIndex === index);
 
-/** Widths of the outline's light band and of the dark line in it, in units of the drawing. */
-const BANDS = { cube: [15, 5], flat: [5.4, 2.2] } as const;
+/** Widths of the ring's bed and of its line, in units of the drawing. */
+const RINGS = {
+  cube: { bed: 11, line: 5, bedColour: INK, lineColour: HATCH_PAPER },
+  flat: { bed: 5.4, line: 2.8, bedColour: HATCH_PAPER, lineColour: INK },
+} as const;
 
-/** A light band with a dark line in it: one of the two is seen against any shade, plastic or paper. */
+/**
+ * A ring just outside a sticker, so that nothing of it is covered: light in a bed of plastic on the cube, ink in
+ * a bed of paper on the flat view.
+ */
 export function markMarkup(tile: Tile, kind: 'cube' | 'flat'): string {
-  const [band, line] = BANDS[kind];
+  const { bed, line, bedColour, lineColour } = RINGS[kind];
   const stroke = (part: string, colour: string, width: number) =>
-    `<path class="${kind}-${part}" d="${tile.path}" fill="none" stroke="${colour}" stroke-width="${width}" stroke-linejoin="round"/>`;
-  return stroke('mark-band', HATCH_PAPER, band) + stroke('mark-line', INK, line);
+    `<path class="${kind}-mark-${part}" d="${tile.ring}" fill="none" stroke="${colour}" stroke-width="${width}" stroke-linejoin="round"/>`;
+  return stroke('bed', bedColour, bed) + stroke('line', lineColour, line);
 }

@@ -43,6 +43,7 @@ function scene(holding: Holding, body: Palette['body']): Scene {
   const centre = (map: FaceMap, a: number, letterSize: number): Tile => ({
     path: tilePath(map, a + 6.5, CELL + 10.5, a + CELL - 6.5, CELL + FOOT - 6.5, 4.5),
     hatch: '',
+    ring: '',
     middle: map(a + CELL / 2, CELL + 2 + FOOT / 2),
     letterSize,
   });

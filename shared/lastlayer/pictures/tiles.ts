@@ -15,6 +15,8 @@ const HAIRLINE = '#8D949E';
 export interface Tile {
   readonly path: string;
   readonly hatch: string;
+  /** An outline a little outside the sticker, for marks; empty where none is ever marked. */
+  readonly ring: string;
   readonly middle: Point;
   /** Height of the letter in drawing units. */
   readonly letterSize: number;
@@ -40,7 +42,7 @@ export function colourOf(sticker: Sticker, colouring: Colouring): ColourName | n
 export function tileMarkup(tile: Tile, sticker: Sticker, style: TileStyle): string {
   const colour = colourOf(sticker, style.colouring);
   if (colour === null) {
-    const thin = `stroke="${HATCH_INK}" stroke-width="${style.kind === 'flat' ? 1.1 : 1.6}"`;
+    const thin = `stroke="${HATCH_INK}" stroke-width="${style.kind === 'flat' ? 1.1 : 2.4}"`;
     return (
       `<path class="${style.kind}-blank" d="${tile.path}" fill="${HATCH_PAPER}" ${thin}/>` +
       `<path class="${style.kind}-hatch" d="${tile.hatch}" fill="none" ${thin}/>`
