@@ -1,6 +1,8 @@
 import type {
+  CatalogueCaseInput,
   CatalogueCasesInput,
   CatalogueCasesView,
+  CatalogueCaseView,
   CatalogueSetInput,
   CatalogueSetView,
   CatalogueView,
@@ -93,6 +95,11 @@ export const endpoints = {
     'catalogueCases',
     'GET',
     '/api/catalogue/sets/:setKey/cases',
+  ),
+  catalogueCase: endpoint<CatalogueCaseInput, CatalogueCaseView>(
+    'catalogueCase',
+    'GET',
+    '/api/catalogue/sets/:setKey/cases/:caseKey',
   ),
   edition: endpoint<{ setKey: string; number: number }, EditionView>(
     'edition',

@@ -16,9 +16,12 @@ it('lists every set with what it is and its editions', async () => {
     setKey: 'pll',
     name: 'PLL',
     entry: 'co+eo',
+    mix: [],
     toldApart: ['cp', 'ep'],
     solved: ['co', 'eo', 'cp', 'ep'],
     cases: 21,
+    ofClub: false,
+    parent: null,
     editions: [
       {
         number: 1,

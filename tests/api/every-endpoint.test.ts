@@ -21,7 +21,7 @@ const pathOf = (path: string) =>
   path
     .replace(/:(draftId|memberId)/g, anyUuid)
     .replace(/:(line|number)/g, '1')
-    .replace(/:(setKey|key)/g, 'pll');
+    .replace(/:(setKey|key|caseKey)/g, 'pll');
 
 function send(agent: ReturnType<typeof api.as>, { method, path }: { method: string; path: string }) {
   const to = pathOf(path);

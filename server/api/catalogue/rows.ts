@@ -1,6 +1,8 @@
 import {
+  catalogueCaseInput,
   catalogueCasesInput,
   catalogueCasesView,
+  catalogueCaseView,
   catalogueSetInput,
   catalogueSetView,
   catalogueView,
@@ -10,6 +12,7 @@ import {
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { listCases } from '../../services/catalogue/list-cases.ts';
 import { listCatalogue } from '../../services/catalogue/list-catalogue.ts';
+import { showCase } from '../../services/catalogue/show-case.ts';
 import { showEdition } from '../../services/catalogue/show-edition.ts';
 import { showSet } from '../../services/catalogue/show-set.ts';
 import { defineRow } from '../define-row.ts';
@@ -37,6 +40,13 @@ export const catalogueRows = {
     input: catalogueCasesInput,
     output: catalogueCasesView,
     service: listCases,
+  }),
+  catalogueCase: defineRow({
+    endpoint: endpoints.catalogueCase,
+    who: 'signed-in',
+    input: catalogueCaseInput,
+    output: catalogueCaseView,
+    service: showCase,
   }),
   edition: defineRow({
     endpoint: endpoints.edition,

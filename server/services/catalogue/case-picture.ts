@@ -7,7 +7,7 @@ import { maskStickers, stickersOf, TABLE_COLOURING } from '#shared/lastlayer/pic
  * `algorithm` solves it without an AUF before; without one, from the canonical angle.
  */
 export function casePicture(set: CaseSet, c: CaseOfSet, algorithm?: string): Picture {
-  return { stickers: seenStickers(set, viewFor(set, c, algorithm)), colouring: TABLE_COLOURING };
+  return { stickers: seenStickers(set, frontOf(set, c, algorithm)), colouring: TABLE_COLOURING };
 }
 
 /** The stickers of a state as far as the set tells them apart. */
@@ -15,7 +15,8 @@ export function seenStickers(set: CaseSet, state: number): Picture['stickers'] {
   return maskStickers(stickersOf(state), seenThrough(set.definition.entry, set.definition.toldApart));
 }
 
-function viewFor(set: CaseSet, c: CaseOfSet, algorithm: string | undefined): number {
+/** The full state of a case that `algorithm` solves without an AUF before; else the canonical one. */
+export function frontOf(set: CaseSet, c: CaseOfSet, algorithm: string | undefined): number {
   if (algorithm === undefined) return c.canonical;
   const reading = readAlgorithm(algorithm);
   return reading.kind === 'state' && set.caseOfState(reading.state)?.key === c.key

@@ -1,10 +1,8 @@
-import { desc, eq } from 'drizzle-orm';
-import { tables } from '#database/client.ts';
 import type { EditionView } from '#shared/contracts/catalogue.ts';
-import { caseSet } from '#shared/lastlayer/index.ts';
 import { asSignedIn, type Ctx } from '../context.ts';
 import { casePicture } from './case-picture.ts';
 import { inNameOrder, readEditionContent } from './read-edition.ts';
+import { readShownSet } from './read-shown-set.ts';
 
 /** One edition: its cases in the order of their names, and what the set has beyond them. @throws Problem not-found. */
 export async function showEdition(
@@ -12,21 +10,15 @@ export async function showEdition(
   { setKey, number }: { setKey: string; number: number },
 ): Promise<EditionView> {
   return asSignedIn(ctx, async (tx) => {
+    const { set, editions } = await readShownSet(tx, setKey);
     const content = await readEditionContent(tx, setKey, number);
-    const { edition } = tables;
-    const numbers = await tx
-      .select({ number: edition.number })
-      .from(edition)
-      .where(eq(edition.setKey, setKey))
-      .orderBy(desc(edition.number));
-    const set = caseSet(setKey);
     return {
       setKey,
       setName: content.setName,
       number,
       publishedAt: content.publishedAt.getTime(),
       note: content.note,
-      numbers: numbers.map((row) => row.number),
+      numbers: editions.map((edition) => edition.number),
       cases: [...content.cases.values()].map(({ key, name, group, algorithms }) => {
         const c = set.byKey(key);
         if (!c) throw new Error(`Edition ${number} of ${setKey} holds ${key}, which is no case of the set.`);

@@ -4,6 +4,7 @@ import { casePicture } from './case-picture.ts';
 import { type CaseOfCatalogue, caseOfCatalogue, casesOfCatalogue } from './cases-of-catalogue.ts';
 import { filterCases, orderOf, pageOfCases } from './find-cases.ts';
 import { presentCaseOfCatalogue } from './present-case.ts';
+import { readAliases } from './read-aliases.ts';
 import { inNameOrder } from './read-edition.ts';
 import { readShownSet } from './read-shown-set.ts';
 
@@ -12,9 +13,9 @@ const PAGE = 100;
 
 /** A page of a set's cases, filtered and sorted. @throws Problem not-found for an unknown set or edition. */
 export async function showSet(ctx: Ctx, input: CatalogueSetInput): Promise<CatalogueSetView> {
-  return asSignedIn(ctx, async (tx) => {
-    const { set, name, editions, content } = await readShownSet(tx, input.setKey, input.edition);
-    const aliases = new Map<string, string>();
+  return asSignedIn(ctx, async (tx, actor) => {
+    const { set, editions, content } = await readShownSet(tx, input.setKey, input.edition);
+    const aliases = await readAliases(tx, actor);
     const all = casesOfCatalogue(set, content, aliases);
     const order = orderOf(input.sort);
     const found = filterCases(all, input).sort(order);
@@ -23,7 +24,7 @@ export async function showSet(ctx: Ctx, input: CatalogueSetInput): Promise<Catal
       return c && caseOfCatalogue(c, content, aliases);
     };
     const page = pageOfCases(found, order, { after: at(input.after), before: at(input.before), size: PAGE });
-    const { entry, toldApart, solved } = set.definition;
+    const { name, entry, toldApart, solved } = set.definition;
     return {
       setKey: input.setKey,
       setName: name,
