@@ -66,8 +66,9 @@ export const EDGE_SITES: readonly (readonly [Site, Site])[] = [
   ],
 ];
 
-const CORNER_PIECES: readonly string[] = ['URF', 'UBR', 'ULB', 'UFL'];
-const EDGE_PIECES: readonly string[] = ['UF', 'UR', 'UB', 'UL'];
+/** The faces of each piece's stickers, clockwise from its top one: corners URF UBR ULB UFL, edges UF UR UB UL. */
+export const CORNER_PIECES: readonly string[] = ['URF', 'UBR', 'ULB', 'UFL'];
+export const EDGE_PIECES: readonly string[] = ['UF', 'UR', 'UB', 'UL'];
 
 /** Stickers that can be written to while they are being put together. */
 export type DraftStickers = Record<Side, Sticker[]>;
