@@ -43,7 +43,7 @@ describe('a subset', () => {
   });
 
   it('knows its own cases and the skip, and no others', () => {
-    expect(twoSided.byName('PLL skip')?.skip ?? twoSided.byName('skip')?.skip).toBe(true);
+    expect(twoSided.byName('skip')).toBe(twoSided.skip);
     expect(twoSided.byName('Mine T-perm')).toBe(twoSided.byName('T'));
     expect(twoSided.byName('F')).toBeUndefined();
     expect(twoSided.byKey(pll.byName('F')!.key)).toBeUndefined();
@@ -89,12 +89,11 @@ describe('a subset', () => {
   });
 
   it.each([
-    ['zbll', 'Sune', 72],
-    ['zbll', 'H', 40],
-    ['coll', 'T', 6],
-    ['1lll', 'OLL 4', 0],
-    ['oll', 'fish', 4],
-    ['oll', 'l', 0],
+    ['zbll', 'Sune'],
+    ['zbll', 'H'],
+    ['coll', 'T'],
+    ['1lll', 'OLL 4'],
+    ['oll', 'fish'],
   ])(
     '%s, groups beginning with %s: clusters of 6 to 12, mirrors together, or all names offered',
     (key, start) => {
