@@ -1,4 +1,4 @@
-import type { ReactNode } from 'react';
+import type { ReactNode, Ref } from 'react';
 import { shellText } from '#shared/text/shell.ts';
 import { TopBar } from './ui/index.ts';
 
@@ -7,11 +7,17 @@ export function PublicFrame({
   children,
   current,
   home = null,
+  wide = false,
+  content,
 }: {
   children: ReactNode;
-  current?: 'signIn';
+  current?: 'signIn' | 'ledger';
   /** The first place of whoever is signed in. */
   home?: string | null;
+  /** For pages of tables. */
+  wide?: boolean;
+  /** The element that holds the content, where it takes the focus after a move. */
+  content?: Ref<HTMLElement>;
 }) {
   return (
     <>
@@ -21,12 +27,18 @@ export function PublicFrame({
         navigationLabel={shellText.navigation}
         skipLabel={shellText.skipToContent}
         items={[
+          { href: '/ledger', label: shellText.places.ledger, current: current === 'ledger' },
           home
             ? { href: home, label: shellText.openPlaces, current: false }
             : { href: '/sign-in', label: shellText.signIn, current: current === 'signIn' },
         ]}
       />
-      <main id="content" className="mx-auto w-full max-w-6xl px-4 py-8 sm:px-8">
+      <main
+        id="content"
+        ref={content}
+        tabIndex={content ? -1 : undefined}
+        className={`mx-auto w-full px-4 outline-none sm:px-8 ${wide ? 'max-w-[84rem] pb-16' : 'max-w-6xl py-8'}`}
+      >
         {children}
       </main>
     </>

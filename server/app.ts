@@ -6,6 +6,7 @@ import type { Logger } from 'pino';
 import { pinoHttp } from 'pino-http';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { contract } from './api/contract.ts';
+import { ledgerCsvRoute } from './api/ledger/csv-route.ts';
 import { mountRows, refuseOtherMethods } from './api/mount.ts';
 import { sessionRoutes } from './api/session/routes.ts';
 import { sessionCookies } from './auth/cookies.ts';
@@ -63,6 +64,7 @@ export function createApp(needs: AppNeeds): Express {
   const cookies = sessionCookies(secure);
   app.use(securityHeaders({ secure, development }), compression(), cookieParser());
 
+  app.use(ledgerCsvRoute());
   app.use('/api', sameOriginOnly());
   app.use('/api', (_req, res, next) => {
     res.set('Cache-Control', 'no-store');

@@ -8,6 +8,7 @@ import { shellText } from '#shared/text/shell.ts';
 const PLACES = [
   { href: '/catalogue', label: shellText.places.catalogue },
   { href: '/admin/intake', label: shellText.places.intake },
+  { href: '/ledger', label: shellText.places.ledger },
 ] as const;
 const INSIDE = /^(\/admin(\/|\?|$)|\?)/;
 

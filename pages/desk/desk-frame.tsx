@@ -10,6 +10,7 @@ const PLACES = [
   { href: '/desk/standings', label: shellText.places.standings },
   { href: '/desk/programme', label: shellText.places.programme },
   { href: '/catalogue', label: shellText.places.catalogue },
+  { href: '/ledger', label: shellText.places.ledger },
   { href: '/today', label: shellText.places.training },
 ] as const;
 const INSIDE = /^\/desk(\/|\?|$)/;

@@ -18,7 +18,11 @@ const PLACES = [
 ];
 
 const INSIDE = /^\/(today|cases|form|club)(\/|\?|$)/;
-const CATALOGUE = { href: '/catalogue', label: shellText.places.catalogue };
+/** In the bar only: the thumb's places are the daily ones. */
+const ALSO = [
+  { href: '/catalogue', label: shellText.places.catalogue },
+  { href: '/ledger', label: shellText.places.ledger },
+];
 const DESK = { href: '/desk/squad', label: memberText.club.toDesk };
 
 function MemberLink(props: AppLinkProps) {
@@ -38,8 +42,7 @@ export function MemberFrame({
   const session = useSession();
   const content = useMoved(titleOf);
   const items = markCurrent(PLACES, pathname);
-  const [catalogue] = markCurrent([CATALOGUE], pathname);
-  const inBar = [...items, ...(catalogue ? [catalogue] : []), ...(session.role === 'captain' ? [DESK] : [])];
+  const inBar = [...items, ...markCurrent(ALSO, pathname), ...(session.role === 'captain' ? [DESK] : [])];
   return (
     <LinkProvider link={link}>
       <div className="flex min-h-dvh flex-col">

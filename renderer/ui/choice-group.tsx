@@ -21,11 +21,13 @@ export interface ChoiceGroupProps {
   /** Chosen values. With `onChange` the group is controlled, without it these are where it starts. */
   readonly value: readonly string[];
   readonly onChange?: ChangeEventHandler<HTMLInputElement>;
+  /** Two choices beside each other where the group would be too long for the screen: on narrow ones. */
+  readonly paired?: boolean;
 }
 
 /** Choices in a ruled column; what is chosen is bold as well as marked. */
 export function ChoiceGroup(props: ChoiceGroupProps) {
-  const { id, name, legend, hint, error, kind, choices, value, onChange } = props;
+  const { id, name, legend, hint, error, kind, choices, value, onChange, paired = false } = props;
   const described = cx(hint ? `${id}-hint` : null, error ? `${id}-error` : null) || undefined;
   return (
     <fieldset aria-describedby={described} className={cx('min-w-0', error && 'border-l-4 border-rose pl-3')}>
@@ -40,14 +42,24 @@ export function ChoiceGroup(props: ChoiceGroupProps) {
           {error}
         </p>
       )}
-      <div className="frame divide-y-[1.5px] divide-ink bg-sheet">
+      <div
+        className={cx(
+          'frame bg-sheet',
+          paired ? 'grid grid-cols-2 overflow-hidden lg:grid-cols-1' : 'divide-y-[1.5px] divide-ink',
+        )}
+      >
         {choices.map((choice, k) => {
           const own = k === 0 ? id : `${id}-${choice.value}`;
           const checked = value.includes(choice.value);
           return (
             <div
               key={choice.value}
-              className="relative flex min-h-12 items-center gap-3 px-3 py-2 has-checked:font-bold"
+              className={cx(
+                'relative flex min-h-12 items-center gap-3 px-3 py-2 has-checked:font-bold',
+                // Rules between cells: each draws its left and upper one, the outer ones lie under the frame.
+                paired &&
+                  '-ml-[1.5px] -mt-[1.5px] border-l-[1.5px] border-t-[1.5px] border-ink leading-tight max-lg:last:odd:col-span-2',
+              )}
             >
               <input
                 type={kind === 'one' ? 'radio' : 'checkbox'}

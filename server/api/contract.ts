@@ -2,6 +2,7 @@ import type { EndpointName } from '#shared/contracts/endpoints.ts';
 import { adminRows } from './admin/rows.ts';
 import { catalogueRows } from './catalogue/rows.ts';
 import { deskRows } from './desk/rows.ts';
+import { ledgerRows } from './ledger/rows.ts';
 import { memberRows } from './member/rows.ts';
 import type { AnyRow } from './row.ts';
 import { sessionRows } from './session/rows.ts';
@@ -18,4 +19,5 @@ export const contract: Record<Exclude<EndpointName, CookieEndpoint>, AnyRow> = {
   ...memberRows,
   ...adminRows,
   ...catalogueRows,
+  ...ledgerRows,
 };

@@ -11,6 +11,8 @@ function checkRole(ctx: Ctx, who: Who): void {
   if (who === 'administrator' && role !== 'administrator')
     throw forbidden('Only an administrator can do this.');
   if (who === 'captain' && role !== 'captain') throw forbidden('Only a captain of the club can do this.');
+  if (who === 'definer' && role === 'member')
+    throw forbidden('Only a captain or an administrator can do this.');
   if (who === 'member' && role === 'administrator') {
     throw forbidden('This place belongs to a club. Switch to one first.');
   }
@@ -37,6 +39,7 @@ export function defineRow<Input, Output>(row: Row<Input, Output>): AnyRow {
   return {
     endpoint: row.endpoint as AnyRow['endpoint'],
     who: row.who,
+    keptSeconds: row.keptSeconds ?? null,
     async run(ctx, input) {
       checkRole(ctx, row.who);
       return row.output.parse(await row.service(ctx, validate(row.input, input)));

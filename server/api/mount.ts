@@ -18,7 +18,10 @@ export function mountRows(rows: Iterable<AnyRow>, ctxOf: (res: object) => Sessio
     register(path, async (req, res) => {
       const params = numbersIn(req.params);
       const input = method === 'GET' ? { ...req.query, ...params } : { ...bodyOf(req.body), ...params };
-      res.json(await row.run(ctxOf(res), input));
+      const output = await row.run(ctxOf(res), input);
+      // Only now: an error is never kept.
+      if (row.keptSeconds !== null) res.set('Cache-Control', `public, max-age=${row.keptSeconds}`);
+      res.json(output);
     });
   }
   return router;
