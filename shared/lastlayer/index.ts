@@ -40,22 +40,6 @@ export {
   writeDrawing,
 } from './drawing.ts';
 export { type DrawingProblem, drawingProblems } from './drawing-problems.ts';
-export {
-  hasInverse,
-  inverseOf,
-  mirrorInverseOf,
-  orientationOf,
-  permutationOf,
-  stabiliser,
-} from './relations.ts';
-export { type Look, type TwoLookRoute, twoLookRoutes } from './routes.ts';
-export { cancelledKey, sameAlgorithm } from './same-algorithm.ts';
-export { AlgorithmSyntaxError } from './scanner.ts';
-export type { Holding } from './seat-codes.ts';
-export { CASE_SETS, type CaseSetDefinition, caseKey, openIn, type Structure, tradeSetLike } from './sets.ts';
-export { rightAufsAfter, rightAufsBefore, type Solves, solvesCase } from './solving.ts';
-export { type LastLayerState, STATES, stateAt, stateIndex } from './state.ts';
-export { type Grouped, groupsOf, type SubsetChoice, subsetOf } from './subset.ts';
 export { type Facelets, type Frame, faceletsAfter, playAlgorithm } from './facelets.ts';
 export { type Fraction, fraction } from './fractions.ts';
 export { type Ledger, type LedgerClass, type LedgerCount, ledgerOf } from './ledger.ts';
