@@ -104,17 +104,27 @@ describe('a case of the catalogue', () => {
 
   it('tells in which editions its algorithms changed', async () => {
     const admin = await api.factory.administrator();
-    const take = async (csv: string) => {
-      const { body } = await upload(admin, csv, { setKey: 'eoll' });
+    const cll = caseSet('cll');
+    const nameOf = (algorithm: string) => {
+      const solves = solvesCase(cll, algorithm);
+      return 'case' in solves ? solves.case.name : '';
+    };
+    const take = async (algorithm: string) => {
+      const csv = `case,algorithm\n${nameOf(algorithm)},${algorithm}\n`;
+      const { body } = await upload(admin, csv, { setKey: 'cll' });
       const view = await read(admin, (body as { draftId: string }).draftId);
       expect((await publish(admin, view)).status).toBe(200);
     };
-    await take("case,algorithm\nline,F R U R' U' F'\n");
-    await take("case,algorithm\nL,F U R U' R' F'\n");
-    const line = await caseOf('eoll', 'line');
-    const first = line.changes.at(-1);
-    expect(first).toMatchObject({ edition: 1, added: ["F R U R' U' F'"], removed: [], reordered: false });
-    expect(line.changes.map(({ edition }) => edition)).not.toContain(2);
+    // Sune and its mirror: two algorithms from memory, each in an edition of its own.
+    const [sune, antisune] = ["R U R' U R U2 R'", "L' U' L U' L' U2 L"];
+    await take(sune);
+    await take(antisune);
+    expect((await caseOf('cll', nameOf(sune))).changes).toEqual([
+      { edition: 1, publishedAt: expect.any(Number), added: [sune], removed: [], reordered: false },
+    ]);
+    expect((await caseOf('cll', nameOf(antisune))).changes).toMatchObject([
+      { edition: 2, added: [antisune] },
+    ]);
   });
 
   it('is not there for an unknown set or case, nor under another set', async () => {

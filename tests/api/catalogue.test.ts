@@ -1,5 +1,6 @@
 import { expect, it } from 'vitest';
 import type { CatalogueView, EditionView } from '#shared/contracts/catalogue.ts';
+import { caseSet, solvesCase } from '#shared/lastlayer/index.ts';
 import { useApi } from '#tests/support/api.ts';
 import { intakeSteps } from '#tests/support/intake.ts';
 
@@ -63,19 +64,25 @@ it('knows no edition that was never published', async () => {
 
 it('counts editions as they are published, newest first', async () => {
   const admin = await api.factory.administrator();
-  const res = await upload(admin, "case,algorithm\nSune,R U R' U R U2 R'\n", { setKey: 'ocll' });
+  const cll = caseSet('cll');
+  const line = (algorithm: string) => {
+    const solves = solvesCase(cll, algorithm);
+    return `${'case' in solves ? solves.case.name : ''},${algorithm}`;
+  };
+  const file = (algorithm: string) => `case,algorithm\n${line(algorithm)}\n`;
+  const res = await upload(admin, file("R U R' U R U2 R'"), { setKey: 'cll' });
   const view = await read(admin, (res.body as { draftId: string }).draftId);
   expect((await publish(admin, view)).status).toBe(200);
-  const again = await upload(admin, "case,algorithm\nAntisune,R U2 R' U' R U' R'\n", { setKey: 'ocll' });
+  const again = await upload(admin, file("L' U' L U' L' U2 L"), { setKey: 'cll' });
   const second = await read(admin, (again.body as { draftId: string }).draftId);
-  expect((await publish(admin, second, { note: 'Antisune too.' })).status).toBe(200);
+  expect((await publish(admin, second, { note: 'Its mirror too.' })).status).toBe(200);
   const { sets } = (await api.as(admin.claims).get('/api/catalogue')).body as CatalogueView;
   expect(
     sets
-      .find(({ setKey }) => setKey === 'ocll')
+      .find(({ setKey }) => setKey === 'cll')
       ?.editions.map(({ number, note, cases, algorithms }) => ({ number, note, cases, algorithms })),
   ).toEqual([
-    { number: 2, note: 'Antisune too.', cases: 2, algorithms: 2 },
+    { number: 2, note: 'Its mirror too.', cases: 2, algorithms: 2 },
     { number: 1, note: '', cases: 1, algorithms: 1 },
   ]);
 });
