@@ -2,7 +2,7 @@
 import { Alg } from 'cubing/alg';
 import { KPattern, type KTransformation } from 'cubing/kpuzzle';
 import { cube3x3x3 } from 'cubing/puzzles';
-import { type LastLayerState, stateIndex } from '#shared/lastlayer/index.ts';
+import { type Aspect, type LastLayerState, stateAt, stateIndex } from '#shared/lastlayer/index.ts';
 
 const puzzle = await cube3x3x3.kpuzzle();
 const solved = puzzle.defaultPattern();
@@ -64,3 +64,21 @@ export function puzzleIn({ cp, co, ep, eo }: LastLayerState): KPattern {
 /** The pattern turned by an algorithm, centres home again. */
 export const turnedBy = (pattern: KPattern, algorithm: string): KPattern =>
   pattern.applyTransformation(broughtHome(algorithm));
+
+/**
+ * Whether these aspects of a cube in a last-layer state are solved by an algorithm and some turn of the top behind
+ * it: told from the puzzle model alone.
+ */
+export function solvedOnCube(solved: readonly Aspect[], state: number, algorithm: string): boolean {
+  const start = turnedBy(puzzleIn(stateAt(state)), algorithm);
+  return ['', 'U', 'U2', "U'"].some((after) => {
+    const { CORNERS, EDGES } = start.applyAlg(after).patternData;
+    const home = (pieces: readonly number[]) => pieces.every((piece, place) => piece === place);
+    const oriented = (list: readonly number[]) => list.every((value) => value === 0);
+    return solved.every((aspect) => {
+      if (aspect === 'co') return oriented(CORNERS!.orientation);
+      if (aspect === 'eo') return oriented(EDGES!.orientation);
+      return home(aspect === 'cp' ? CORNERS!.pieces : EDGES!.pieces);
+    });
+  });
+}
