@@ -8,9 +8,10 @@ import {
   type CaseSet,
   caseSet,
   countCases,
-  ENTRIES,
+  EVERY_ENTRY,
   isAspect,
   isEntry,
+  ledgerOf,
   type ReadLine,
   readCaseLines,
 } from '#shared/lastlayer/index.ts';
@@ -82,7 +83,7 @@ function read(print: Print, bytes: () => Uint8Array, setWord: string | undefined
 }
 
 function count(print: Print, entry: string | undefined, list: string | undefined, json: boolean): number {
-  const entries = command.entries(ENTRIES);
+  const entries = command.entries(EVERY_ENTRY);
   if (!entry) throw new UsageError(`${command.wanted('--entry')} ${entries}`);
   if (!isEntry(entry)) throw new UsageError(`${command.unknownEntry(entry)} ${entries}`);
   const known = command.aspects(ASPECTS);
@@ -97,7 +98,7 @@ function count(print: Print, entry: string | undefined, list: string | undefined
     });
   const counted = countCases(entry, aspects);
   if (json) {
-    print(asJson(counted));
+    print(asJson({ ...counted, ledger: ledgerOf(entry, aspects) }));
   } else {
     print(command.counted(counted.cases, counted.states));
     for (const { weight, cases } of counted.weights) print(command.weight(cases, weight, counted.states));

@@ -5,6 +5,7 @@ import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { afterAll, describe, expect, it } from 'vitest';
 import { runCases } from '#server/cli/run-cases.ts';
+import { ASPECTS, EVERY_ENTRY, ledgerOf } from '#shared/lastlayer/index.ts';
 
 const ROOT = fileURLToPath(new URL('../..', import.meta.url));
 const folder = mkdtempSync(join(tmpdir(), 'cases-'));
@@ -93,6 +94,7 @@ describe('the cases command', () => {
     expect(code).toBe(0);
     // Domain values: two classes of weight 288, five of 576, fifty-one of 1,152 among 62,208 states.
     expect(JSON.parse(out)).toEqual({
+      ledger: ledgerOf('any', ['co', 'eo']),
       entry: 'any',
       aspects: ['co', 'eo'],
       cases: 58,
@@ -104,6 +106,17 @@ describe('the cases command', () => {
       ],
     });
     expect(cases('count', '--entry', 'corners', '--aspects', 'ep,eo').out).toMatch(/30 cases.*384/u);
+  });
+
+  it.each(EVERY_ENTRY)('counts from %s, with the whole page of the Ledger', (entry) => {
+    const { code, out } = cases('count', '--entry', entry, '--aspects', ASPECTS.join(), '--json');
+    expect(code).toBe(0);
+    const told = JSON.parse(out);
+    expect(told.ledger.cases.value).toBe(told.cases);
+    expect(told.ledger.entryStates).toBe(told.states);
+    // Common practice: 84 cases and the skip with edges oriented and corners permuted, 22 with all oriented.
+    if (entry === 'cp+eo') expect(told.cases).toBe(85);
+    if (entry === 'co+eo') expect(told.cases).toBe(22);
   });
 
   it.each([
