@@ -2,6 +2,8 @@ import type { Area, AreaRoute } from '#renderer/area.tsx';
 import { call } from '#shared/contracts/endpoint.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { catalogueText } from '#shared/text/catalogue.ts';
+import { catalogueCaseText } from '#shared/text/catalogue-case.ts';
+import { CasePage } from './case/case-page.tsx';
 import { CatalogueFrame } from './catalogue-frame.tsx';
 import { EditionPage } from './edition/edition-page.tsx';
 import { setInput } from './set/set-input.ts';
@@ -21,6 +23,12 @@ const routes: readonly AreaRoute[] = [
     title: catalogueText.set.title,
     Page: SetPage,
     calls: ({ setKey = '' }, search) => [call(endpoints.catalogueSet, setInput(setKey, search))],
+  },
+  {
+    path: '/catalogue/:setKey/cases/:caseKey',
+    title: catalogueCaseText.title,
+    Page: CasePage,
+    calls: ({ setKey = '', caseKey = '' }) => [call(endpoints.catalogueCase, { setKey, caseKey })],
   },
   {
     path: '/catalogue/:setKey/editions/:number',
