@@ -33,27 +33,36 @@ const ARROWS: Readonly<Record<SortDirection, string>> = { ascending: '▲', desc
 
 /**
  * A table with an ink rule under its head and hair rules between rows. Where it has no room beside each other
- * its cells stand in a small grid under each other, row by row, instead of running off the screen.
+ * its cells stand in a small grid under each other, row by row, instead of running off the screen. On paper it is a
+ * table.
  */
 export function LedgerTable<Row>(props: LedgerTableProps<Row>) {
   const { caption, columns, rows, rowKey, rowClass, stackedRow, empty } = props;
   const captionId = useId();
   const sortable = columns.some(({ sort }) => sort !== undefined);
   return (
-    <table aria-labelledby={captionId} className="block w-full border-collapse text-start lg:table">
+    <table
+      aria-labelledby={captionId}
+      className="block w-full border-collapse text-start lg:table print:table"
+    >
       <caption id={captionId} className="sr-only">
         {caption}
       </caption>
-      <thead className={cx('block lg:table-header-group', !sortable && 'max-lg:sr-only')}>
-        <tr className="rule-b flex flex-wrap gap-x-5 lg:table-row">
+      <thead
+        className={cx(
+          'block lg:table-header-group print:table-header-group',
+          !sortable && 'max-lg:not-print:sr-only',
+        )}
+      >
+        <tr className="rule-b flex flex-wrap gap-x-5 lg:table-row print:table-row">
           {columns.map((column) => (
             <th
               key={column.key}
               scope="col"
               aria-sort={column.sort?.direction}
               className={cx(
-                'pb-2 text-start align-bottom text-sm font-normal text-ink-2 lg:pe-4 lg:last:pe-0',
-                !column.sort && 'max-lg:sr-only',
+                'pb-2 text-start align-bottom text-sm font-normal text-ink-2 lg:pe-4 lg:last:pe-0 print:pe-3',
+                !column.sort && 'max-lg:not-print:sr-only',
                 column.className,
               )}
             >
@@ -62,14 +71,22 @@ export function LedgerTable<Row>(props: LedgerTableProps<Row>) {
           ))}
         </tr>
       </thead>
-      <tbody className="block lg:table-row-group">
+      <tbody className="block lg:table-row-group print:table-row-group">
         {rows.map((row) => (
           <tr
             key={rowKey(row)}
-            className={cx('grid gap-x-4 border-b border-hair py-3 lg:table-row', stackedRow, rowClass?.(row))}
+            className={cx(
+              'grid gap-x-4 border-b border-hair py-3 lg:table-row print:table-row',
+              stackedRow,
+              rowClass?.(row),
+            )}
           >
             {columns.map((column) => {
-              const look = cx('text-start lg:py-3 lg:pe-4 lg:last:pe-0', column.stacked, column.className);
+              const look = cx(
+                'text-start lg:py-3 lg:pe-4 lg:last:pe-0 print:py-2 print:pe-3',
+                column.stacked,
+                column.className,
+              );
               return column.rowHeader ? (
                 <th key={column.key} scope="row" className={cx(look, 'font-bold')}>
                   {column.cell(row)}

@@ -24,7 +24,7 @@ export function BurnsideTable({ view: { burnside, cases } }: { view: LedgerView 
               {text.before}
             </th>
             {TURNS.map((after) => (
-              <th key={after} scope="col" className="pb-2 ps-3 pt-1 text-end font-bold text-ink">
+              <th key={after} scope="col" className="w-1/6 pb-2 ps-3 pt-1 text-end font-bold text-ink">
                 {text.turn(after)}
               </th>
             ))}

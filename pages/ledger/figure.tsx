@@ -1,9 +1,9 @@
-/** A figure of a table: alone under its header; where rows are stacked and there is none, with its word. */
+/** A figure of a table: alone under its header, on paper too; where rows are stacked and have none, with its word. */
 export function Figure({ value, narrow }: { value: string; narrow: string }) {
   return (
     <>
-      <span className="max-lg:hidden">{value}</span>
-      <span className="lg:hidden">{narrow}</span>
+      <span className="max-lg:not-print:hidden">{value}</span>
+      <span className="lg:hidden print:hidden">{narrow}</span>
     </>
   );
 }

@@ -38,7 +38,7 @@ export function MixFields({ asked, errorOf, form, atOnce, onChange }: MixFieldsP
       : undefined
     : errorOf(FIELDS.share);
   return (
-    <div className="screen-only mt-4 grid max-w-[46rem] items-end gap-4 sm:grid-cols-[minmax(0,1fr)_14rem_auto]">
+    <div className="screen-only mt-4 grid max-w-[46rem] items-end gap-4 sm:grid-cols-[minmax(0,1fr)_17rem_auto]">
       <SelectField
         id={FIELDS.with}
         name="with"

@@ -12,7 +12,7 @@ const text = ledgerText.mix;
 export function MixPart({ view, ...fields }: { view: LedgerView } & MixFieldsProps) {
   const { mix, entry } = view;
   return (
-    <Section title={text.title}>
+    <Section title={text.title} className={mix ? undefined : 'screen-only'}>
       <p className="max-w-[46rem] text-ink-2">{text.lead}</p>
       <MixFields {...fields} />
       {mix && (

@@ -38,7 +38,7 @@ export function SymmetryTable({ view }: { view: LedgerView }) {
             key: 'cases',
             header: text.columns.cases,
             cell: (row) => <CasesOfClass view={view} row={row} />,
-            stacked: 'max-lg:text-end',
+            stacked: 'max-lg:not-print:text-end',
             className: 'lg:w-16',
           },
           {
@@ -65,7 +65,7 @@ export function SymmetryTable({ view }: { view: LedgerView }) {
               const value = ledgerText.fraction(prior);
               return <Figure value={value} narrow={text.prior(value)} />;
             },
-            stacked: 'max-lg:text-end',
+            stacked: 'max-lg:not-print:text-end',
             className: 'lg:w-20',
           },
           {
@@ -93,7 +93,7 @@ function CasesOfClass({ view, row: { cases, angles, shown } }: { view: LedgerVie
     <TextLink
       href={casesHref(view, { angles })}
       aria-label={text.everyLong(cases, angles)}
-      className="max-lg:inline-flex max-lg:min-h-12 max-lg:items-center"
+      className="max-lg:not-print:inline-flex max-lg:not-print:min-h-12 max-lg:not-print:items-center"
     >
       {number}
     </TextLink>

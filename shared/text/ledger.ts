@@ -77,7 +77,7 @@ export const ledgerText = {
     aspects: 'Told apart',
     done: 'done on arrival',
     go: 'Count',
-    problemTitle: 'This cannot be counted',
+    problemTitle: 'Not all of this can be counted',
     with: 'Second way to arrive',
     entryMissing: 'Choose what is solved on arrival.',
     asked: (what: string, value: string) => `${what}: “${value}” is none of the choices.`,
@@ -88,7 +88,8 @@ export const ledgerText = {
   tradeName: 'Trade name:',
   noTradeName: 'No trade name',
   csv: 'Download CSV',
-  counted: (cases: number) => `${count(cases, 'case', 'cases')}, the skip among them`,
+  counted: (cases: number) =>
+    cases === 1 ? 'One case, the skip' : `${whole(cases)} cases, the skip among them`,
 
   counts: {
     assemblies: 'assemblies',
@@ -161,7 +162,7 @@ export const ledgerText = {
     lead: 'For a solver who only sometimes arrives with more done, or less.',
     with: 'Some solves arrive with',
     nobody: 'no mix',
-    share: 'Share of solves, in per cent',
+    share: 'In per cent of solves',
     go: 'Mix',
     narrow: (header: string, value: string) => `${header}: ${value}`,
     caption: 'Cases by prior, mixed',

@@ -27,6 +27,30 @@ it('shows the squad with all its figures, without a script', async () => {
   expect(await tobi.textContent()).toMatch(/\d+%, between \d+% and \d+%, \d+ answers/);
 });
 
+it('counts any step of the last layer, without a script', async () => {
+  const page = await (await site.visitor({ ...PHONE, javaScriptEnabled: false })).newPage();
+  await page.goto('/');
+  await page.getByRole('link', { name: 'Ledger' }).click();
+  await page.waitForURL('**/ledger');
+  // 22: PLL with its skip (common practice).
+  expect(await page.getByRole('status').textContent()).toBe('22 cases, the skip among them');
+  await page.locator('label', { hasText: 'edges oriented' }).first().click();
+  await page.locator('label', { hasText: 'corner orientation' }).click();
+  await page.getByRole('button', { name: 'Count' }).click();
+  await page.waitForURL(/entry=eo/);
+  // 494: ZBLL with its skip (common practice).
+  expect(await page.getByRole('status').textContent()).toBe('494 cases, the skip among them');
+  await page.getByLabel('Some solves arrive with').selectOption('all edges');
+  await page.getByRole('button', { name: 'Mix' }).click();
+  await page.getByText(/^40 of 100 solves arrive with: all edges/).waitFor();
+
+  await page.getByRole('link', { name: 'All 480 cases with 4 angles' }).click();
+  const table = page.getByRole('table', { name: 'Cases' });
+  expect(await table.getByRole('row').count()).toBe(61);
+  await page.getByRole('link', { name: 'Next' }).click();
+  await page.getByText('Page 2 of 8').waitFor();
+});
+
 it('takes what was typed before the scripts had come', async () => {
   const page = await (await site.visitor(PHONE)).newPage();
   let letScriptsIn = () => {};

@@ -19,6 +19,25 @@ interface PageOfOurs {
 const PAGES: readonly PageOfOurs[] = [
   { name: 'the first page', who: null, path: '/', heading: /last layer/ },
   { name: 'the sign-in page', who: null, path: '/sign-in', heading: 'Sign in' },
+  { name: 'the Ledger', who: null, path: '/ledger', heading: 'What a solve can deal' },
+  {
+    name: 'the Ledger with a mix',
+    who: 'ines',
+    path: '/ledger?entry=any&aspects=co,eo&with=eo&share=40',
+    heading: 'What a solve can deal',
+  },
+  {
+    name: 'the Ledger asked wrongly',
+    who: 'tobi',
+    path: '/ledger?entry=nothing&aspects=cp,zz',
+    heading: 'What a solve can deal',
+  },
+  {
+    name: 'the Ledger’s list',
+    who: 'desk',
+    path: '/ledger/cases?entry=cp%2Beo&aspects=co,ep&angles=4',
+    heading: 'All cases',
+  },
   { name: 'an address without a page', who: null, path: '/nowhere', heading: 'Not here', status: 404 },
   { name: 'My cases', who: 'tobi', path: '/cases', heading: 'My cases' },
   { name: 'a case', who: 'tobi', path: aCase, heading: /^PLL/ },

@@ -51,7 +51,7 @@ export function CaseList({ view, step, chosen }: CaseListProps) {
           header: text.columns.number,
           sort: sort('number'),
           cell: ({ number }) => <Figure value={String(number)} narrow={text.number(number)} />,
-          stacked: 'max-lg:order-2 max-lg:text-end max-lg:text-ink-2',
+          stacked: 'max-lg:order-2 max-lg:not-print:text-end max-lg:text-ink-2',
           className: 'lg:w-24',
         },
         {
@@ -77,7 +77,7 @@ export function CaseList({ view, step, chosen }: CaseListProps) {
           key: 'angles',
           header: text.columns.angles,
           cell: ({ angles }) => <Figure value={String(angles)} narrow={symmetry.angles(angles)} />,
-          stacked: 'max-lg:order-4 max-lg:text-end',
+          stacked: 'max-lg:order-4 max-lg:not-print:text-end',
           className: 'lg:w-24',
         },
         {
@@ -97,7 +97,7 @@ export function CaseList({ view, step, chosen }: CaseListProps) {
           cell: ({ dealtOnceIn }) => (
             <Figure value={symmetry.solves(dealtOnceIn)} narrow={text.onceIn(symmetry.solves(dealtOnceIn))} />
           ),
-          stacked: 'max-lg:order-6 max-lg:text-end',
+          stacked: 'max-lg:order-6 max-lg:not-print:text-end',
           className: 'lg:w-40',
         },
       ]}
