@@ -1,4 +1,4 @@
-/** The last-layer core: reading algorithms against a general puzzle model, canonical form, cold counts. */
+/** The last layer: reading algorithms against a general puzzle model, canonical form, cold counts, pictures. */
 import { readFileSync } from 'node:fs';
 import { Alg } from 'cubing/alg';
 import { cube3x3x3 } from 'cubing/puzzles';
@@ -8,6 +8,7 @@ import { ASPECTS, canonical, countCases, ENTRIES, readAlgorithm, STATES } from '
 import { parseMoves } from '#shared/lastlayer/notation.ts';
 import { stateSolved } from '#shared/lastlayer/reading.ts';
 import { type Figure, milliseconds, ratesOf } from './bench.ts';
+import { seeingFigures } from './seeing.ts';
 
 const seedAlgorithms = (): string[] =>
   ['oll', 'pll'].flatMap((key) => {
@@ -74,5 +75,5 @@ function canonicalFigures(): Figure[] {
 }
 
 export async function bench(): Promise<Figure[]> {
-  return [...countFigures(), ...(await readingFigures()), ...canonicalFigures()];
+  return [...countFigures(), ...(await readingFigures()), ...canonicalFigures(), ...seeingFigures()];
 }

@@ -5,7 +5,7 @@ import { type FaceMap, polygonPath, svgElement, tilePath } from './geometry.ts';
 import { isMarked, markMarkup } from './marks.ts';
 import { PALETTES, type Palette } from './palettes.ts';
 import { type Site, type Stickers, stickerAt } from './stickers.ts';
-import { HATCH_PAPER, INK, type Tile, tileMarkup } from './tiles.ts';
+import { HATCH_PAPER, INK, type Tile, type TileStyle, tileMarkup } from './tiles.ts';
 
 export type { Holding };
 
@@ -107,19 +107,17 @@ function sceneFor(holding: Holding, body: Palette['body']): Scene {
 export function seatViewInner(options: SeatViewOptions): string {
   const { stickers, colouring, holding, palette = PALETTES.standard, letters = false, marks } = options;
   const { rim, foot, tiles, centres } = sceneFor(holding, palette.body);
-  const style = { colouring, palette, letters, kind: 'cube' } as const;
-  return [
-    `<path class="cube-rim" d="${rim}" fill="none" stroke="none" stroke-width="14" stroke-linejoin="round"/>`,
-    `<path class="cube-foot" d="${foot}" fill="${HATCH_PAPER}" stroke="${INK}" stroke-width="2" stroke-linejoin="round"/>`,
-    ...centres.map(({ face, tile }) => tileMarkup(tile, face, { ...style, pale: true })),
-    `<path class="cube-body" d="${rim}" fill="${INK}" stroke="${INK}" stroke-width="9" stroke-linejoin="round"/>`,
-    '<g stroke-width="1.6">',
-    ...tiles.map(({ site, tile }) => tileMarkup(tile, stickerAt(stickers, site), style)),
-    '</g>',
-    ...(marks
-      ? tiles.flatMap(({ site, tile }) => (isMarked(marks, site) ? [markMarkup(tile, 'cube')] : []))
-      : []),
-  ].join('');
+  const style: TileStyle = { colouring, palette, letters, kind: 'cube', pale: false };
+  const low: TileStyle = { colouring, palette, letters, kind: 'cube', pale: true };
+  let drawn =
+    `<path class="cube-rim" d="${rim}" fill="none" stroke="none" stroke-width="14" stroke-linejoin="round"/>` +
+    `<path class="cube-foot" d="${foot}" fill="${HATCH_PAPER}" stroke="${INK}" stroke-width="2" stroke-linejoin="round"/>`;
+  for (const { face, tile } of centres) drawn += tileMarkup(tile, face, low);
+  drawn += `<path class="cube-body" d="${rim}" fill="${INK}" stroke="${INK}" stroke-width="9" stroke-linejoin="round"/><g stroke-width="1.6">`;
+  for (const { site, tile } of tiles) drawn += tileMarkup(tile, stickerAt(stickers, site), style);
+  drawn += '</g>';
+  if (marks) for (const { site, tile } of tiles) if (isMarked(marks, site)) drawn += markMarkup(tile, 'cube');
+  return drawn;
 }
 
 /**

@@ -38,30 +38,66 @@ export function colourOf(sticker: Sticker, colouring: Colouring): ColourName | n
   return sticker === '?' ? null : paint(sticker, colouring);
 }
 
+/** What only the colour of a sticker decides of its markup. */
+interface Coat {
+  /** Attributes of the outline. */
+  readonly outline: string;
+  /** Fill of the letter. */
+  readonly letter: string;
+}
+type Coats = Readonly<Record<ColourName, Coat>>;
+type Layer = 'cube' | 'flat' | 'pale';
+
+const coats = new WeakMap<Palette, Readonly<Record<Layer, Coats>>>();
+
+/** A palette's coats, worked out once: contrasts are the dear part of a picture. */
+function coatsOf(palette: Palette): Readonly<Record<Layer, Coats>> {
+  const known = coats.get(palette);
+  if (known) return known;
+  const layer = (shadeOf: (shade: string) => string, edge: (shade: string) => string): Coats => {
+    const coat = (name: ColourName): Coat => {
+      const shade = shadeOf(palette.colours[name]);
+      return { outline: `fill="${shade}" stroke="${edge(shade)}"/>`, letter: letterShade(shade) };
+    };
+    return {
+      white: coat('white'),
+      yellow: coat('yellow'),
+      green: coat('green'),
+      blue: coat('blue'),
+      orange: coat('orange'),
+      red: coat('red'),
+    };
+  };
+  const same = (shade: string) => shade;
+  const made = {
+    cube: layer(same, (shade) => (contrast(shade, INK) < 3 ? HAIRLINE : 'none')),
+    flat: layer(same, () => INK),
+    pale: layer(pale, () => HATCH_INK),
+  };
+  coats.set(palette, made);
+  return made;
+}
+
+function blankMarkup(tile: Tile, kind: TileStyle['kind']): string {
+  const thin = `stroke="${HATCH_INK}" stroke-width="${kind === 'flat' ? 1.1 : 2.4}"`;
+  return (
+    `<path class="${kind}-blank" d="${tile.path}" fill="${HATCH_PAPER}" ${thin}/>` +
+    `<path class="${kind}-hatch" d="${tile.hatch}" fill="none" ${thin}/>`
+  );
+}
+
 /** Markup of one sticker. Only fills, strokes and the letter depend on the sticker; hatching is added for '?'. */
 export function tileMarkup(tile: Tile, sticker: Sticker, style: TileStyle): string {
   const colour = colourOf(sticker, style.colouring);
-  if (colour === null) {
-    const thin = `stroke="${HATCH_INK}" stroke-width="${style.kind === 'flat' ? 1.1 : 2.4}"`;
-    return (
-      `<path class="${style.kind}-blank" d="${tile.path}" fill="${HATCH_PAPER}" ${thin}/>` +
-      `<path class="${style.kind}-hatch" d="${tile.hatch}" fill="none" ${thin}/>`
-    );
-  }
-  const shade = style.pale ? pale(style.palette.colours[colour]) : style.palette.colours[colour];
+  if (colour === null) return blankMarkup(tile, style.kind);
+  const coat = coatsOf(style.palette)[style.pale ? 'pale' : style.kind][colour];
   const part = style.pale ? `${style.kind}-pale` : `${style.kind}-sticker`;
-  const outline = `<path class="${part}" d="${tile.path}" fill="${shade}" stroke="${edge(shade, style)}"/>`;
+  const outline = `<path class="${part}" d="${tile.path}" ${coat.outline}`;
   if (!style.letters && !style.palette.lettered) return outline;
   const [x, y] = tile.middle;
   const size = tile.letterSize;
   return (
     `${outline}<text class="picture-letter" x="${x.toFixed(1)}" y="${(y + size * 0.35).toFixed(1)}" ` +
-    `font-size="${size}" text-anchor="middle" fill="${letterShade(shade)}">${COLOUR_LETTERS[colour]}</text>`
+    `font-size="${size}" text-anchor="middle" fill="${coat.letter}">${COLOUR_LETTERS[colour]}</text>`
   );
-}
-
-function edge(shade: string, style: TileStyle): string {
-  if (style.kind === 'flat') return INK;
-  if (style.pale) return HATCH_INK;
-  return contrast(shade, INK) < 3 ? HAIRLINE : 'none';
 }
