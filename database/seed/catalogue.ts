@@ -4,10 +4,10 @@ import { parse } from 'csv-parse/sync';
 import { sql } from 'drizzle-orm';
 import { CASE_SETS, type CaseSet, caseSet, solvesCase } from '#shared/lastlayer/index.ts';
 import { type Database, openDatabase, type Transaction, tables } from '../client.ts';
+import { writeCaseSet } from '../queries/write-case-set.ts';
 
 /** Sets that come with algorithms of our own. */
 const WITH_EDITION = ['oll', 'pll'] as const;
-const BATCH = 1_000;
 
 interface SeedLine {
   readonly case: string;
@@ -27,32 +27,12 @@ export async function seedCatalogue(db: Database): Promise<void> {
       (await tx.select({ key: tables.caseSet.setKey }).from(tables.caseSet)).map((row) => row.key),
     );
     for (const { key } of CASE_SETS) {
-      if (!known.has(key)) await insertSet(tx, caseSet(key));
+      if (!known.has(key)) await writeCaseSet(tx, caseSet(key));
     }
     for (const key of WITH_EDITION) {
       if (!known.has(key)) await publishFirst(tx, caseSet(key));
     }
   });
-}
-
-async function insertSet(tx: Transaction, set: CaseSet): Promise<void> {
-  const { key, name, entry, toldApart, solved } = set.definition;
-  await tx
-    .insert(tables.caseSet)
-    .values({ setKey: key, name, entry, toldApart: [...toldApart], solved: [...solved] });
-  const rows = [set.skip, ...set.cases].map((c) => ({
-    caseKey: c.key,
-    setKey: key,
-    number: c.number,
-    canonical: c.canonical,
-    weight: c.weight,
-    angles: c.angles,
-    cluster: c.cluster,
-    isSkip: c.skip,
-  }));
-  for (let at = 0; at < rows.length; at += BATCH) {
-    await tx.insert(tables.setCase).values(rows.slice(at, at + BATCH));
-  }
 }
 
 async function publishFirst(tx: Transaction, set: CaseSet): Promise<void> {

@@ -1,5 +1,6 @@
 import type { EndpointName } from '#shared/contracts/endpoints.ts';
 import { adminRows } from './admin/rows.ts';
+import { caseSetRows } from './case-sets/rows.ts';
 import { catalogueRows } from './catalogue/rows.ts';
 import { deskRows } from './desk/rows.ts';
 import { ledgerRows } from './ledger/rows.ts';
@@ -19,5 +20,6 @@ export const contract: Record<Exclude<EndpointName, CookieEndpoint>, AnyRow> = {
   ...memberRows,
   ...adminRows,
   ...catalogueRows,
+  ...caseSetRows,
   ...ledgerRows,
 };

@@ -1,3 +1,4 @@
+import type { CaseChoices, DefineSetInput, PreviewSetInput, SetAliasInput, SetPreview } from './case-sets.ts';
 import type {
   CatalogueCaseInput,
   CatalogueCasesInput,
@@ -68,6 +69,21 @@ export const endpoints = {
     'withdrawSet',
     'DELETE',
     '/api/desk/programme/:setKey',
+  ),
+
+  previewSet: endpoint<PreviewSetInput, SetPreview>('previewSet', 'GET', '/api/case-set-preview'),
+  defineSet: endpoint<DefineSetInput, { setKey: string }>('defineSet', 'POST', '/api/case-sets'),
+  retireSet: endpoint<{ setKey: string }, Nothing>('retireSet', 'DELETE', '/api/case-sets/:setKey'),
+  caseChoices: endpoint<{ setKey: string }, CaseChoices>(
+    'caseChoices',
+    'GET',
+    '/api/case-sets/:setKey/choices',
+  ),
+  setAlias: endpoint<SetAliasInput, { alias: string | null }>('setAlias', 'PUT', '/api/aliases/:setKey/:key'),
+  clearAlias: endpoint<{ setKey: string; key: string }, { alias: string | null }>(
+    'clearAlias',
+    'DELETE',
+    '/api/aliases/:setKey/:key',
   ),
 
   intake: endpoint<Nothing, IntakeView>('intake', 'GET', '/api/admin/intake'),

@@ -3,6 +3,25 @@ import { numberText } from './numbers.ts';
 const { percent, seconds, count, points } = numberText;
 const AUFS = { 1: 'U', 2: 'U2', 3: 'U′' } as const;
 
+interface CasesTwice {
+  readonly set: string;
+  readonly other: string;
+  readonly cases: number;
+  /** By nickname; null for everyone. */
+  readonly who: readonly string[] | null;
+}
+
+/** At most this many people are named. */
+const NAMED = 3;
+
+function answering(who: readonly string[] | null): string {
+  if (who === null) return 'everyone answers';
+  if (who.length === 1) return `${who[0]} answers`;
+  const rest = who.length - NAMED;
+  const named = rest > 0 ? [...who.slice(0, NAMED), `${rest} more`] : who;
+  return `${named.slice(0, -1).join(', ')} and ${named.at(-1)} answer`;
+}
+
 /** The captain's desk. */
 export const deskText = {
   none: '–',
@@ -255,6 +274,10 @@ export const deskText = {
       taken: 'The set is on the programme already. Look at it again before you change it.',
       changed: 'Someone else changed or withdrew this set meanwhile. Look at it again.',
       gone: 'That set is not on the programme.',
+      casesTwice: ({ set, other, cases, who }: CasesTwice) =>
+        `${set} and ${other} share ${cases === 1 ? 'a case' : `${cases} cases`}, and ${answering(who)} for ${
+          cases === 1 ? 'it' : 'them'
+        } through ${other} already. Withdraw ${other} there first: what was learned stays.`,
     },
   },
   points,

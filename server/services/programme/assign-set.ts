@@ -3,8 +3,10 @@ import { type Transaction, tables } from '#database/client.ts';
 import type { AssignSetInput, ProgrammeView } from '#shared/contracts/desk.ts';
 import { deskText } from '#shared/text/desk.ts';
 import { notFound, Problem, stale } from '../../http/problem.ts';
+import { holdSet } from '../case-sets/hold-set.ts';
 import { editionNumbers } from '../catalogue/read-edition.ts';
 import { asCaptain, type Ctx } from '../context.ts';
+import { requireOneSetACase } from './one-set-a-case.ts';
 import { programmeView } from './read-programme-view.ts';
 
 const text = deskText.programme.problems;
@@ -12,13 +14,15 @@ const text = deskText.programme.problems;
 /**
  * Puts a set on the club's programme (`version` 0) or changes how it is trained (`version` as it was read). Who
  * trains it sees it in their next Today: nothing is copied, Today reads the programme.
- * @throws Problem not-found for no such set, cannot-take for an edition or a member that cannot be, stale when
+ * @throws Problem not-found for no such set, cannot-take for an edition or a member that cannot be and for
+ *   cases that somebody answers for through another set, stale when
  *   someone else was quicker.
  */
 export async function assignSet(ctx: Ctx, input: AssignSetInput): Promise<ProgrammeView> {
   return asCaptain(ctx, async (tx, { clubId }) => {
     await checkEdition(tx, input);
     const memberIds = await checkMembers(tx, clubId, input);
+    await requireOneSetACase(tx, clubId, input);
     if (input.version === 0) await insert(tx, clubId, input);
     else await update(tx, clubId, input);
     await writeMembers(tx, clubId, input.setKey, memberIds);
@@ -28,7 +32,11 @@ export async function assignSet(ctx: Ctx, input: AssignSetInput): Promise<Progra
 
 async function checkEdition(tx: Transaction, { setKey, pinnedEdition }: AssignSetInput): Promise<void> {
   const { caseSet } = tables;
-  const [set] = await tx.select({ key: caseSet.setKey }).from(caseSet).where(eq(caseSet.setKey, setKey));
+  await holdSet(tx, setKey, 'together');
+  const [set] = await tx
+    .select({ key: caseSet.setKey })
+    .from(caseSet)
+    .where(and(eq(caseSet.setKey, setKey), isNull(caseSet.retiredAt)));
   if (!set) throw notFound(text.noSet);
   const editions = (await editionNumbers(tx)).get(setKey) ?? [];
   if (editions.length === 0) throw refuse('/setKey', text.noEdition);

@@ -29,7 +29,7 @@ export async function programmeView(tx: Transaction, clubId: string): Promise<Pr
       version: row.version,
     })),
     available: [...editions]
-      .filter(([setKey]) => !rows.some((row) => row.setKey === setKey))
+      .filter(([setKey]) => names.has(setKey) && !rows.some((row) => row.setKey === setKey))
       .map(([setKey, numbers]) => ({
         setKey,
         name: names.get(setKey)?.name ?? setKey,
@@ -78,7 +78,8 @@ async function setNames(tx: Transaction): Promise<Map<string, { name: string; ca
   const { rows } = await tx.execute<{ set_key: string; name: string; cases: number }>(sql`
     select s.set_key, s.name,
       (select count(*)::int from set_case c where c.set_key = s.set_key and not c.is_skip) as cases
-    from case_set s where exists (select 1 from edition e where e.set_key = coalesce(s.parent_key, s.set_key))
-      or exists (select 1 from programme p where p.set_key = s.set_key)`);
+    from case_set s where s.retired_at is null and (
+      exists (select 1 from edition e where e.set_key = coalesce(s.parent_key, s.set_key))
+      or exists (select 1 from programme p where p.set_key = s.set_key))`);
   return new Map(rows.map((row) => [row.set_key, { name: row.name, cases: row.cases }]));
 }
