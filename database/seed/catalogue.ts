@@ -7,7 +7,7 @@ import { type Database, openDatabase, type Transaction, tables } from '../client
 import { writeCaseSet } from '../queries/write-case-set.ts';
 
 /** Sets that come with algorithms of our own. */
-const WITH_EDITION = ['oll', 'pll'] as const;
+export const WITH_EDITION = ['oll', 'pll', 'ocll', 'eoll', 'cpll', 'epll', 'coll', 'ell'] as const;
 
 interface SeedLine {
   readonly case: string;
