@@ -1,8 +1,8 @@
 import { getTableColumns, getTableName, is, sql } from 'drizzle-orm';
 import { PgTable } from 'drizzle-orm/pg-core';
 import { beforeAll, describe, expect, it } from 'vitest';
-import { tables } from '#database/client.ts';
-import { asMember } from '#server/services/context.ts';
+import { type Transaction, tables } from '#database/client.ts';
+import { asAdministrator, asMember } from '#server/services/context.ts';
 import { useApi } from '../support/api.ts';
 import type { Person } from '../support/factories.ts';
 import { Phone } from '../support/training.ts';
@@ -189,6 +189,109 @@ describe('Between two clubs', () => {
     for (let n = 0; n < 10; n++) {
       expect((await api.db.execute(sql`select 1 from membership`)).rows).toEqual([]);
     }
+  });
+});
+
+describe('Sets of a club’s own', () => {
+  const TABLES = ['case_set', 'set_case', 'edition', 'edition_case', 'edition_algorithm'];
+  let captain: Person;
+  let other: Person;
+  let setKey: string;
+  beforeAll(async () => {
+    const club = await api.factory.club();
+    captain = await api.factory.person({ club, role: 'captain' });
+    other = await api.factory.person({ role: 'captain' });
+    const made = await api.as(captain.claims).post('/api/case-sets', {
+      kind: 'whole',
+      name: 'Edges after corners',
+      entries: [{ entry: 'co', parts: 1 }],
+      toldApart: ['eo'],
+      solved: ['co', 'eo'],
+    });
+    setKey = made.body.setKey;
+    await api.factory.sql(`insert into edition (set_key, number, published_at) values ($1, 1, now())`, [
+      setKey,
+    ]);
+    await api.factory.sql(
+      `insert into edition_case (set_key, edition_number, case_key, name, group_name)
+       select set_key, 1, case_key, 'Own ' || number, '' from set_case where set_key = $1 and not is_skip`,
+      [setKey],
+    );
+    await api.factory.sql(
+      `insert into edition_algorithm (set_key, edition_number, case_key, rank, algorithm)
+       select set_key, 1, case_key, 1, 'M ' || case_key from edition_case where set_key = $1`,
+      [setKey],
+    );
+    const [one] = await api.factory.sql<{ case_key: string }>(
+      'select case_key from set_case where set_key = $1 and not is_skip limit 1',
+      [setKey],
+    );
+    const named = await api
+      .as(captain.claims)
+      .put(`/api/aliases/${setKey}/${one?.case_key}`, { alias: 'Among us' });
+    expect(named.status).toBe(200);
+  });
+
+  const rowsOf = async (claims: Person['claims'], table: string) =>
+    claims.role === 'administrator'
+      ? asAdministrator(api.ctx(claims), (tx) => count(tx, table))
+      : asMember(api.ctx(claims), (tx) => count(tx, table));
+  const count = async (tx: Transaction, table: string) =>
+    (await tx.execute(sql`select 1 from ${sql.identifier(table)} where set_key = ${setKey}`)).rows.length;
+
+  it.each(TABLES)('%s shows them to their club and to administrators, and to nobody else', async (table) => {
+    const administrator = await api.factory.administrator();
+    expect(await rowsOf(captain.claims, table)).toBeGreaterThan(0);
+    expect(await rowsOf(administrator.claims, table)).toBeGreaterThan(0);
+    expect(await rowsOf(other.claims, table)).toBe(0);
+    const outside = await api.db.execute(
+      sql`select 1 from ${sql.identifier(table)} where set_key = ${setKey}`,
+    );
+    expect(outside.rows).toEqual([]);
+  });
+
+  it('what one club has read of its set is not shown to another', async () => {
+    for (const path of [`/api/catalogue/sets/${setKey}`, `/api/catalogue/sets/${setKey}/editions/1`]) {
+      expect((await api.as(captain.claims).get(path)).status).toBe(200);
+      expect((await api.as(other.claims).get(path)).status).toBe(404);
+    }
+  });
+
+  it('aliases are the club’s own', async () => {
+    const aliases = (claims: Person['claims']) =>
+      asMember(
+        api.ctx(claims),
+        async (tx) => (await tx.execute<{ alias: string }>(sql`select alias from case_alias`)).rows,
+      );
+    expect(await aliases(captain.claims)).toEqual([{ alias: 'Among us' }]);
+    expect(await aliases(other.claims)).toEqual([]);
+    expect((await api.db.execute(sql`select 1 from case_alias`)).rows).toEqual([]);
+  });
+
+  it('nobody writes into another club’s, a member into none, and a definition stays as it is', async () => {
+    const member = await api.factory.person({ club: { clubId: captain.clubId, name: '' } });
+    const insert = (claims: Person['claims'], clubId: string | null) =>
+      asMember(api.ctx(claims), (tx) =>
+        tx
+          .insert(tables.caseSet)
+          .values({ setKey: 'smuggled', name: 'Smuggled', entry: 'any', toldApart: [], solved: [], clubId }),
+      );
+    await expect(insert(other.claims, captain.clubId)).rejects.toThrow();
+    await expect(insert(member.claims, captain.clubId)).rejects.toThrow();
+    await expect(insert(captain.claims, null)).rejects.toThrow();
+    const change = (claims: Person['claims'], what: ReturnType<typeof sql>) =>
+      asMember(api.ctx(claims), (tx) =>
+        tx.execute(sql`update case_set set ${what} where set_key = ${setKey}`),
+      );
+    expect((await change(other.claims, sql`retired_at = now()`)).rowCount).toBe(0);
+    expect((await change(member.claims, sql`retired_at = now()`)).rowCount).toBe(0);
+    await expect(change(captain.claims, sql`entry = 'any'`)).rejects.toThrow();
+    await expect(
+      asMember(api.ctx(captain.claims), (tx) =>
+        tx.execute(sql`insert into set_case (set_key, case_key, number, canonical, weight, angles, cluster, is_skip)
+          values ('pll', 'smuggled', 99, 0, 1, 1, 0, false)`),
+      ),
+    ).rejects.toThrow();
   });
 });
 

@@ -33,17 +33,19 @@ export class Phone {
     const [row] = await this.#api.factory.sql<{
       case_key: string;
       set_key: string;
+      editions_of: string;
       state: number;
       algorithm: string;
     }>(
-      `select s.case_key, s.set_key, s.state, a.algorithm from showing s
-       join edition_algorithm a on a.set_key = s.set_key and a.edition_number = s.edition_number
+      `select s.case_key, s.set_key, a.set_key as editions_of, s.state, a.algorithm from showing s
+       join case_set c on c.set_key = s.set_key
+       join edition_algorithm a on a.set_key = coalesce(c.parent_key, c.set_key) and a.edition_number = s.edition_number
          and a.case_key = s.case_key and a.rank = 1
        where s.showing_id = $1`,
       [showingId],
     );
     if (!row) throw new Error(`There is no showing ${showingId}.`);
-    const rightAufs = rightAufsBefore(caseSet(row.set_key), row.algorithm, row.state);
+    const rightAufs = rightAufsBefore(caseSet(row.editions_of), row.algorithm, row.state);
     return { caseKey: row.case_key, setKey: row.set_key, state: row.state, rightAufs };
   }
 

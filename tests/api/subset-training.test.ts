@@ -1,0 +1,204 @@
+import { expect, it } from 'vitest';
+import { openDatabase } from '#database/client.ts';
+import { rebuildMember } from '#server/services/rollups/rebuild-member.ts';
+import type { AssignSetInput } from '#shared/contracts/desk.ts';
+import type { MyCasesView } from '#shared/contracts/member.ts';
+import { caseSet } from '#shared/lastlayer/index.ts';
+import { useApi } from '../support/api.ts';
+import type { Person } from '../support/factories.ts';
+import { Phone } from '../support/training.ts';
+
+const api = useApi();
+const DAY = 86_400_000;
+const pll = caseSet('pll');
+const EDGES = ['Ua', 'Ub', 'H', 'Z'];
+const keyOf = (name: string) => pll.byName(name)?.key ?? '';
+
+/** A club with a subset of PLL of its own: the four cases that move edges only. */
+async function clubWithSubset() {
+  const club = await api.factory.club();
+  const captain = await api.factory.person({ club, role: 'captain' });
+  const member = await api.factory.person({ club, minutesPerDay: 10 });
+  const res = await api.as(captain.claims).post('/api/case-sets', {
+    kind: 'subset',
+    name: 'Edges only',
+    parentKey: 'pll',
+    caseKeys: EDGES.map(keyOf),
+  });
+  expect(res.status).toBe(200);
+  return { club, captain, member, edges: (res.body as { setKey: string }).setKey };
+}
+
+async function assign(captain: Person, setKey: string, change: Partial<AssignSetInput> = {}) {
+  return api.as(captain.claims).put(`/api/desk/programme/${setKey}`, {
+    pinnedEdition: null,
+    limitMs: 3000,
+    asksAuf: true,
+    forEveryone: true,
+    memberIds: [],
+    version: 0,
+    ...change,
+  });
+}
+
+const withdraw = (captain: Person, setKey: string) =>
+  api.as(captain.claims).delete(`/api/desk/programme/${setKey}`, { version: 1 });
+
+async function derived({ clubId, memberId }: Person): Promise<Record<string, unknown[]>> {
+  const read = (table: string, order: string) =>
+    api.factory.sql(`select * from ${table} where club_id = $1 and member_id = $2 order by ${order}`, [
+      clubId,
+      memberId,
+    ]);
+  return {
+    states: await read('case_state', 'case_key'),
+    firsts: await read('first_answer', 'case_key, local_day'),
+    rollups: await read('rollup', 'set_key, day, group_name'),
+  };
+}
+
+async function rebuild(person: Person): Promise<void> {
+  const owner = openDatabase(api.urls.ownerUrl, { max: 1 });
+  try {
+    await owner.db.transaction((tx) => rebuildMember(tx, person));
+  } finally {
+    await owner.pool.end();
+  }
+}
+
+it('a subset is trained like any set: its own names, its parent’s algorithms and editions', async () => {
+  const { captain, member, edges } = await clubWithSubset();
+  expect((await assign(captain, edges)).status).toBe(200);
+  const today = await new Phone(api, member).today();
+  expect(today.sets).toMatchObject([{ setKey: edges, name: 'Edges only', edition: 1 }]);
+  expect(today.sets[0]?.grids.all?.map(({ label }) => label)).toEqual(['H', 'Ua', 'Ub', 'Z', 'solved']);
+  const { verdicts } = await new Phone(api, member).answerNext();
+  expect(verdicts[0]).toMatchObject({ outcome: 'held', was: { setName: 'Edges only' } });
+  // The prior is the chance in the parent's step: a U perm is one PLL in 18, H and Z one in 72 and 36 (common practice).
+  const { cases } = (await api.as(member.claims).get('/api/cases')).body as MyCasesView;
+  expect(cases.map(({ name, prior }) => [name, prior.total / prior.weight]).sort()).toEqual([
+    ['H', 72],
+    ['Ua', 18],
+    ['Ub', 18],
+    ['Z', 36],
+  ]);
+});
+
+it('the captain’s pages tell of a subset as of any set', async () => {
+  const { captain, member, edges } = await clubWithSubset();
+  await assign(captain, edges);
+  await new Phone(api, member).answerNext({ named: 'lost', aufBefore: null });
+  const squad = await api.as(captain.claims).get(`/api/desk/squad?setKey=${edges}`);
+  expect(squad.status).toBe(200);
+  expect(squad.body.sets).toMatchObject([{ setKey: edges, name: 'Edges only' }]);
+  expect(squad.body.lost.length).toBe(4);
+  const page = await api.as(captain.claims).get(`/api/desk/members/${member.memberId}`);
+  expect(page.body.lately).toMatchObject([{ setName: 'Edges only', outcome: 'missed' }]);
+});
+
+it('moving from a subset to the whole and back keeps what was learned, and rebuilding differs by nothing', async () => {
+  const { captain, member, edges } = await clubWithSubset();
+  const phone = new Phone(api, member);
+  const train = async (answers: number) => {
+    for (let n = 0; n < answers; n++) {
+      const showing = (await phone.today()).showings[0];
+      if (!showing) return;
+      const change = n % 3 === 2 ? { named: 'lost', aufBefore: null } : {};
+      expect((await phone.send(await phone.answerTo(showing.id, change))).status).toBe(200);
+    }
+  };
+  await assign(captain, edges);
+  for (let day = 0; day < 3; day++) {
+    await train(5);
+    api.clock.advance(DAY);
+  }
+  await train(2);
+  const learned = await api.factory.sql<{ case_key: string; answers: number }>(
+    'select case_key, answers from case_state where member_id = $1 order by case_key',
+    [member.memberId],
+  );
+  expect(learned.length).toBe(4);
+
+  // In the middle of a training day, so that both sets have answers of it.
+  expect((await withdraw(captain, edges)).status).toBe(200);
+  expect((await assign(captain, 'pll')).status).toBe(200);
+  const { cases } = (await api.as(member.claims).get('/api/cases')).body as MyCasesView;
+  for (const { case_key: key, answers } of learned) {
+    expect(cases.find((one) => one.key === key)).toMatchObject({ setKey: 'pll', answers });
+  }
+  for (let day = 0; day < 3; day++) {
+    await train(6);
+    api.clock.advance(DAY);
+  }
+
+  // Back, after days on which the subset's cases moved on without it.
+  await withdraw(captain, 'pll');
+  await assign(captain, edges);
+  await train(3);
+  api.clock.advance(DAY);
+  await train(2);
+
+  const sets = await api.factory.sql<{ set_key: string }>(
+    'select distinct set_key from review where member_id = $1',
+    [member.memberId],
+  );
+  expect(sets.map((row) => row.set_key).sort()).toEqual([edges, 'pll'].sort());
+  const before = await derived(member);
+  await rebuild(member);
+  expect(await derived(member)).toEqual(before);
+}, 90_000);
+
+it('an answer given through a subset that was withdrawn meanwhile still counts, in both sets’ days', async () => {
+  const { captain, member, edges } = await clubWithSubset();
+  const phone = new Phone(api, member);
+  await assign(captain, edges);
+  const [first, kept] = (await phone.today()).showings;
+  if (!first || !kept) throw new Error('Two showings are wanted.');
+  await phone.send(await phone.answerTo(first.id));
+  const late = await phone.answerTo(kept.id, { named: 'lost', aufBefore: null });
+  await withdraw(captain, edges);
+  await assign(captain, 'pll');
+  api.clock.advance(DAY);
+  await phone.answerNext();
+  api.clock.advance(DAY);
+  expect((await phone.send(late)).status).toBe(200);
+  const before = await derived(member);
+  await rebuild(member);
+  expect(await derived(member)).toEqual(before);
+}, 60_000);
+
+it('nobody answers for a case through two sets: the refusal names both and who', async () => {
+  const { club, captain, member, edges } = await clubWithSubset();
+  await assign(captain, edges);
+  const everyone = await assign(captain, 'pll');
+  expect(everyone.status).toBe(422);
+  expect(everyone.body.errors).toEqual([expect.objectContaining({ pointer: '/setKey' })]);
+  expect(everyone.body.detail).toBe(
+    'PLL and Edges only share 4 cases, and everyone answers for them through Edges only already. Withdraw Edges only there first: what was learned stays.',
+  );
+  const one = await assign(captain, 'pll', { forEveryone: false, memberIds: [member.memberId] });
+  expect(one.body.detail).toContain(`and ${member.nickname} answers for them`);
+
+  // Handed to different people the two stand side by side; widening either is refused.
+  const second = await api.factory.person({ club });
+  const narrowed = await assign(captain, edges, {
+    forEveryone: false,
+    memberIds: [member.memberId],
+    version: 1,
+  });
+  expect(narrowed.status).toBe(200);
+  expect((await assign(captain, 'pll', { forEveryone: false, memberIds: [second.memberId] })).status).toBe(
+    200,
+  );
+  const widened = await assign(captain, edges, { version: 2 });
+  expect(widened.status).toBe(422);
+  expect(widened.body.detail).toContain(`${second.nickname} answers for them through PLL`);
+  // Sets of different cases do not meet.
+  expect((await assign(captain, 'oll')).status).toBe(200);
+});
+
+it('two sets of the same cases assigned at the same moment: one stands', async () => {
+  const { captain, edges } = await clubWithSubset();
+  const both = await Promise.all([assign(captain, edges), assign(captain, 'pll')]);
+  expect(both.map((res) => res.status).sort()).toEqual([200, 422]);
+});
