@@ -9,6 +9,7 @@ import { BrowserRouter, matchPath, Route, Routes, StaticRouter } from 'react-rou
 import type { Call } from '#shared/contracts/endpoint.ts';
 import type { SessionView } from '#shared/contracts/session.ts';
 import { usePageContext } from './page-context-provider.tsx';
+import { PersonPicturesProvider } from './person-pictures.tsx';
 import { SessionProvider } from './session.tsx';
 
 /** One screen of an area: its path, its title, what it reads, and its component. */
@@ -92,11 +93,13 @@ export function AreaPage({ area }: { area: Area }) {
     <QueryClientProvider client={client}>
       <HydrationBoundary state={data.queries}>
         <SessionProvider value={data.session}>
-          {import.meta.env.SSR ? (
-            <StaticRouter location={data.location}>{screens}</StaticRouter>
-          ) : (
-            <BrowserRouter>{screens}</BrowserRouter>
-          )}
+          <PersonPicturesProvider settings={data.session?.pictures ?? null}>
+            {import.meta.env.SSR ? (
+              <StaticRouter location={data.location}>{screens}</StaticRouter>
+            ) : (
+              <BrowserRouter>{screens}</BrowserRouter>
+            )}
+          </PersonPicturesProvider>
         </SessionProvider>
       </HydrationBoundary>
     </QueryClientProvider>

@@ -9,6 +9,7 @@ const PLACES = [
   { href: '/catalogue', label: shellText.places.catalogue },
   { href: '/admin/intake', label: shellText.places.intake },
   { href: '/ledger', label: shellText.places.ledger },
+  { href: '/admin/pictures', label: shellText.places.pictures },
 ] as const;
 const INSIDE = /^(\/admin(\/|\?|$)|\?)/;
 

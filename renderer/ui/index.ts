@@ -18,6 +18,7 @@ export * from './link.tsx';
 export * from './mark.tsx';
 export * from './notice.tsx';
 export * from './page-title.tsx';
+export * from './picture-look.tsx';
 export * from './pictures.tsx';
 export * from './progress-bar.tsx';
 export * from './ruler-ticks.tsx';

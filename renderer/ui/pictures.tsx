@@ -13,9 +13,11 @@ import {
   TABLE_COLOURING,
 } from '#shared/lastlayer/pictures/index.ts';
 import { pictureText } from '#shared/text/pictures.ts';
+import { usePictureLook } from './picture-look.tsx';
 
 interface PictureProps {
   readonly stickers: Stickers;
+  /** As the person wants it unless given. */
   readonly palette?: Palette;
   readonly letters?: boolean;
   /**
@@ -41,7 +43,9 @@ export interface SeatViewProps extends PictureProps {
 
 /** The picture of a showing. Described by its stickers unless told otherwise. */
 export function SeatView(props: SeatViewProps) {
-  const { stickers, colouring, holding, palette, letters, alt = 'describe', className } = props;
+  const look = usePictureLook();
+  const { palette = look.palette, letters = look.letters } = props;
+  const { stickers, colouring, holding, alt = 'describe', className } = props;
   // Our own markup, made of face letters and checked shades only.
   const html = useMemo(
     () => ({ __html: seatViewInner({ stickers, colouring, holding, palette, letters }) }),
@@ -67,7 +71,9 @@ export interface FlatViewProps extends PictureProps {
 
 /** The picture of a case in tables and on sheets. Hidden from assistive technology unless told otherwise. */
 export function FlatView(props: FlatViewProps) {
-  const { stickers, colouring = TABLE_COLOURING, palette, letters, alt = 'hidden', className } = props;
+  const look = usePictureLook();
+  const { palette = look.palette, letters = look.letters } = props;
+  const { stickers, colouring = TABLE_COLOURING, alt = 'hidden', className } = props;
   const html = useMemo(
     () => ({ __html: flatViewInner({ stickers, colouring, palette, letters }) }),
     [stickers, colouring, palette, letters],

@@ -20,6 +20,7 @@ export const shellText = {
     programme: 'Programme',
     catalogue: 'Catalogue',
     ledger: 'Ledger',
+    pictures: 'Pictures',
     intake: 'Intake',
     training: 'My training',
     desk: 'Desk',

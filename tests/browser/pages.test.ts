@@ -51,6 +51,7 @@ const PAGES: readonly PageOfOurs[] = [
   { name: 'Programme', who: 'ines', path: '/desk/programme', heading: 'Programme' },
   { name: 'Intake', who: 'desk', path: '/admin/intake', heading: 'Intake' },
   { name: 'a draft', who: 'desk', path: aDraft, heading: 'faults.csv' },
+  { name: 'Pictures', who: 'desk', path: '/admin/pictures', heading: 'Pictures' },
   { name: 'Catalogue', who: 'desk', path: '/catalogue', heading: 'Catalogue' },
   { name: 'an edition', who: 'desk', path: '/catalogue/oll/editions/1', heading: 'OLL, edition 1' },
 ];

@@ -3,6 +3,8 @@ import { Awaited } from '#renderer/awaited.tsx';
 import { Section } from '#renderer/ui/index.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { memberText } from '#shared/text/member.ts';
+import { pictureSettingsText } from '#shared/text/picture-settings.ts';
+import { PicturesForm } from '../../pictures/pictures-form.tsx';
 import { MemberScreen } from '../screen.tsx';
 import { Account } from './account.tsx';
 import { Board } from './board.tsx';
@@ -51,6 +53,10 @@ export function ClubPage() {
             </Section>
             <Section title={text.settings}>
               <SettingsForm settings={view.settings} />
+            </Section>
+            <Section title={pictureSettingsText.title}>
+              <p className="pb-4 text-[0.9375rem] text-ink-2">{pictureSettingsText.lead}</p>
+              <PicturesForm />
             </Section>
             <Section title={text.account}>
               <Account />
