@@ -3,12 +3,15 @@ import { call } from '#shared/contracts/endpoint.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { catalogueText } from '#shared/text/catalogue.ts';
 import { catalogueCaseText } from '#shared/text/catalogue-case.ts';
+import { catalogueSheetText } from '#shared/text/catalogue-sheet.ts';
 import { CasePage } from './case/case-page.tsx';
 import { CatalogueFrame } from './catalogue-frame.tsx';
 import { EditionPage } from './edition/edition-page.tsx';
 import { setInput } from './set/set-input.ts';
 import { SetPage } from './set/set-page.tsx';
 import { SetsPage } from './sets/sets-page.tsx';
+import { sheetInput } from './sheet/sheet-input.ts';
+import { SheetPage } from './sheet/sheet-page.tsx';
 
 // Addresses of one word stand before those with a set's key in that place.
 const routes: readonly AreaRoute[] = [
@@ -23,6 +26,12 @@ const routes: readonly AreaRoute[] = [
     title: catalogueText.set.title,
     Page: SetPage,
     calls: ({ setKey = '' }, search) => [call(endpoints.catalogueSet, setInput(setKey, search))],
+  },
+  {
+    path: '/catalogue/:setKey/sheet',
+    title: catalogueSheetText.name,
+    Page: SheetPage,
+    calls: ({ setKey = '' }, search) => [call(endpoints.catalogueSheet, sheetInput(setKey, search))],
   },
   {
     path: '/catalogue/:setKey/cases/:caseKey',

@@ -1,14 +1,15 @@
 import type { CaseChoices, DefineSetInput, PreviewSetInput, SetAliasInput, SetPreview } from './case-sets.ts';
 import type {
-  CatalogueCaseInput,
   CatalogueCasesInput,
   CatalogueCasesView,
-  CatalogueCaseView,
   CatalogueSetInput,
   CatalogueSetView,
   CatalogueView,
   EditionView,
 } from './catalogue.ts';
+import type { CatalogueCaseInput, CatalogueCaseView } from './catalogue-case.ts';
+import type { ConfusableView, DrawnInput, DrawnView, SearchInput, SearchView } from './catalogue-search.ts';
+import type { CatalogueSheetInput, CatalogueSheetView } from './catalogue-sheet.ts';
 import type {
   AssignSetInput,
   MemberPageView,
@@ -116,6 +117,18 @@ export const endpoints = {
     'catalogueCase',
     'GET',
     '/api/catalogue/sets/:setKey/cases/:caseKey',
+  ),
+  catalogueSheet: endpoint<CatalogueSheetInput, CatalogueSheetView>(
+    'catalogueSheet',
+    'GET',
+    '/api/catalogue/sets/:setKey/sheet',
+  ),
+  catalogueSearch: endpoint<SearchInput, SearchView>('catalogueSearch', 'GET', '/api/catalogue/search'),
+  catalogueDrawn: endpoint<DrawnInput, DrawnView>('catalogueDrawn', 'GET', '/api/catalogue/drawn'),
+  catalogueConfusable: endpoint<CatalogueCaseInput, ConfusableView>(
+    'catalogueConfusable',
+    'GET',
+    '/api/catalogue/sets/:setKey/cases/:caseKey/confusable',
   ),
   edition: endpoint<{ setKey: string; number: number }, EditionView>(
     'edition',

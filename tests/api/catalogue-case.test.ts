@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import type { CatalogueCaseView } from '#shared/contracts/catalogue.ts';
+import type { CatalogueCaseView } from '#shared/contracts/catalogue-case.ts';
 import { type CaseOfSet, caseSet, solvesCase } from '#shared/lastlayer/index.ts';
 import { useApi } from '#tests/support/api.ts';
 import { intakeSteps } from '#tests/support/intake.ts';

@@ -1,6 +1,6 @@
 import { type LedgerColumn, LedgerTable } from '#renderer/ledger-table.tsx';
 import { AlgorithmText, Section, TextLink } from '#renderer/ui/index.ts';
-import type { CatalogueCaseView } from '#shared/contracts/catalogue.ts';
+import type { CatalogueCaseView } from '#shared/contracts/catalogue-case.ts';
 import { aufText } from '#shared/text/auf.ts';
 import { catalogueCaseText } from '#shared/text/catalogue-case.ts';
 
@@ -24,7 +24,12 @@ export function Algorithms({ view }: { view: CatalogueCaseView }) {
       title={text.title}
       aside={
         edition !== null && (
-          <TextLink href={`/catalogue/${setKey}/editions/${edition}`}>{text.edition(edition)}</TextLink>
+          <TextLink
+            href={`/catalogue/${setKey}/editions/${edition}`}
+            className="inline-flex min-h-12 items-center lg:min-h-6"
+          >
+            {text.edition(edition)}
+          </TextLink>
         )
       }
     >
@@ -33,7 +38,7 @@ export function Algorithms({ view }: { view: CatalogueCaseView }) {
         columns={columnsFor(views.length)}
         rows={algorithms}
         rowKey={({ algorithm }) => algorithm}
-        stackedRow="grid-cols-4"
+        stackedRow="grid-cols-4 gap-y-1"
       />
     </Section>
   );

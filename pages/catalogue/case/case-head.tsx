@@ -1,5 +1,5 @@
 import { BigNumber, BigNumbers, TextLink } from '#renderer/ui/index.ts';
-import type { CatalogueCaseView } from '#shared/contracts/catalogue.ts';
+import type { CatalogueCaseView } from '#shared/contracts/catalogue-case.ts';
 import { catalogueCaseText } from '#shared/text/catalogue-case.ts';
 import { caseHref } from '../case-href.ts';
 

@@ -2,7 +2,7 @@ import { useEffect } from 'react';
 import { useParams } from 'react-router';
 import { useCall } from '#renderer/api.ts';
 import { Awaited } from '#renderer/awaited.tsx';
-import type { CatalogueCaseView } from '#shared/contracts/catalogue.ts';
+import type { CatalogueCaseView } from '#shared/contracts/catalogue-case.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { catalogueCaseText } from '#shared/text/catalogue-case.ts';
 import { shellText } from '#shared/text/shell.ts';

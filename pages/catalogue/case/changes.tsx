@@ -1,6 +1,6 @@
 import { Instant } from '#renderer/instant.tsx';
 import { AlgorithmText, Section, TextLink } from '#renderer/ui/index.ts';
-import type { CatalogueCaseView } from '#shared/contracts/catalogue.ts';
+import type { CatalogueCaseView } from '#shared/contracts/catalogue-case.ts';
 import { catalogueCaseText } from '#shared/text/catalogue-case.ts';
 
 const text = catalogueCaseText.changes;

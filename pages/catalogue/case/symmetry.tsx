@@ -1,5 +1,5 @@
 import { Section } from '#renderer/ui/index.ts';
-import type { CatalogueCaseView } from '#shared/contracts/catalogue.ts';
+import type { CatalogueCaseView } from '#shared/contracts/catalogue-case.ts';
 import { catalogueCaseText } from '#shared/text/catalogue-case.ts';
 
 const text = catalogueCaseText.symmetry;

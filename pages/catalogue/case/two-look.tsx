@@ -1,6 +1,6 @@
 import type { ReactNode } from 'react';
 import { AlgorithmText, AppLink, FlatView, Section } from '#renderer/ui/index.ts';
-import type { CatalogueCaseView, TwoLookRoute } from '#shared/contracts/catalogue.ts';
+import type { CatalogueCaseView, TwoLookRoute } from '#shared/contracts/catalogue-case.ts';
 import { catalogueCaseText } from '#shared/text/catalogue-case.ts';
 import { caseHref } from '../case-href.ts';
 

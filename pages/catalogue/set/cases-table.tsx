@@ -25,7 +25,7 @@ export function CasesTable({ view }: { view: CatalogueSetView }) {
         : order === `-${by}`
           ? ('descending' as const)
           : ('none' as const),
-    href: href({ sort: order === by ? `-${by}` : by === 'name' ? null : by }),
+    href: href({ sort: nextOrder(order, by) }),
   });
   const last = view.from + view.rows.length - 1;
   return (
@@ -66,11 +66,22 @@ export function CasesTable({ view }: { view: CatalogueSetView }) {
   );
 }
 
+/** What is most of comes first where one looks for that: what is dealt often, what has many algorithms. */
+const MOST_FIRST: readonly CaseSort[] = ['prior', 'algorithms'];
+
+/** The order a press on a header brings; null for the usual one. */
+function nextOrder(order: string, by: CaseSort): string | null {
+  const usual = MOST_FIRST.includes(by) ? `-${by}` : by;
+  const turned = usual.startsWith('-') ? by : `-${by}`;
+  const next = order === usual ? turned : usual;
+  return next === 'name' ? null : next;
+}
+
 function columnsOf(
-  { setKey }: CatalogueSetView,
+  { setKey, rows }: CatalogueSetView,
   sort: (by: CaseSort) => LedgerColumn<Row>['sort'],
 ): readonly LedgerColumn<Row>[] {
-  return [
+  const columns: readonly LedgerColumn<Row>[] = [
     {
       key: 'picture',
       header: text.columns.picture,
@@ -152,4 +163,8 @@ function columnsOf(
         ),
     },
   ];
+  // Where cases have no names but their numbers, the numbers are said once.
+  return rows.every(({ name }) => name.startsWith('#'))
+    ? columns.filter(({ key }) => key !== 'number')
+    : columns;
 }

@@ -34,7 +34,7 @@ export function SetFilters({ view }: { view: CatalogueSetView }) {
         action={pathname}
         method="get"
         onSubmit={submit}
-        className="grid grid-cols-2 items-end gap-x-4 gap-y-3 lg:grid-cols-[minmax(0,2fr)_minmax(0,1.4fr)_minmax(0,1fr)_minmax(0,1fr)_auto]"
+        className="grid grid-cols-2 items-end gap-x-4 gap-y-3 lg:grid-cols-[minmax(0,2fr)_repeat(3,minmax(0,1fr))]"
       >
         {['sort', 'edition'].map((name) =>
           at(name) ? <input key={name} type="hidden" name={name} value={at(name)} /> : null,

@@ -1,20 +1,21 @@
 import {
-  catalogueCaseInput,
   catalogueCasesInput,
   catalogueCasesView,
-  catalogueCaseView,
   catalogueSetInput,
   catalogueSetView,
   catalogueView,
   editionInput,
   editionView,
 } from '#shared/contracts/catalogue.ts';
+import { catalogueCaseInput, catalogueCaseView } from '#shared/contracts/catalogue-case.ts';
+import { catalogueSheetInput, catalogueSheetView } from '#shared/contracts/catalogue-sheet.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { listCases } from '../../services/catalogue/list-cases.ts';
 import { listCatalogue } from '../../services/catalogue/list-catalogue.ts';
 import { showCase } from '../../services/catalogue/show-case.ts';
 import { showEdition } from '../../services/catalogue/show-edition.ts';
 import { showSet } from '../../services/catalogue/show-set.ts';
+import { showSheet } from '../../services/catalogue/show-sheet.ts';
 import { defineRow } from '../define-row.ts';
 import { nothing } from '../session/rows.ts';
 
@@ -47,6 +48,13 @@ export const catalogueRows = {
     input: catalogueCaseInput,
     output: catalogueCaseView,
     service: showCase,
+  }),
+  catalogueSheet: defineRow({
+    endpoint: endpoints.catalogueSheet,
+    who: 'signed-in',
+    input: catalogueSheetInput,
+    output: catalogueSheetView,
+    service: showSheet,
   }),
   edition: defineRow({
     endpoint: endpoints.edition,

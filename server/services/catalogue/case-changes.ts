@@ -1,6 +1,6 @@
 import { and, asc, eq } from 'drizzle-orm';
 import { type Transaction, tables } from '#database/client.ts';
-import type { CatalogueCaseView } from '#shared/contracts/catalogue.ts';
+import type { CatalogueCaseView } from '#shared/contracts/catalogue-case.ts';
 import type { ShownSet } from './read-shown-set.ts';
 
 type Change = CatalogueCaseView['changes'][number];

@@ -14,6 +14,8 @@ export interface EditionAlgorithm {
 export interface EditionCase {
   readonly key: string;
   readonly name: string;
+  /** The edition's name where `name` is what a club calls the case; absent elsewhere. */
+  readonly tradeName?: string;
   readonly group: string;
   /** In order of preference; the first is the one shown. */
   readonly algorithms: readonly EditionAlgorithm[];

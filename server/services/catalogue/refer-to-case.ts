@@ -1,4 +1,4 @@
-import type { CaseReference } from '#shared/contracts/catalogue.ts';
+import type { CaseReference } from '#shared/contracts/catalogue-case.ts';
 import type { CaseOfSet, CaseSet } from '#shared/lastlayer/index.ts';
 import { casePicture } from './case-picture.ts';
 import { caseOfCatalogue } from './cases-of-catalogue.ts';

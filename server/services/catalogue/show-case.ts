@@ -1,4 +1,4 @@
-import type { CatalogueCaseInput, CatalogueCaseView } from '#shared/contracts/catalogue.ts';
+import type { CatalogueCaseInput, CatalogueCaseView } from '#shared/contracts/catalogue-case.ts';
 import {
   AUFS,
   act,

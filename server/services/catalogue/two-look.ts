@@ -1,4 +1,4 @@
-import type { CatalogueCaseView } from '#shared/contracts/catalogue.ts';
+import type { CatalogueCaseView } from '#shared/contracts/catalogue-case.ts';
 import {
   ASPECTS,
   type CaseOfSet,
