@@ -80,6 +80,7 @@ export const memberText = {
   case: {
     title: 'Case',
     back: 'My cases',
+    tradeName: 'also called',
     angles: 'Angles',
     anglesNote: (count: number) =>
       count === 1
@@ -150,6 +151,11 @@ export const memberText = {
       'Nicknames only. Many members are under 16: no full names, birthdays, photos or addresses are kept on these pages. Do not use a full name as a nickname.',
     roles: { member: 'member', captain: 'captain' },
     settings: 'My settings',
+    also: 'Also here',
+    alsoNote: {
+      catalogue: 'Every case set, with its algorithms.',
+      ledger: 'What a solve can deal, counted.',
+    },
     minutes: 'Minutes a day',
     minutesHint: 'From 1 to 120. The queue is cut to fit.',
     minutesError: 'Type a whole number from 1 to 120.',

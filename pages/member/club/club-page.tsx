@@ -1,9 +1,10 @@
 import { useCall } from '#renderer/api.ts';
 import { Awaited } from '#renderer/awaited.tsx';
-import { Section } from '#renderer/ui/index.ts';
+import { Section, TextLink } from '#renderer/ui/index.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { memberText } from '#shared/text/member.ts';
 import { pictureSettingsText } from '#shared/text/picture-settings.ts';
+import { shellText } from '#shared/text/shell.ts';
 import { PicturesForm } from '../../pictures/pictures-form.tsx';
 import { MemberScreen } from '../screen.tsx';
 import { Account } from './account.tsx';
@@ -58,6 +59,7 @@ export function ClubPage() {
               <p className="pb-4 text-[0.9375rem] text-ink-2">{pictureSettingsText.lead}</p>
               <PicturesForm />
             </Section>
+            <AlsoHere />
             <Section title={text.account}>
               <Account />
             </Section>
@@ -65,5 +67,27 @@ export function ClubPage() {
         )}
       </Awaited>
     </MemberScreen>
+  );
+}
+
+/** Places that the bar has and the thumb's row has no room for. */
+function AlsoHere() {
+  const places = [
+    { href: '/catalogue', label: shellText.places.catalogue, note: text.alsoNote.catalogue },
+    { href: '/ledger', label: shellText.places.ledger, note: text.alsoNote.ledger },
+  ];
+  return (
+    <Section title={text.also} ruled className="lg:hidden">
+      <ul>
+        {places.map(({ href, label, note }) => (
+          <li key={href} className="flex min-h-12 flex-wrap items-center gap-x-4 border-b border-hair py-2">
+            <TextLink href={href} className="inline-flex min-h-8 items-center">
+              {label}
+            </TextLink>
+            <span className="text-[0.9375rem] text-ink-2">{note}</span>
+          </li>
+        ))}
+      </ul>
+    </Section>
   );
 }
