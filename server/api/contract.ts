@@ -2,6 +2,7 @@ import type { EndpointName } from '#shared/contracts/endpoints.ts';
 import { adminRows } from './admin/rows.ts';
 import { caseSetRows } from './case-sets/rows.ts';
 import { catalogueRows } from './catalogue/rows.ts';
+import { catalogueSearchRows } from './catalogue/search-rows.ts';
 import { deskRows } from './desk/rows.ts';
 import { ledgerRows } from './ledger/rows.ts';
 import { memberRows } from './member/rows.ts';
@@ -20,6 +21,7 @@ export const contract: Record<Exclude<EndpointName, CookieEndpoint>, AnyRow> = {
   ...memberRows,
   ...adminRows,
   ...catalogueRows,
+  ...catalogueSearchRows,
   ...caseSetRows,
   ...ledgerRows,
 };

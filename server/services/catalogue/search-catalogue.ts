@@ -1,4 +1,5 @@
 import type { SearchInput, SearchView } from '#shared/contracts/catalogue-search.ts';
+import { readAlgorithm } from '#shared/lastlayer/index.ts';
 import { asSignedIn, type Ctx } from '../context.ts';
 import { type CaseOfCatalogue, casesOfCatalogue } from './cases-of-catalogue.ts';
 import { filterCases } from './find-cases.ts';
@@ -23,8 +24,7 @@ export async function searchCatalogue(ctx: Ctx, { q }: SearchInput): Promise<Sea
     const moves = searchMoves(q, sets, aliases);
     return {
       q,
-      // Words that are somebody's name and no moves are not called wrong moves.
-      moves: moves.kind === 'not-a-move' && (found.length > 0 || moves.column === 1) ? null : moves,
+      moves: moves.kind === 'not-a-move' && (found.length > 0 || !beginsWithMoves(q, moves)) ? null : moves,
       names: found.slice(0, SHOWN).map(({ shown, one, algorithm }) => ({
         set: { setKey: shown.set.definition.key, name: shown.set.definition.name },
         case: referencesIn(shown, aliases)(one.case),
@@ -33,6 +33,12 @@ export async function searchCatalogue(ctx: Ctx, { q }: SearchInput): Promise<Sea
       more: Math.max(0, found.length - SHOWN),
     };
   });
+}
+
+/** Whether what is no algorithm was meant as one: two moves at least before the character that is none. */
+function beginsWithMoves(q: string, { column, token }: { column: number; token: string }): boolean {
+  const read = readAlgorithm(q.slice(0, Math.min(column - 1, q.lastIndexOf(token, column - 1))));
+  return 'normalised' in read && read.normalised.split(' ').length > 1;
 }
 
 interface Found {
