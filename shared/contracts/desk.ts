@@ -30,7 +30,9 @@ const lostCase = z.strictObject({
   setKey: z.string(),
   setName: z.string(),
   key: z.string(),
+  /** What the club calls the case, and the trade's name where that is another. */
   name: z.string(),
+  tradeName: z.string().nullable(),
   picture,
   /** Share of the solves that reach the set which the squad loses to this case. */
   share: z.number(),

@@ -5,7 +5,10 @@ export const myCase = z.strictObject({
   setKey: z.string(),
   setName: z.string(),
   key: z.string(),
+  /** What the club calls the case. */
   name: z.string(),
+  /** The trade's name, where the club has another. */
+  tradeName: z.string().nullable(),
   group: z.string(),
   picture,
   algorithm: z.string(),

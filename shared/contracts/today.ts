@@ -16,7 +16,10 @@ export type Showing = z.infer<typeof showing>;
 
 export const answerKey = z.strictObject({
   key: z.string(),
+  /** What the club calls the case. */
   label: z.string(),
+  /** The trade's name, where the club has another. */
+  tradeName: z.string().nullable(),
   /** Shown beside the AUF question once the key is chosen. */
   algorithm: z.string(),
 });

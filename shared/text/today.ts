@@ -42,6 +42,8 @@ export const todayText = {
   caseLegend: 'Case',
   recognisedIn: (ms: number) => `recognised in ${seconds(ms)} s`,
   solved: todayWords.solved,
+  /** A case by the club's name and the trade's. */
+  alsoCalled: (name: string, tradeName: string) => `${name}, ${tradeName}`,
   lost: 'lost it',
   aufLegend: 'AUF before',
   aufFor: (firstMoves: string) => `for ${firstMoves} …`,

@@ -1,8 +1,12 @@
 import { describe, expect, it } from 'vitest';
 import type { CatalogueSetView } from '#shared/contracts/catalogue.ts';
+import type { MemberPageView, SquadView } from '#shared/contracts/desk.ts';
+import type { MyCaseView } from '#shared/contracts/member.ts';
+import type { TodayView } from '#shared/contracts/today.ts';
 import { caseSet } from '#shared/lastlayer/index.ts';
 import { useApi } from '#tests/support/api.ts';
 import type { Person } from '#tests/support/factories.ts';
+import { insertAnswer, londonDay } from '#tests/support/figures.ts';
 
 const api = useApi();
 
@@ -65,6 +69,38 @@ describe('what a club calls a case', () => {
     expect(await aliasesSeen(member)).toEqual({ H: 'Double swap' });
     // Within the whole set it is taken, though the subset does not have that case.
     expect((await api.as(captain.claims).put(path('T'), { alias: 'double swap' })).status).toBe(422);
+  });
+
+  it('is what Today, My cases and the captain’s pages call the case, the trade’s name beside it', async () => {
+    const { club: made, captain, member } = await club();
+    await api.factory.assign(made, 'pll');
+    const before = (await api.as(member.claims).get('/api/today')).body as TodayView;
+    await api.as(captain.claims).put(path('Ua'), { alias: 'Round trip' });
+    const today = (await api.as(member.claims).get('/api/today')).body as TodayView;
+    const grid = today.sets[0]?.grids.all ?? [];
+    expect(grid.find(({ key }) => key === keyOf('Ua'))).toMatchObject({
+      label: 'Round trip',
+      tradeName: 'Ua',
+    });
+    // Everything stays in its place.
+    expect(grid.map(({ key }) => key)).toEqual(before.sets[0]?.grids.all?.map(({ key }) => key));
+    const mine = (await api.as(member.claims).get(`/api/cases/${keyOf('Ua')}`)).body as MyCaseView;
+    expect(mine.case).toMatchObject({ name: 'Round trip', tradeName: 'Ua' });
+    const mirrored = (await api.as(member.claims).get(`/api/cases/${keyOf('Ub')}`)).body as MyCaseView;
+    expect(mirrored.case).toMatchObject({ name: 'Ub', tradeName: null });
+    expect(mirrored.mirror?.name).toBe('Round trip');
+
+    const at = api.clock.now();
+    const localDay = londonDay(at);
+    await insertAnswer(api.factory, member, { caseName: 'T', named: 'Ua', at, localDay, outcome: 'missed' });
+    const page = (await api.as(captain.claims).get(`/api/desk/members/${member.memberId}`))
+      .body as MemberPageView;
+    expect(page.lately[0]).toMatchObject({ name: 'T', named: 'Round trip' });
+    expect(page.cases.find(({ key }) => key === keyOf('Ua'))).toMatchObject({ tradeName: 'Ua' });
+    const squad = async () => (await api.as(captain.claims).get('/api/desk/squad')).body as SquadView;
+    const costliest = (await squad()).lost[0];
+    await api.as(captain.claims).put(`/api/aliases/pll/${costliest?.key}`, { alias: 'Costly' });
+    expect((await squad()).lost[0]).toMatchObject({ name: 'Costly', tradeName: costliest?.name });
   });
 
   it('refuses what is no alias or another’s name, naming the field', async () => {

@@ -64,7 +64,7 @@ describe.each(['pll', 'oll'])('before the answer, every case of %s', (setKey) =>
     const keys = (c: CaseOfSet): AnswerKey[] =>
       set.cases
         .filter((other) => other.cluster === c.cluster)
-        .map((other) => ({ key: other.key, label: other.name, algorithm: "R U R' U'" }));
+        .map((other) => ({ key: other.key, label: other.name, tradeName: null, algorithm: "R U R' U'" }));
     const byGrid = new Map<string, Set<string>>();
     for (const { c, showing } of showings) {
       const markup = renderToStaticMarkup(

@@ -24,6 +24,7 @@ const columns: readonly Column<MyCase>[] = [
         <span>
           <span className="block text-xs font-normal text-ink-2">{row.setName}</span>
           {row.name}
+          {row.tradeName && <span className="ps-1.5 font-normal text-ink-2">{row.tradeName}</span>}
         </span>
       </span>
     ),

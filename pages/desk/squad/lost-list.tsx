@@ -27,6 +27,9 @@ export function LostList({ lost, manySets }: { lost: SquadView['lost']; manySets
                   <p className="font-bold">
                     {manySets && <span className="pe-1.5 text-sm font-normal text-ink-2">{one.setName}</span>}
                     {one.name}
+                    {one.tradeName && (
+                      <span className="ps-1.5 text-sm font-normal text-ink-2">{one.tradeName}</span>
+                    )}
                   </p>
                   <p className="text-[0.9375rem] text-ink-2">{one.mostly}</p>
                 </div>

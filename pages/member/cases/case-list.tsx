@@ -23,6 +23,7 @@ export function CaseList({ cases, today }: { cases: readonly MyCase[]; today: st
               <span className="flex flex-wrap items-baseline justify-between gap-x-3">
                 <span>
                   <span className="text-ink-2">{c.setName}</span> <b className="text-lg">{c.name}</b>
+                  {c.tradeName && <span className="ms-2 text-ink-2">{c.tradeName}</span>}
                   {c.group && <span className="ms-2 text-[0.9375rem] text-ink-2">{c.group}</span>}
                 </span>
                 <span className="text-[0.9375rem] text-ink-2">

@@ -57,6 +57,11 @@ function CaseContent({ view }: { view: MyCaseView }) {
       </BigNumbers>
       <p className="flex flex-wrap items-baseline gap-x-6 gap-y-1">
         <StateMark state={c.state} />
+        {c.tradeName && (
+          <span>
+            <span className="text-ink-2">{text.tradeName}</span> {c.tradeName}
+          </span>
+        )}
         {c.group && (
           <span>
             <span className="text-ink-2">{text.group}</span> {c.group}

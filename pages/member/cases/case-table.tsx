@@ -41,6 +41,7 @@ export function CaseTable({
       cell: (c) => (
         <AppLink href={caseHref(c.key)} className="hover:underline">
           <span className="font-normal text-ink-2">{c.setName}</span> <b>{c.name}</b>
+          {c.tradeName && <span className="ms-2 font-normal text-ink-2">{c.tradeName}</span>}
         </AppLink>
       ),
     },

@@ -51,7 +51,9 @@ export function filterCases(cases: readonly MyCase[], filter: CaseFilter): MyCas
       (c) =>
         (filter.set === '' || c.setKey === filter.set) &&
         (filter.state === '' || c.state === filter.state) &&
-        words.every((word) => plain(`${c.setName} ${c.name} ${c.group} ${c.algorithm}`).includes(word)),
+        words.every((word) =>
+          plain(`${c.setName} ${c.name} ${c.tradeName ?? ''} ${c.group} ${c.algorithm}`).includes(word),
+        ),
     )
     .sort((a, b) => compare(a, b, filter.sort) || names.compare(a.name, b.name));
 }

@@ -40,6 +40,16 @@ export function NamingScreen({ keys, grid, asksAuf, recognitionMs, onChoose }: N
     isName: !key.plain,
   }));
 
+  // Where a club has names of its own, the trade's are understood too.
+  const tradeNames = names.map((name) => ({
+    ...name,
+    text: keys.find((key) => key.key === name.value)?.tradeName ?? name.text,
+  }));
+  const read = (letters: string) => {
+    const own = readTyped(names, letters);
+    return own.kind === 'none' ? readTyped(tradeNames, letters) : own;
+  };
+
   useEffect(() => {
     beganAt.current = performance.now();
     focusKey(caseGrid.current, 0);
@@ -80,9 +90,9 @@ export function NamingScreen({ keys, grid, asksAuf, recognitionMs, onChoose }: N
   };
   const type = (letter: string, at: number) => {
     const before = at - typed.current.at < TYPING_MS ? typed.current.letters : '';
-    const longer = readTyped(names, before + letter);
+    const longer = read(before + letter);
     const letters = longer.kind === 'none' ? letter : before + letter;
-    const meant = longer.kind === 'none' ? readTyped(names, letter) : longer;
+    const meant = longer.kind === 'none' ? read(letter) : longer;
     typed.current = { letters: meant.kind === 'pick' ? '' : letters, at };
     if (meant.kind === 'none') return;
     focusKey(caseGrid.current, meant.index);
@@ -136,13 +146,29 @@ function useSlow(afterMs: number): boolean {
   return slow;
 }
 
+/** What the club calls a case, and small below it the trade's name. */
+function TwoNames({ of }: { of: AnswerKey }) {
+  return (
+    <span className="min-w-0 py-1 break-words">
+      <span className="block">{of.label}</span>{' '}
+      <span className="block text-[0.8125rem] font-normal">{of.tradeName}</span>
+    </span>
+  );
+}
+
 /** All names of a set, four in a row, then "solved" and "lost it". */
 function wholeGrid(keys: readonly AnswerKey[]): GridKey[] {
   return [
     ...keys.map((key) =>
       key.key === SOLVED
         ? { value: SOLVED, label: todayText.solved, text: todayText.solved, plain: true }
-        : { value: key.key, label: key.label },
+        : key.tradeName === null
+          ? { value: key.key, label: key.label }
+          : {
+              value: key.key,
+              text: todayText.alsoCalled(key.label, key.tradeName),
+              label: <TwoNames of={key} />,
+            },
     ),
     lostKey(keys.length, 4),
   ];
@@ -153,7 +179,7 @@ function clusterGrid(keys: readonly AnswerKey[]): GridKey[] {
   return [
     ...keys.map((key) => ({
       value: key.key,
-      text: `${key.label} ${firstMoves(key.algorithm)}`,
+      text: `${key.tradeName === null ? key.label : todayText.alsoCalled(key.label, key.tradeName)} ${firstMoves(key.algorithm)}`,
       label: (
         <span className="py-1">
           <span className="block">{key.label}</span>{' '}

@@ -27,6 +27,7 @@ export function presentCase(
     setName: entry.setName,
     key: c.key,
     name: edition?.name ?? c.name,
+    tradeName: edition?.tradeName ?? null,
     group: edition?.group ?? '',
     picture: casePicture(set, c, algorithm),
     algorithm: algorithm ?? '',

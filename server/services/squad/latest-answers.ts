@@ -3,6 +3,7 @@ import type { Transaction } from '#database/client.ts';
 import type { MemberPageView } from '#shared/contracts/desk.ts';
 import type { Outcome } from '#shared/memory/index.ts';
 import { deskText } from '#shared/text/desk.ts';
+import { withAliases } from '../aliases/with-aliases.ts';
 import { loadCaseSet } from '../catalogue/load-set.ts';
 import { readEditionContent } from '../catalogue/read-edition.ts';
 import type { MemberDay } from '../training/member-day.ts';
@@ -25,7 +26,7 @@ interface AnswerRow extends Record<string, unknown> {
 /** A member's newest answers, newest first, each named as the edition of its showing names it. */
 export async function latestAnswers(
   tx: Transaction,
-  { actor }: MemberDay,
+  { actor, aliases }: MemberDay,
   count: number,
 ): Promise<MemberPageView['lately']> {
   const { rows } = await tx.execute<AnswerRow>(sql`
@@ -40,7 +41,8 @@ export async function latestAnswers(
   const lately: MemberPageView['lately'] = [];
   for (const row of rows) {
     const set = await loadCaseSet(tx, row.set_key);
-    const { cases } = await readEditionContent(tx, row.set_key, row.edition_number);
+    const content = await readEditionContent(tx, row.set_key, row.edition_number);
+    const { cases } = withAliases(content, aliases);
     const nameOf = (key: string) => cases.get(key)?.name ?? set.byKey(key)?.name ?? key;
     lately.push({
       id: row.review_id,

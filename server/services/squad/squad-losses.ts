@@ -3,8 +3,10 @@ import { type Transaction, tables } from '#database/client.ts';
 import type { SquadView } from '#shared/contracts/desk.ts';
 import type { CaseSet } from '#shared/lastlayer/index.ts';
 import type { CaseMemory } from '#shared/memory/index.ts';
+import { withAliases } from '../aliases/with-aliases.ts';
 import { casePicture } from '../catalogue/case-picture.ts';
 import { loadCaseSets } from '../catalogue/load-set.ts';
+import { readAliases } from '../catalogue/read-aliases.ts';
 import { readEditionContent } from '../catalogue/read-edition.ts';
 import { memoryOfRow } from '../training/member-day.ts';
 import { type ProgrammeEntry, programmeOfMember } from '../training/read-programme.ts';
@@ -34,11 +36,12 @@ export async function squadLosses(tx: Transaction, request: LossesRequest): Prom
     entries.map((entry) => entry.setKey),
   );
   const memories = await readMemories(tx, clubId, [...sets.values()]);
+  const aliases = await readAliases(tx, { clubId });
   const all: Loss[] = [];
   for (const entry of entries) {
     const set = sets.get(entry.setKey);
     if (!set) continue;
-    const content = await readEditionContent(tx, entry.setKey, entry.edition);
+    const content = withAliases(await readEditionContent(tx, entry.setKey, entry.edition), aliases);
     all.push(...lossesOf(set, content, squadOf(request, entry, memories)));
   }
   const worst = costliest(all, count);
@@ -50,6 +53,7 @@ export async function squadLosses(tx: Transaction, request: LossesRequest): Prom
       setName: content.setName,
       key: c.key,
       name: known?.name ?? c.name,
+      tradeName: known?.tradeName ?? null,
       picture: casePicture(set, c, known?.algorithms[0]?.algorithm),
       share,
       mostly: mostly.get(c.key) ?? '',

@@ -21,15 +21,15 @@ export function gridOf(c: CaseOfSet): string {
  */
 export function gridsOf(set: CaseSet, content: EditionContent): Record<string, AnswerKey[]> {
   const grids: Record<string, AnswerKey[]> = {};
-  for (const { key, name, algorithms } of content.cases.values()) {
+  for (const { key, name, tradeName = null, algorithms } of content.cases.values()) {
     const c = set.byKey(key);
     if (!c) continue;
     const grid = gridOf(c);
     grids[grid] ??= [];
-    grids[grid].push({ key, label: name, algorithm: algorithms[0]?.algorithm ?? '' });
+    grids[grid].push({ key, label: name, tradeName, algorithm: algorithms[0]?.algorithm ?? '' });
   }
   const all = grids.all;
   if (all && set.cases.length <= ALL_NAMES)
-    all.push({ key: SOLVED, label: todayWords.solved, algorithm: '' });
+    all.push({ key: SOLVED, label: todayWords.solved, tradeName: null, algorithm: '' });
   return grids;
 }

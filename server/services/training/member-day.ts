@@ -2,7 +2,9 @@ import { and, eq } from 'drizzle-orm';
 import { type Transaction, tables } from '#database/client.ts';
 import type { CaseSet } from '#shared/lastlayer/index.ts';
 import type { CaseMemory } from '#shared/memory/index.ts';
+import { withAliases } from '../aliases/with-aliases.ts';
 import { loadCaseSet } from '../catalogue/load-set.ts';
+import { readAliases } from '../catalogue/read-aliases.ts';
 import { type EditionContent, readEditionContent } from '../catalogue/read-edition.ts';
 import type { ClubActor, Ctx } from '../context.ts';
 import { dayOf } from '../standing/local-date.ts';
@@ -24,6 +26,8 @@ export interface MemberDay {
   readonly day: number;
   readonly sets: readonly TrainedSet[];
   readonly memory: Map<string, CaseMemory>;
+  /** What the club calls cases, by case key. */
+  readonly aliases: ReadonlyMap<string, string>;
 }
 
 /**
@@ -43,15 +47,16 @@ export async function readMemberDay(
     .where(and(eq(membership.clubId, actor.clubId), eq(membership.memberId, actor.memberId)));
   const [member] = await (hold ? query.for('no key update') : query);
   if (!member) throw new Error('A session was opened for a membership that is not there.');
+  const aliases = await readAliases(tx, actor);
   const sets: TrainedSet[] = [];
   for (const entry of programmeOfMember(await readProgramme(tx, actor.clubId), actor.memberId)) {
     sets.push({
       entry,
       set: await loadCaseSet(tx, entry.setKey),
-      content: await readEditionContent(tx, entry.setKey, entry.edition),
+      content: withAliases(await readEditionContent(tx, entry.setKey, entry.edition), aliases),
     });
   }
-  return { actor, member, day: dayOf(ctx, actor), sets, memory: await readMemory(tx, actor) };
+  return { actor, member, day: dayOf(ctx, actor), sets, memory: await readMemory(tx, actor), aliases };
 }
 
 async function readMemory(tx: Transaction, actor: ClubActor): Promise<Map<string, CaseMemory>> {

@@ -5,6 +5,7 @@ import { stickersOf } from '#shared/lastlayer/pictures/index.ts';
 import { caseStateName, dueDay, wantedRecall } from '#shared/memory/index.ts';
 import { findingsText } from '#shared/text/findings.ts';
 import { todayWords } from '#shared/text/today-words.ts';
+import { withAliases } from '../aliases/with-aliases.ts';
 import { loadCaseSet } from '../catalogue/load-set.ts';
 import { readEditionContent } from '../catalogue/read-edition.ts';
 import { isoDate } from '../standing/local-date.ts';
@@ -40,7 +41,7 @@ async function presentVerdict(
   card: DayCard | null,
 ): Promise<Verdict> {
   const set = await loadCaseSet(tx, row.setKey);
-  const content = await readEditionContent(tx, row.setKey, row.editionNumber);
+  const content = withAliases(await readEditionContent(tx, row.setKey, row.editionNumber), day.aliases);
   const algorithm = algorithmShown(content, row.caseKey);
   const named = row.caseRight ? undefined : row.named === 'solved' ? set.skip : set.byKey(row.named);
   const view = named ? nearestView(set, row.state, named, day.member.holding) : null;
