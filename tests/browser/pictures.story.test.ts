@@ -37,11 +37,11 @@ it('warns an administrator of shades that cannot be told apart, and saves them',
   await openPage(page, '/admin/pictures');
   await expectSound(page);
   await page.locator('label', { hasText: 'Own shades' }).click();
-  await page.getByLabel('red').fill('#e07030');
+  await page.locator('input[name="red"]').fill('#e07030');
   await page.getByText(/^orange and red: \d/).waitFor();
   await expectSound(page);
   await page.getByRole('button', { name: 'Save pictures' }).click();
   await page.getByText('Saved. All pictures look so from now on.').waitFor();
   await openPage(page, '/admin/pictures');
-  expect(await page.getByLabel('red').inputValue()).toBe('#e07030');
+  expect(await page.locator('input[name="red"]').inputValue()).toBe('#e07030');
 });
