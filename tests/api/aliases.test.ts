@@ -100,7 +100,10 @@ describe('what a club calls a case', () => {
     const squad = async () => (await api.as(captain.claims).get('/api/desk/squad')).body as SquadView;
     const costliest = (await squad()).lost[0];
     await api.as(captain.claims).put(`/api/aliases/pll/${costliest?.key}`, { alias: 'Costly' });
-    expect((await squad()).lost[0]).toMatchObject({ name: 'Costly', tradeName: costliest?.name });
+    expect((await squad()).lost[0]).toMatchObject({
+      name: 'Costly',
+      tradeName: costliest?.tradeName ?? costliest?.name,
+    });
   });
 
   it('refuses what is no alias or another’s name, naming the field', async () => {
