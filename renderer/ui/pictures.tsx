@@ -1,6 +1,9 @@
 import { useMemo } from 'react';
 import {
   type Colouring,
+  CUBE_VIEW_BOX,
+  cubeSeatViewInner,
+  describeCube,
   describeStickers,
   FLAT_VIEW_BOX,
   flatViewInner,
@@ -8,6 +11,7 @@ import {
   type Palette,
   type PictureWords,
   SEAT_VIEW_BOX,
+  type Site,
   type Stickers,
   seatViewInner,
   TABLE_COLOURING,
@@ -20,6 +24,8 @@ interface PictureProps {
   /** As the person wants it unless given. */
   readonly palette?: Palette;
   readonly letters?: boolean;
+  /** Stickers to be ringed. */
+  readonly marks?: readonly Site[];
   /**
    * `describe`: a text form of the stickers, naming pieces and letters and never the case.
    * `hidden`: the words beside the picture say it already. Otherwise the text itself.
@@ -45,11 +51,11 @@ export interface SeatViewProps extends PictureProps {
 export function SeatView(props: SeatViewProps) {
   const look = usePictureLook();
   const { palette = look.palette, letters = look.letters } = props;
-  const { stickers, colouring, holding, alt = 'describe', className } = props;
+  const { stickers, colouring, holding, marks, alt = 'describe', className } = props;
   // Our own markup, made of face letters and checked shades only.
   const html = useMemo(
-    () => ({ __html: seatViewInner({ stickers, colouring, holding, palette, letters }) }),
-    [stickers, colouring, holding, palette, letters],
+    () => ({ __html: seatViewInner({ stickers, colouring, holding, palette, letters, marks }) }),
+    [stickers, colouring, holding, palette, letters, marks],
   );
   const describe = () =>
     describeStickers({ stickers, colouring, view: { kind: 'seat', holding }, words: WORDS });
@@ -73,10 +79,10 @@ export interface FlatViewProps extends PictureProps {
 export function FlatView(props: FlatViewProps) {
   const look = usePictureLook();
   const { palette = look.palette, letters = look.letters } = props;
-  const { stickers, colouring = TABLE_COLOURING, alt = 'hidden', className } = props;
+  const { stickers, colouring = TABLE_COLOURING, marks, alt = 'hidden', className } = props;
   const html = useMemo(
-    () => ({ __html: flatViewInner({ stickers, colouring, palette, letters }) }),
-    [stickers, colouring, palette, letters],
+    () => ({ __html: flatViewInner({ stickers, colouring, palette, letters, marks }) }),
+    [stickers, colouring, palette, letters, marks],
   );
   const describe = () => describeStickers({ stickers, colouring, view: { kind: 'flat' }, words: WORDS });
   return (
@@ -85,6 +91,33 @@ export function FlatView(props: FlatViewProps) {
       viewBox={FLAT_VIEW_BOX}
       focusable="false"
       className={`flat-view ${className ?? 'w-14'}`}
+      dangerouslySetInnerHTML={html}
+    />
+  );
+}
+
+export interface CubeViewProps {
+  /** 54 stickers: see shared/lastlayer/facelets.ts. */
+  readonly facelets: string;
+  readonly holding: Holding;
+  readonly colouring?: Colouring;
+  readonly className?: string;
+}
+
+/** A whole cube from the seat, described by the stickers of its three faces in view. */
+export function CubeView({ facelets, holding, colouring = TABLE_COLOURING, className }: CubeViewProps) {
+  const { palette, letters } = usePictureLook();
+  const html = useMemo(
+    () => ({ __html: cubeSeatViewInner({ facelets, colouring, holding, palette, letters }) }),
+    [facelets, colouring, holding, palette, letters],
+  );
+  return (
+    <svg
+      role="img"
+      aria-label={describeCube({ facelets, colouring, holding }, pictureText)}
+      viewBox={CUBE_VIEW_BOX}
+      focusable="false"
+      className={`seat-view ${className ?? 'w-full'}`}
       dangerouslySetInnerHTML={html}
     />
   );
