@@ -21,6 +21,8 @@ const ENTRIES: Readonly<Record<string, string>> = {
   'cp+edges': 'edges solved, corners permuted',
 };
 
+const entryWords = (entry: string): string => ENTRIES[entry] ?? entry;
+
 /** Aspects in words: orientation before permutation, each with its pieces. */
 function aspects(list: readonly string[]): string {
   if (list.length === 4) return 'everything';
@@ -53,7 +55,27 @@ export const catalogueText = {
       cases: 'cases',
       editions: 'editions',
     },
-    entry: (entry: string) => ENTRIES[entry] ?? entry,
+    entry: entryWords,
+    /** A single entry, or the parts of a mix: `2 of 5 edges oriented, 3 of 5 any last layer`. */
+    entryOrMix: (entry: string, mix: readonly { readonly entry: string; readonly parts: number }[]) => {
+      const all = mix.reduce((sum, { parts }) => sum + parts, 0);
+      if (all === 0) return entryWords(entry);
+      return mix.map((one) => `${one.parts} of ${all} ${entryWords(one.entry)}`).join(', ');
+    },
+    ofClub: 'a club’s own',
+    madeOf: (name: string) => `from ${name}`,
+    csv: 'Sets, CSV',
+    csvFile: 'case-sets.csv',
+    csvColumns: [
+      'set',
+      'reached with',
+      'told apart',
+      'solved',
+      'cases',
+      'newest edition',
+      'cases in it',
+      'algorithms in it',
+    ],
     aspects,
     cases: (n: number) => count(n, 'case', 'cases'),
     edition: (number: number) => `edition ${number}`,

@@ -45,7 +45,10 @@ export function SheetCases({
             <ol>
               {(look.first ? one.algorithms.slice(0, 1) : one.algorithms).map((algorithm) => (
                 <li key={algorithm} className="text-ink-2 first:text-ink print:text-ink">
-                  <AlgorithmText text={algorithm} className="break-words" />
+                  <AlgorithmText
+                    text={algorithm}
+                    className="block break-words ps-4 -indent-4 print:text-[9.5pt] print:leading-snug"
+                  />
                 </li>
               ))}
             </ol>
