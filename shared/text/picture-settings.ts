@@ -5,9 +5,9 @@ const { colours, palettes } = pictureText;
 
 const VISIONS: Readonly<Record<ShadePair['vision'], string>> = {
   normal: '',
-  protan: 'without red cones',
-  deutan: 'without green cones',
-  tritan: 'without blue cones',
+  protan: ', for eyes without red cones',
+  deutan: ', for eyes without green cones',
+  tritan: ', for eyes without blue cones',
 };
 
 /** How somebody wants cube pictures drawn. */
@@ -31,9 +31,9 @@ export const pictureSettingsText = {
   shadeOf: (colour: ColourName) => colours[colour],
   tooNear: 'Hard to tell apart',
   tooNearLead: (least: number) =>
-    `You can save them all the same. Two shades are told apart at a glance from a difference of ${least} on (CIEDE2000).`,
+    `You can save them all the same. Shades are told apart at a glance when they are ${least} apart (CIEDE2000).`,
   pair: ({ one, other, vision, difference }: ShadePair) =>
-    `${colours[one]} and ${colours[other]}: ${Math.floor(difference)}${vision === 'normal' ? '' : ` ${VISIONS[vision]}`}`,
+    `${colours[one]} and ${colours[other]}: ${Math.floor(difference)} apart${VISIONS[vision]}`,
   preview: 'Preview',
   seat: 'As in training, white on top',
   flat: 'As in tables, yellow on top',
