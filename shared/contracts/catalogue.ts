@@ -1,21 +1,24 @@
 import { z } from 'zod';
 import { picture, prior } from './common.ts';
 
+/** In whole parts, how the solves that reach a set come to it; empty for a single entry. */
+const mix = z.array(z.strictObject({ entry: z.string(), parts: z.int() }));
+/** The set whose editions serve this one: it is a part or a mix of that one's cases. */
+const parent = z.strictObject({ setKey: z.string(), name: z.string() }).nullable();
+
 export const catalogueView = z.strictObject({
   sets: z.array(
     z.strictObject({
       setKey: z.string(),
       name: z.string(),
       entry: z.string(),
-      /** In whole parts, how the solves that reach the set come to it; empty for a single entry. */
-      mix: z.array(z.strictObject({ entry: z.string(), parts: z.int() })),
+      mix,
       toldApart: z.array(z.string()),
       solved: z.array(z.string()),
       cases: z.int(),
       /** A club's own, not the installation's. */
       ofClub: z.boolean(),
-      /** The set whose editions serve this one: it is a part or a mix of that one's cases. */
-      parent: z.strictObject({ setKey: z.string(), name: z.string() }).nullable(),
+      parent,
       editions: z.array(
         z.strictObject({
           number: z.int(),
@@ -84,8 +87,10 @@ export const setHead = {
   setKey: z.string(),
   setName: z.string(),
   entry: z.string(),
+  mix,
   toldApart: z.array(z.string()),
   solved: z.array(z.string()),
+  parent,
 };
 
 /** What the catalogue's lists say of a case. */

@@ -89,6 +89,7 @@ export const catalogueText = {
     title: 'Case set',
     lead: (entry: string, toldApart: string, solved: string) =>
       `Reached with ${entry}. Told apart: ${toldApart}. Solved: ${solved}.`,
+    casesOf: 'Its cases are those of',
     cases: (n: number) => (n === 1 ? 'case beside the skip' : 'cases beside the skip'),
     skip: 'solves skip it',
     withAlgorithm: (n: number, of: number) => (n === of ? 'all' : `${numberText.whole(n)}`),

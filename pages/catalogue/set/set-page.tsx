@@ -2,7 +2,7 @@ import { useEffect } from 'react';
 import { useParams, useSearchParams } from 'react-router';
 import { useCall } from '#renderer/api.ts';
 import { Awaited } from '#renderer/awaited.tsx';
-import { BigNumber, BigNumbers, LinkButton, PageTitle } from '#renderer/ui/index.ts';
+import { BigNumber, BigNumbers, LinkButton, PageTitle, TextLink } from '#renderer/ui/index.ts';
 import type { CatalogueSetView } from '#shared/contracts/catalogue.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { catalogueText } from '#shared/text/catalogue.ts';
@@ -42,13 +42,9 @@ export function SetPage() {
 
 function SetHead({ view }: { view: CatalogueSetView }) {
   const { setKey, setName, edition, cases, skip, withAlgorithm } = view;
-  const { entry, aspects } = catalogueText.sets;
   return (
     <>
-      <PageTitle
-        title={setName}
-        lead={text.lead(entry(view.entry), aspects(view.toldApart), aspects(view.solved))}
-      >
+      <PageTitle title={setName} lead={<SetLead view={view} />}>
         {edition !== null && (
           <LinkButton kind="outlined" href={`/catalogue/${setKey}/sheet`}>
             {text.sheet}
@@ -68,6 +64,21 @@ function SetHead({ view }: { view: CatalogueSetView }) {
         </BigNumbers>
         <EditionLinks view={view} />
       </div>
+    </>
+  );
+}
+
+function SetLead({ view: { entry, mix, toldApart, solved, parent } }: { view: CatalogueSetView }) {
+  const { entryOrMix, aspects } = catalogueText.sets;
+  return (
+    <>
+      {text.lead(entryOrMix(entry, mix), aspects(toldApart), aspects(solved))}
+      {parent && (
+        <>
+          {' '}
+          {text.casesOf} <TextLink href={`/catalogue/${parent.setKey}`}>{parent.name}</TextLink>.
+        </>
+      )}
     </>
   );
 }

@@ -19,6 +19,7 @@ import { frontOf, seenStickers } from './case-picture.ts';
 import { type CaseOfCatalogue, caseOfCatalogue, casesOfCatalogue } from './cases-of-catalogue.ts';
 import { orderOf } from './find-cases.ts';
 import { presentCaseOfCatalogue } from './present-case.ts';
+import { presentSet } from './present-set.ts';
 import { readAliases } from './read-aliases.ts';
 import { readShownSet, type ShownSet } from './read-shown-set.ts';
 import { referencesIn } from './refer-to-case.ts';
@@ -42,13 +43,9 @@ export async function showCase(ctx: Ctx, input: CatalogueCaseInput): Promise<Cat
     const inOll = referencesIn(oll, aliases);
     const inPll = referencesIn(pll, aliases);
     const reference = (to: CaseOfSet | null, refer: typeof referTo) => to && refer(to);
-    const { key, name, entry, toldApart, solved } = set.definition;
+    const { key } = set.definition;
     return {
-      setKey: input.setKey,
-      setName: name,
-      entry,
-      toldApart: [...toldApart],
-      solved: [...solved],
+      ...(await presentSet(tx, shown)),
       edition: content?.number ?? null,
       case: { ...presentCaseOfCatalogue(set, one), skip: c.skip },
       ...viewsOf(shown, one),

@@ -4,6 +4,7 @@ import { casePicture } from './case-picture.ts';
 import { type CaseOfCatalogue, caseOfCatalogue, casesOfCatalogue } from './cases-of-catalogue.ts';
 import { filterCases, orderOf, pageOfCases } from './find-cases.ts';
 import { presentCaseOfCatalogue } from './present-case.ts';
+import { presentSet } from './present-set.ts';
 import { readAliases } from './read-aliases.ts';
 import { inNameOrder } from './read-edition.ts';
 import { readShownSet } from './read-shown-set.ts';
@@ -14,7 +15,8 @@ const PAGE = 100;
 /** A page of a set's cases, filtered and sorted. @throws Problem not-found for an unknown set or edition. */
 export async function showSet(ctx: Ctx, input: CatalogueSetInput): Promise<CatalogueSetView> {
   return asSignedIn(ctx, async (tx, actor) => {
-    const { set, editions, content } = await readShownSet(tx, input.setKey, input.edition);
+    const shown = await readShownSet(tx, input.setKey, input.edition);
+    const { set, editions, content } = shown;
     const aliases = await readAliases(tx, actor);
     const all = casesOfCatalogue(set, content, aliases);
     const order = orderOf(input.sort);
@@ -24,13 +26,8 @@ export async function showSet(ctx: Ctx, input: CatalogueSetInput): Promise<Catal
       return c && caseOfCatalogue(c, content, aliases);
     };
     const page = pageOfCases(found, order, { after: at(input.after), before: at(input.before), size: PAGE });
-    const { name, entry, toldApart, solved } = set.definition;
     return {
-      setKey: input.setKey,
-      setName: name,
-      entry,
-      toldApart: [...toldApart],
-      solved: [...solved],
+      ...(await presentSet(tx, shown)),
       edition: content?.number ?? null,
       editions: [...editions],
       cases: all.length,
