@@ -4,14 +4,18 @@ import { endpoints } from '#shared/contracts/endpoints.ts';
 import { catalogueText } from '#shared/text/catalogue.ts';
 import { catalogueCaseText } from '#shared/text/catalogue-case.ts';
 import { catalogueSheetText } from '#shared/text/catalogue-sheet.ts';
+import { setMakingText } from '#shared/text/set-making.ts';
 import { CasePage } from './case/case-page.tsx';
 import { CatalogueFrame } from './catalogue-frame.tsx';
+import { DefinePage } from './define/define-page.tsx';
+import { readDefinition, writeDefinition } from './define/definition.ts';
 import { EditionPage } from './edition/edition-page.tsx';
 import { setInput } from './set/set-input.ts';
 import { SetPage } from './set/set-page.tsx';
 import { SetsPage } from './sets/sets-page.tsx';
 import { sheetInput } from './sheet/sheet-input.ts';
 import { SheetPage } from './sheet/sheet-page.tsx';
+import { SubsetPage } from './subset/subset-page.tsx';
 
 // Addresses of one word stand before those with a set's key in that place.
 const routes: readonly AreaRoute[] = [
@@ -22,10 +26,22 @@ const routes: readonly AreaRoute[] = [
     calls: () => [call(endpoints.catalogue, {})],
   },
   {
+    path: '/catalogue/new',
+    title: setMakingText.define.title,
+    Page: DefinePage,
+    calls: (_params, search) => [call(endpoints.previewSet, writeDefinition(readDefinition(search)))],
+  },
+  {
     path: '/catalogue/:setKey',
     title: catalogueText.set.title,
     Page: SetPage,
     calls: ({ setKey = '' }, search) => [call(endpoints.catalogueSet, setInput(setKey, search))],
+  },
+  {
+    path: '/catalogue/:setKey/subset',
+    title: setMakingText.subset.title,
+    Page: SubsetPage,
+    calls: ({ setKey = '' }) => [call(endpoints.caseChoices, { setKey })],
   },
   {
     path: '/catalogue/:setKey/sheet',

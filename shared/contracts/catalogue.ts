@@ -129,6 +129,8 @@ export const catalogueSetView = z.strictObject({
       algorithms: z.int(),
     }),
   ),
+  /** Whether the reader could retire the set, were it in no use. */
+  retirable: z.boolean(),
   /** Key to go on from, and to go back from. */
   next: z.string().nullable(),
   previous: z.string().nullable(),

@@ -2,6 +2,7 @@ import { BigNumber, BigNumbers, TextLink } from '#renderer/ui/index.ts';
 import type { CatalogueCaseView } from '#shared/contracts/catalogue-case.ts';
 import { catalogueCaseText } from '#shared/text/catalogue-case.ts';
 import { caseHref } from '../case-href.ts';
+import { AliasForm } from '../own/alias-form.tsx';
 
 const text = catalogueCaseText;
 
@@ -43,6 +44,7 @@ export function CaseHead({ view }: { view: CatalogueCaseView }) {
         <BigNumber value={text.solves(c.prior)} label={text.dealtOnceIn} />
         <BigNumber tone="quiet" value={String(c.angles)} label={text.angles(c.angles)} />
       </BigNumbers>
+      {!c.skip && <AliasForm setKey={setKey} caseKey={c.key} alias={c.alias} />}
     </header>
   );
 }

@@ -8,6 +8,7 @@ import { endpoints } from '#shared/contracts/endpoints.ts';
 import { catalogueText } from '#shared/text/catalogue.ts';
 import { numberText } from '#shared/text/numbers.ts';
 import { shellText } from '#shared/text/shell.ts';
+import { SetActions } from '../own/set-actions.tsx';
 import { CasesCsvButton } from './cases-csv.tsx';
 import { CasesTable } from './cases-table.tsx';
 import { EditionLinks } from './edition-links.tsx';
@@ -51,6 +52,7 @@ function SetHead({ view }: { view: CatalogueSetView }) {
           </LinkButton>
         )}
         <CasesCsvButton setKey={setKey} />
+        <SetActions setKey={setKey} name={setName} retirable={view.retirable} />
       </PageTitle>
       <div className="flex flex-wrap items-end justify-between gap-x-8 gap-y-4 pb-5">
         <BigNumbers>

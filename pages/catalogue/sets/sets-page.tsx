@@ -5,6 +5,7 @@ import { useSession } from '#renderer/session.tsx';
 import { Button, LinkButton, PageTitle } from '#renderer/ui/index.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { catalogueText } from '#shared/text/catalogue.ts';
+import { setMakingText } from '#shared/text/set-making.ts';
 import { setsCsv } from './sets-csv.ts';
 import { SetsTable } from './sets-table.tsx';
 
@@ -24,6 +25,11 @@ export function SetsPage() {
           >
             {text.csv}
           </Button>
+        )}
+        {role !== 'member' && (
+          <LinkButton kind="outlined" href="/catalogue/new">
+            {setMakingText.define.link}
+          </LinkButton>
         )}
         {role === 'administrator' && (
           <LinkButton kind="outlined" href="/admin/intake">

@@ -1,4 +1,5 @@
 import type { CatalogueSetInput, CatalogueSetView } from '#shared/contracts/catalogue.ts';
+import { mayRetire } from '../case-sets/may-retire.ts';
 import { asSignedIn, type Ctx } from '../context.ts';
 import { casePicture } from './case-picture.ts';
 import { type CaseOfCatalogue, caseOfCatalogue, casesOfCatalogue } from './cases-of-catalogue.ts';
@@ -46,6 +47,7 @@ export async function showSet(ctx: Ctx, input: CatalogueSetInput): Promise<Catal
         algorithm: one.algorithms[0]?.algorithm ?? null,
         algorithms: one.algorithms.length,
       })),
+      retirable: await mayRetire(tx, actor, input.setKey),
       next: page.next,
       previous: page.previous,
     };
