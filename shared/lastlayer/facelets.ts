@@ -136,6 +136,8 @@ export function faceletAt(facelets: Facelets, face: FaceletFace, row: number, co
 }
 
 export interface Frame {
+  /** Moves made so far. */
+  readonly step: number;
   /** The move that led here; null for the frame before the first. */
   readonly move: Move | null;
   readonly facelets: Facelets;
@@ -149,8 +151,8 @@ export interface Frame {
  */
 export function playAlgorithm(start: number | Stickers, moves: readonly Move[]): readonly Frame[] {
   const stickers = typeof start === 'number' ? stickersOf(start) : start;
-  const frames: Frame[] = [{ move: null, facelets: faceletsOf(stickers) }];
+  const frames: Frame[] = [{ step: 0, move: null, facelets: faceletsOf(stickers) }];
   for (const move of moves)
-    frames.push({ move, facelets: turnFacelets(frames[frames.length - 1]!.facelets, move) });
+    frames.push({ step: frames.length, move, facelets: turnFacelets(frames.at(-1)!.facelets, move) });
   return frames;
 }

@@ -55,7 +55,7 @@ describe('playing an algorithm', () => {
     if (reading.kind !== 'state') throw new Error(text);
     const frames = playAlgorithm(reading.state, moves);
     expect(frames).toHaveLength(moves.length + 1);
-    expect(frames[0]).toEqual({ move: null, facelets: faceletsOf(stickersOf(reading.state)) });
+    expect(frames[0]).toEqual({ step: 0, move: null, facelets: faceletsOf(stickersOf(reading.state)) });
     expect(frames.slice(1).map(({ move }) => move!.text)).toEqual(moves.map((move) => move.text));
     expect(oneColourFaces(frames.at(-1)!.facelets)).toBe(true);
   });
