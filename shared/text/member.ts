@@ -80,6 +80,7 @@ export const memberText = {
   case: {
     title: 'Case',
     back: 'My cases',
+    inCatalogue: 'In the catalogue',
     tradeName: 'also called',
     angles: 'Angles',
     anglesNote: (count: number) =>

@@ -1,5 +1,6 @@
 import type { BrowserContext } from 'playwright-core';
 import { describe, expect, it } from 'vitest';
+import { caseSet } from '#shared/lastlayer/index.ts';
 import { nonceOf } from './support/documents.ts';
 import { expectSound } from './support/looks.ts';
 import { memberOf } from './support/members.ts';
@@ -53,8 +54,29 @@ const PAGES: readonly PageOfOurs[] = [
   { name: 'a draft', who: 'desk', path: aDraft, heading: 'faults.csv' },
   { name: 'Pictures', who: 'desk', path: '/admin/pictures', heading: 'Pictures' },
   { name: 'Catalogue', who: 'desk', path: '/catalogue', heading: 'Catalogue' },
+  { name: 'Catalogue of a member', who: 'tobi', path: '/catalogue', heading: 'Catalogue' },
+  { name: 'a set', who: 'ines', path: '/catalogue/oll?group=dot&sort=-prior', heading: 'OLL' },
+  { name: 'a set of thousands', who: 'tobi', path: '/catalogue/1lll?angles=1', heading: '1LLL' },
+  { name: 'a set in which nothing was found', who: 'desk', path: '/catalogue/pll?q=nothing', heading: 'PLL' },
+  { name: 'a case of the catalogue', who: 'ines', path: inCatalogue('pll', 'Ja'), heading: 'PLL Ja' },
+  { name: 'a case without inverse', who: 'tobi', path: inCatalogue('oll', '27'), heading: 'OLL 27' },
+  { name: 'a case in two looks', who: 'desk', path: inCatalogue('1lll', '#2001'), heading: '1LLL #2001' },
+  { name: 'the skip', who: 'ines', path: inCatalogue('pll', 'skip'), heading: 'PLL skip' },
+  { name: 'an algorithm sheet', who: 'ines', path: '/catalogue/pll/sheet', heading: 'PLL, algorithm sheet' },
+  {
+    name: 'a case that is none',
+    who: 'ines',
+    path: '/catalogue/pll/cases/none',
+    heading: 'Not here',
+    status: 404,
+  },
   { name: 'an edition', who: 'desk', path: '/catalogue/oll/editions/1', heading: 'OLL, edition 1' },
 ];
+
+/** Address of a case's page in the catalogue. */
+function inCatalogue(setKey: string, name: string): string {
+  return `/catalogue/${setKey}/cases/${encodeURIComponent(caseSet(setKey).byName(name)?.key ?? '')}`;
+}
 
 async function aCase({ sql }: Site): Promise<string> {
   const [row] = await sql<{ case_key: string }>(

@@ -68,6 +68,12 @@ function CaseContent({ view }: { view: MyCaseView }) {
           </span>
         )}
         <span className="text-ink-2">{memberText.answers(c.answers)}</span>
+        <TextLink
+          href={`/catalogue/${c.setKey}/cases/${encodeURIComponent(c.key)}`}
+          className="inline-flex min-h-12 items-center"
+        >
+          {text.inCatalogue}
+        </TextLink>
       </p>
       <Section title={text.angles}>
         <p className="pb-3 text-ink-2">{text.anglesNote(view.angles.length)}</p>
