@@ -4,12 +4,16 @@ import { endpoints } from '#shared/contracts/endpoints.ts';
 import { catalogueText } from '#shared/text/catalogue.ts';
 import { catalogueCaseText } from '#shared/text/catalogue-case.ts';
 import { catalogueSheetText } from '#shared/text/catalogue-sheet.ts';
+import { drawingText } from '#shared/text/drawing.ts';
 import { setMakingText } from '#shared/text/set-making.ts';
 import { CasePage } from './case/case-page.tsx';
 import { CatalogueFrame } from './catalogue-frame.tsx';
 import { DefinePage } from './define/define-page.tsx';
 import { readDefinition, writeDefinition } from './define/definition.ts';
+import { drawnInput, readAddress } from './draw/draw-input.ts';
+import { DrawPage } from './draw/draw-page.tsx';
 import { EditionPage } from './edition/edition-page.tsx';
+import { searchInput } from './search/search-input.ts';
 import { setInput } from './set/set-input.ts';
 import { SetPage } from './set/set-page.tsx';
 import { SetsPage } from './sets/sets-page.tsx';
@@ -23,7 +27,20 @@ const routes: readonly AreaRoute[] = [
     path: '/catalogue',
     title: catalogueText.sets.title,
     Page: SetsPage,
-    calls: () => [call(endpoints.catalogue, {})],
+    calls: (_params, { q }) => {
+      const sought = searchInput(q);
+      const sets = call(endpoints.catalogue, {});
+      return sought ? [sets, call(endpoints.catalogueSearch, sought)] : [sets];
+    },
+  },
+  {
+    path: '/catalogue/draw',
+    title: drawingText.title,
+    Page: DrawPage,
+    calls: (_params, _search, query) => [
+      call(endpoints.catalogue, {}),
+      call(endpoints.catalogueDrawn, drawnInput(readAddress(query))),
+    ],
   },
   {
     path: '/catalogue/new',
@@ -53,7 +70,10 @@ const routes: readonly AreaRoute[] = [
     path: '/catalogue/:setKey/cases/:caseKey',
     title: catalogueCaseText.title,
     Page: CasePage,
-    calls: ({ setKey = '', caseKey = '' }) => [call(endpoints.catalogueCase, { setKey, caseKey })],
+    calls: ({ setKey = '', caseKey = '' }) => [
+      call(endpoints.catalogueCase, { setKey, caseKey }),
+      call(endpoints.catalogueConfusable, { setKey, caseKey }),
+    ],
   },
   {
     path: '/catalogue/:setKey/editions/:number',

@@ -10,7 +10,9 @@ import { Algorithms } from './algorithms.tsx';
 import { CaseHead } from './case-head.tsx';
 import { CaseViews } from './case-views.tsx';
 import { Changes } from './changes.tsx';
+import { Confusable } from './confusable.tsx';
 import { Relations } from './relations.tsx';
+import { Stepper } from './stepper.tsx';
 import { Symmetry } from './symmetry.tsx';
 import { TwoLook } from './two-look.tsx';
 
@@ -40,7 +42,9 @@ function CaseContent({ view }: { view: CatalogueCaseView }) {
         <div className="flex min-w-0 flex-col gap-9">
           <CaseViews view={view} />
           <Algorithms view={view} />
+          <Stepper key={view.case.key} view={view} />
           <TwoLook view={view} />
+          <Confusable view={view} />
         </div>
         <div className="flex min-w-0 flex-col gap-9">
           <Relations view={view} />

@@ -1,3 +1,4 @@
+import { useSearchParams } from 'react-router';
 import { useCall } from '#renderer/api.ts';
 import { Awaited } from '#renderer/awaited.tsx';
 import { downloadCsv } from '#renderer/csv.ts';
@@ -5,6 +6,10 @@ import { useSession } from '#renderer/session.tsx';
 import { Button, LinkButton, PageTitle } from '#renderer/ui/index.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { catalogueText } from '#shared/text/catalogue.ts';
+import { drawingText } from '#shared/text/drawing.ts';
+import { SearchBox } from '../search/search-box.tsx';
+import { searchInput } from '../search/search-input.ts';
+import { SearchResults } from '../search/search-results.tsx';
 import { setMakingText } from '#shared/text/set-making.ts';
 import { setsCsv } from './sets-csv.ts';
 import { SetsTable } from './sets-table.tsx';
@@ -15,9 +20,14 @@ const text = catalogueText.sets;
 export function SetsPage() {
   const { role } = useSession();
   const query = useCall(endpoints.catalogue, {});
+  const [search] = useSearchParams();
+  const sought = searchInput(search.get('q'));
   return (
     <>
       <PageTitle title={text.title} lead={text.lead}>
+        <LinkButton kind="outlined" href="/catalogue/draw">
+          {drawingText.toDrawing}
+        </LinkButton>
         {query.data && (
           <Button
             kind="outlined"
@@ -37,7 +47,12 @@ export function SetsPage() {
           </LinkButton>
         )}
       </PageTitle>
-      <Awaited query={query}>{({ sets }) => <SetsTable sets={sets} />}</Awaited>
+      <SearchBox q={sought?.q ?? ''} />
+      {sought ? (
+        <SearchResults input={sought} />
+      ) : (
+        <Awaited query={query}>{({ sets }) => <SetsTable sets={sets} />}</Awaited>
+      )}
     </>
   );
 }
