@@ -70,6 +70,14 @@ const PAGES: readonly PageOfOurs[] = [
     heading: 'Not here',
     status: 404,
   },
+  { name: 'a new case set', who: 'ines', path: '/catalogue/new', heading: 'New case set' },
+  {
+    name: 'a mix of entries',
+    who: 'desk',
+    path: '/catalogue/new?entries=any:3,eo:2&toldApart=co,eo&solved=co,eo',
+    heading: 'New case set',
+  },
+  { name: 'cases to choose', who: 'ines', path: '/catalogue/zbll/subset', heading: 'Cases of ZBLL' },
   { name: 'an edition', who: 'desk', path: '/catalogue/oll/editions/1', heading: 'OLL, edition 1' },
 ];
 
