@@ -7,10 +7,10 @@ import { Button, LinkButton, PageTitle } from '#renderer/ui/index.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { catalogueText } from '#shared/text/catalogue.ts';
 import { drawingText } from '#shared/text/drawing.ts';
+import { setMakingText } from '#shared/text/set-making.ts';
 import { SearchBox } from '../search/search-box.tsx';
 import { searchInput } from '../search/search-input.ts';
 import { SearchResults } from '../search/search-results.tsx';
-import { setMakingText } from '#shared/text/set-making.ts';
 import { setsCsv } from './sets-csv.ts';
 import { SetsTable } from './sets-table.tsx';
 
