@@ -113,7 +113,7 @@ export function DefinePage() {
             </Button>
           </p>
         </form>
-        <Preview query={preview} />
+        <Preview query={preview} mixed={definition.entries.length > 1} />
       </div>
     </>
   );

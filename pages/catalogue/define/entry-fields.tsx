@@ -35,7 +35,7 @@ export function EntryFields({
           >
             <SelectField
               id={`define-entry-${at}`}
-              label={text.entry(at + 1)}
+              label={text.entry(mixed ? at + 1 : null)}
               value={entry}
               onChange={({ currentTarget: { value } }) => {
                 const chosen = ENTRIES.find((one) => one === value);

@@ -34,19 +34,25 @@ const COLUMNS: readonly Column<Class>[] = [
 ];
 
 /** What the definition comes to, counted as it is changed. */
-export function Preview({ query }: { query: UseQueryResult<SetPreview, ApiError> }) {
+export function Preview({ query, mixed }: { query: UseQueryResult<SetPreview, ApiError>; mixed: boolean }) {
   return (
     <Section title={text.preview} ruled>
       <div aria-live="polite" aria-busy={query.isFetching} className="pt-4">
         <Awaited query={query} loading={text.counting}>
-          {(preview) => <Counted preview={preview} />}
+          {(preview) => <Counted preview={preview} mixed={mixed} />}
         </Awaited>
       </div>
     </Section>
   );
 }
 
-function Counted({ preview: { problem, counts, like, algorithmsFrom } }: { preview: SetPreview }) {
+function Counted({
+  preview: { problem, counts, like, algorithmsFrom },
+  mixed,
+}: {
+  preview: SetPreview;
+  mixed: boolean;
+}) {
   return (
     <div className="grid gap-5">
       {problem !== null && (
@@ -62,7 +68,7 @@ function Counted({ preview: { problem, counts, like, algorithmsFrom } }: { previ
             <BigNumber tone="quiet" value={text.oneIn(counts.skip)} label={text.skip} />
           </BigNumbers>
           <div className="text-ink-2">
-            <p>{text.meet(catalogueText.sets.entry(counts.entry))}</p>
+            {mixed && <p>{text.meet(catalogueText.sets.entry(counts.entry))}</p>}
             {like !== null && <p>{text.like(like)}</p>}
             {problem === null && (
               <p>{algorithmsFrom === null ? text.ownAlgorithms : text.algorithmsFrom(algorithmsFrom.name)}</p>

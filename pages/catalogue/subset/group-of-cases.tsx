@@ -35,7 +35,7 @@ export function GroupOfCases({ group: { name, cases }, alone, chosen, onTake }: 
             checked={taken === cases.length}
             onChange={(event) => onTake(cases, event.currentTarget.checked)}
           />
-          {text.takeGroup(label, cases.length)}
+          {label}
         </label>
         <span className="text-[0.9375rem] text-ink-2">{text.chosen(taken, cases.length)}</span>
         <Button
