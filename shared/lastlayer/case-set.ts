@@ -1,6 +1,6 @@
 /** A case set ready for use: its cases, and which of them a state belongs to. */
 import { mirror } from './action.ts';
-import { isEntryState } from './aspects.ts';
+import { type Entry, isEntryState } from './aspects.ts';
 import { clusterFinder, lookUps } from './case-look-ups.ts';
 import { type Classes, classify } from './classes.ts';
 import { dealOf } from './mix.ts';
@@ -114,6 +114,14 @@ export function buildCaseSet(definition: CaseSetDefinition): CaseSet {
     sorted ??= membersOf(classes, deal?.isDealt ?? (() => true));
     return sorted.members.subarray(sorted.begins[of.number], sorted.begins[of.number + 1]);
   };
+  // Drawing from a mix asks again and again for the same few: those are kept.
+  const arriving = new Map<string, Uint16Array>();
+  const statesArriving = (of: CaseOfSet, entry: Entry): Uint16Array => {
+    const id = `${of.number} ${entry}`;
+    const found = arriving.get(id) ?? statesOf(of).filter((index) => isEntryState(entry, index));
+    arriving.set(id, found);
+    return found;
+  };
   const caseOfState = (index: number): CaseOfSet | null => {
     requireStateIndex(index);
     return byNumber[classes.caseOf[index]!] ?? null;
@@ -130,7 +138,7 @@ export function buildCaseSet(definition: CaseSetDefinition): CaseSet {
     statesOf,
     drawState: (of, random) => {
       const entry = deal?.drawEntry(of.number, random);
-      const from = entry ? statesOf(of).filter((index) => isEntryState(entry, index)) : statesOf(of);
+      const from = entry ? statesArriving(of, entry) : statesOf(of);
       return from[Math.floor(random() * from.length)]!;
     },
     mirrorOf: (of) => caseOfState(mirror(of.canonical))!,
