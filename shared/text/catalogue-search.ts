@@ -25,7 +25,7 @@ export const catalogueSearchText = {
   none: '–',
   auf: (aufs: readonly number[], algorithm: string) =>
     aufs.length === 1 && aufs[0] === 0
-      ? `as ${algorithm} does`
+      ? `no AUF, then ${algorithm}`
       : `AUF ${aufText.anyOf(aufs)}, then ${algorithm}`,
   noAlgorithm: 'the catalogue has no algorithm for it',
   known: 'in the catalogue already',

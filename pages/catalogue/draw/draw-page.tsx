@@ -48,7 +48,7 @@ export function DrawPage() {
   return (
     <>
       <PageTitle title={text.title} lead={text.lead} />
-      <div className="grid items-start gap-x-14 gap-y-8 lg:grid-cols-[21rem_minmax(0,1fr)]">
+      <div className="grid items-start gap-x-14 gap-y-8 lg:grid-cols-[21rem_minmax(0,1fr)] lg:grid-rows-[auto_1fr]">
         <div className="screen-only flex flex-col gap-5">
           <PaintChoice value={paint} onChange={choose} />
           <PaintGrid drawing={drawing} wrong={wrongSites(query.data)} onPaint={onPaint} />
@@ -60,25 +60,13 @@ export function DrawPage() {
               {text.clear}
             </Button>
           </div>
-          {catalogue.data && (
-            <ChoiceGroup
-              id="draw-sets"
-              name="sets"
-              legend={text.sets}
-              kind="many"
-              paired
-              value={address.sets}
-              choices={catalogue.data.sets.map(({ setKey, name }) => ({ value: setKey, label: name }))}
-              onChange={({ target }) => look(target.value, target.checked)}
-            />
-          )}
         </div>
         <Awaited query={query}>
           {({ problems, sets }) => (
-            <div>
+            <div className="lg:col-start-2 lg:row-span-2 lg:row-start-1">
               <div role="status">
                 {problems.length > 0 && (
-                  <div className="mb-6 border-s-4 border-rose ps-4">
+                  <div className="border-s-4 border-rose ps-4">
                     <p className="font-bold">{text.wrong}</p>
                     {problems.map(({ says }) => (
                       <p key={says}>{says}</p>
@@ -86,10 +74,22 @@ export function DrawPage() {
                   </div>
                 )}
               </div>
-              <DrawnResults sets={sets} />
+              {problems.length === 0 && <DrawnResults sets={sets} />}
             </div>
           )}
         </Awaited>
+        {catalogue.data && (
+          <ChoiceGroup
+            id="draw-sets"
+            name="sets"
+            legend={text.sets}
+            kind="many"
+            paired
+            value={address.sets}
+            choices={catalogue.data.sets.map(({ setKey, name }) => ({ value: setKey, label: name }))}
+            onChange={({ target }) => look(target.value, target.checked)}
+          />
+        )}
       </div>
     </>
   );

@@ -8,11 +8,11 @@ export function PaintChoice({ value, onChange }: { value: Cell; onChange: (cell:
   return (
     <fieldset className="min-w-0">
       <legend className="pb-1 text-[0.9375rem] text-ink-2">{drawingText.colour}</legend>
-      <div className="grid max-w-[21rem] grid-cols-3 gap-px overflow-hidden border-[1.5px] border-ink bg-ink">
+      <div className="grid max-w-[21rem] grid-cols-2 gap-px overflow-hidden border-[1.5px] border-ink bg-ink">
         {PAINTS.map((cell) => (
           <label
             key={cellName(cell)}
-            className="relative flex min-h-12 items-center gap-2 bg-sheet px-2 leading-tight last:col-span-2 has-checked:font-bold nth-7:col-span-3 nth-8:col-span-3 has-focus-visible:outline-2 has-focus-visible:-outline-offset-2 has-focus-visible:outline-link"
+            className="relative flex min-h-12 items-center gap-2 bg-sheet px-2 leading-tight has-checked:font-bold has-focus-visible:outline-2 has-focus-visible:-outline-offset-2 has-focus-visible:outline-link"
           >
             <input
               type="radio"

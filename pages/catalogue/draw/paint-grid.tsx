@@ -47,6 +47,7 @@ export function PaintGrid({ drawing, wrong, onPaint }: PaintGridProps) {
           const [side, index] = one.site;
           const cell = drawing[side][index] ?? null;
           const shown = one.piece === null ? topColour(drawing) : cell;
+          const isWrong = isAt(wrong, side, index);
           return (
             <button
               key={`${side} ${index}`}
@@ -63,10 +64,10 @@ export function PaintGrid({ drawing, wrong, onPaint }: PaintGridProps) {
                 // The corners of the square are no stickers, so each row says where it begins.
                 side === 'left' && 'col-start-1',
                 (side === 'back' || side === 'front') && index === 0 && 'col-start-2',
-                isAt(wrong, side, index) ? 'border-[3px] border-rose' : 'border-[1.5px] border-ink',
+                isWrong ? 'border-[3px] border-rose' : 'border-[1.5px] border-ink',
               )}
             >
-              <Swatch cell={shown} />
+              <Swatch cell={shown} framed={isWrong} />
             </button>
           );
         }),

@@ -45,25 +45,34 @@ interface Found {
   readonly shown: ShownSet;
   readonly one: CaseOfCatalogue;
   readonly algorithm: string | null;
-  /** 0: called exactly so; 1: the words are in its name; 2: in its group; 3: in an algorithm. */
+  /** 0: called exactly so; 1: the words are in its name, or are its number; 2: in its group; 3: in an algorithm. */
   readonly rank: 0 | 1 | 2 | 3;
 }
+
+/** From this many letters on, words may stand inside others: a T is no Antisune. */
+const LETTERS_INSIDE = 3;
+const unspaced = (moves: string): string => moves.replaceAll(/[’′‘`´]/gu, "'").replaceAll(/\s+/gu, '');
 
 function foundIn(shown: ShownSet, q: string, aliases: ReadonlyMap<string, string>): readonly Found[] {
   const { set, content } = shown;
   const cases = casesOfCatalogue(set, content, aliases);
   const exact = set.byName(q)?.key;
   const words = q.toLowerCase();
-  const has = (text: string | null) => text?.toLowerCase().includes(words) ?? false;
-  return [
+  const has = (text: string | null): boolean => {
+    const letters = text?.toLowerCase() ?? '';
+    return words.length < LETTERS_INSIDE ? letters.split(/\s/u).includes(words) : letters.includes(words);
+  };
+  const wanted = [
     ...cases.filter((one) => one.case.key === exact),
     ...filterCases(cases, { q }).filter((one) => one.case.key !== exact),
-  ].map((one): Found => {
-    if (one.case.key === exact || one.alias?.toLowerCase() === words)
-      return { shown, one, algorithm: null, rank: 0 };
-    if (has(one.name) || has(one.alias)) return { shown, one, algorithm: null, rank: 1 };
-    const algorithm = one.algorithms.find(({ algorithm: text }) => text.includes(q));
-    if (algorithm) return { shown, one, algorithm: algorithm.algorithm, rank: 3 };
-    return { shown, one, algorithm: has(one.group) ? null : (one.algorithms[0]?.algorithm ?? null), rank: 2 };
+  ];
+  return wanted.flatMap((one): Found[] => {
+    const found = (rank: Found['rank'], algorithm: string | null = null) => [{ shown, one, algorithm, rank }];
+    if (one.case.key === exact || one.alias?.toLowerCase() === words) return found(0);
+    if (has(one.name) || has(one.alias) || String(one.case.number) === words.replace('#', ''))
+      return found(1);
+    if (has(one.group)) return found(2);
+    const algorithm = one.algorithms.find(({ algorithm: text }) => unspaced(text).includes(unspaced(q)));
+    return algorithm && words.length >= LETTERS_INSIDE ? found(3, algorithm.algorithm) : [];
   });
 }
