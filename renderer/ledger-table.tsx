@@ -113,7 +113,8 @@ export function LedgerTable<Row>(props: LedgerTableProps<Row>) {
 
 function Header<Row>({ column: { header, headerHidden, sort } }: { column: LedgerColumn<Row> }) {
   if (headerHidden) return <span className="sr-only">{header}</span>;
-  if (!sort) return header;
+  // As tall as a header that can be pressed, so that all stand on one line.
+  if (!sort) return <span className="inline-flex items-end lg:min-h-6">{header}</span>;
   return (
     <AppLink
       href={sort.href}

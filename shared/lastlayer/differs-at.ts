@@ -26,6 +26,8 @@ export type Difference =
       readonly shown: readonly number[];
       readonly other: readonly number[];
     }
+  /** The same pieces face up, but at these places of the top other colours do; 0..8 row by row from the back left. */
+  | { readonly face: 'top'; readonly kind: 'places'; readonly places: readonly number[] }
   /** Places 0..2, left to right, that carry the top colour on a side. */
   | {
       readonly face: SideFace;
@@ -90,12 +92,12 @@ function sideDifference(face: SideFace, shown: string, other: string): Differenc
 }
 
 /** Plainer first: what can be said without naming a colour. */
-const PLAINNESS: readonly Difference['kind'][] = ['up', 'top-colour', 'run', 'relation', 'colours'];
+const PLAINNESS: readonly Difference['kind'][] = ['up', 'top-colour', 'run', 'relation', 'places', 'colours'];
 
 /**
  * The plainest visible difference of two full states in the seat view: on top if other stickers face up,
- * else on the side that can be told most simply, the front before the turned side. Only what `seen` tells
- * apart is compared. null if nothing in view differs.
+ * else on the side that can be told most simply, the front before the turned side, else by the colours of stickers
+ * on top. Only what `seen` tells apart is compared. null if nothing in view differs.
  * @throws RangeError unless both states are 0..62207.
  */
 export function differsAt(
@@ -118,6 +120,10 @@ export function differsAt(
     const found = sideDifference(face, one![face], two![face]);
     return found ? [found] : [];
   });
+  const places = Array.from(one!.top, (_, place) => place).filter(
+    (place) => one!.top[place] !== two!.top[place],
+  );
+  if (places.length > 0) sides.push({ face: 'top', kind: 'places', places });
   sides.sort((a, b) => PLAINNESS.indexOf(a.kind) - PLAINNESS.indexOf(b.kind));
   return sides[0] ?? null;
 }

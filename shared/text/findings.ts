@@ -51,6 +51,8 @@ function differs(at: Difference, shown: string, other: string): string {
       return at.shown.length > 0
         ? `top: ${up(at.shown)} ${at.shown.length === 1 ? 'faces' : 'face'} up in ${shown}, not in ${other}`
         : `top: ${up(at.other)} ${at.other.length === 1 ? 'faces' : 'face'} up in ${other}, not in ${shown}`;
+    case 'places':
+      return `top: ${up(at.places)} ${at.places.length === 1 ? 'is' : 'are'} of another colour`;
     case 'top-colour':
       return `${at.face} face: ${shown} ${topColour(at.shown)}, ${other} ${topColour(at.other)}`;
     case 'run':

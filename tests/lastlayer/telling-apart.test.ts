@@ -3,6 +3,7 @@ import {
   ASPECTS,
   act,
   caseSet,
+  confusableWith,
   type Difference,
   differsAt,
   lostBy,
@@ -135,6 +136,8 @@ describe('where two pictures differ', () => {
       'front face: T has the top colour at left and at right, Ra has no top colour',
     ],
     [{ face: 'top', kind: 'up', shown: [1, 3], other: [] }, 'top: back and left face up in T, not in Ra'],
+    [{ face: 'top', kind: 'places', places: [2] }, 'top: back right is of another colour'],
+    [{ face: 'top', kind: 'places', places: [0, 7] }, 'top: back left and front are of another colour'],
     [{ face: 'top', kind: 'up', shown: [], other: [8] }, 'top: front right faces up in Ra, not in T'],
     [
       { face: 'left', kind: 'relation', run: 'outer-alike', shown: 'opposite', other: 'neighbour' },
@@ -143,6 +146,23 @@ describe('where two pictures differ', () => {
     [{ face: 'front', kind: 'colours' }, 'front face: the same pattern in other colours'],
   ] satisfies [Difference, string][])('is said in a sentence: %j', (at, sentence) => {
     expect(say(at, 'T', 'Ra')).toBe(sentence);
+  });
+
+  it('is somewhere in view wherever the views of two cases of the whole last layer differ in view', () => {
+    const random = seeded(13);
+    const full = caseSet('1lll');
+    for (let run = 0; run < 40; run++) {
+      const [one, other] = [pick(random, full.cases), pick(random, full.cases)];
+      for (const near of confusableWith(full, one, { count: 2 })) {
+        expect(
+          differsAt(near.shown, near.other, near.holding),
+          `${one.name} ${near.case.name}`,
+        ).not.toBeNull();
+      }
+      const shown = full.drawState(one, random);
+      const view = nearestView(full, shown, other);
+      expect(differsAt(shown, view) === null).toBe(visiblyApart(shown, view, 'right') === 0);
+    }
   });
 
   it('is true to the stickers for random states', () => {

@@ -72,7 +72,7 @@ function columnsWith(sort: (by: SetSort) => LedgerColumn<SetRow>['sort']): reado
       header: text.columns.cases,
       sort: sort('cases'),
       className: 'lg:w-20 align-top lg:text-end lg:pe-8!',
-      stacked: 'col-start-2 row-start-1 text-end',
+      stacked: 'col-start-2 row-start-1 self-center text-end',
       cell: ({ cases }) => (
         <>
           {numberText.whole(cases)}
