@@ -1,8 +1,11 @@
 import { describe, expect, it } from 'vitest';
 import type { CaseChoices, DefineSetInput, SetPreview } from '#shared/contracts/case-sets.ts';
+import type { IntakeView } from '#shared/contracts/intake.ts';
 import { caseSet } from '#shared/lastlayer/index.ts';
 import { useApi } from '#tests/support/api.ts';
 import type { Person } from '#tests/support/factories.ts';
+import { intakeSteps } from '#tests/support/intake.ts';
+import { Phone } from '#tests/support/training.ts';
 
 const api = useApi();
 
@@ -238,6 +241,61 @@ describe('defining a set', () => {
       [1, 2].map(() => api.as(captain.claims).post('/api/case-sets', edgesOnly())),
     );
     expect(both.map((res) => res.status).sort()).toEqual([200, 422]);
+  });
+});
+
+describe('algorithms of a club’s own set', () => {
+  const { upload, read, publish } = intakeSteps(api);
+
+  it('come through Intake, from an administrator, and then the club trains it', async () => {
+    const { captain, member, club: made } = await club();
+    const setKey = await define(captain, {
+      kind: 'whole',
+      name: 'Edges alone',
+      entries: [{ entry: 'corners', parts: 1 }],
+      toldApart: ['eo'],
+      solved: ['co', 'eo', 'cp'],
+    });
+    const none = await api.as(captain.claims).put(`/api/desk/programme/${setKey}`, {
+      pinnedEdition: null,
+      limitMs: 3000,
+      asksAuf: true,
+      forEveryone: true,
+      memberIds: [],
+      version: 0,
+    });
+    expect(none.status).toBe(422);
+    const administrator = await api.factory.administrator();
+    const { body: intake } = await api.as(administrator.claims).get('/api/admin/intake');
+    const listed = (intake as IntakeView).sets.find((set) => set.setKey === setKey);
+    // Three ways to flip an even number of four edges beside none, from every side (common practice).
+    expect(listed).toMatchObject({ name: 'Edges alone (a club’s own)', cases: 3, newestEdition: null });
+    // From memory; that it leaves the corners as they are and flips two edges is proved by the draft's finding.
+    const csv = "case,algorithm\nline,R U R' U' M' U R U' r'\n";
+    const sent = await upload(administrator, csv, { setKey });
+    expect(sent.status).toBe(200);
+    const draft = await read(administrator, sent.body.draftId);
+    expect(draft.lines).toMatchObject([{ finding: 'agrees', solves: 'line' }]);
+    expect((await publish(administrator, draft)).body).toEqual({ setKey, edition: 1 });
+    await api.factory.assign(made, setKey);
+    const { verdicts } = await new Phone(api, member).answerNext();
+    expect(verdicts[0]).toMatchObject({ outcome: 'held', was: { name: 'line', setName: 'Edges alone' } });
+    // What has an edition stays.
+    await api.factory.sql('delete from programme where set_key = $1', [setKey]);
+    const retired = await api.as(captain.claims).delete(`/api/case-sets/${setKey}`);
+    expect(retired.status).toBe(409);
+    expect(retired.body.detail).toContain('has editions');
+  });
+
+  it('a subset has none of its own: the file goes to its whole', async () => {
+    const { captain } = await club();
+    const setKey = await define(captain, edgesOnly());
+    const administrator = await api.factory.administrator();
+    const { body } = await api.as(administrator.claims).get('/api/admin/intake');
+    expect((body as IntakeView).sets.map((set) => set.setKey)).not.toContain(setKey);
+    const sent = await upload(administrator, 'case,algorithm\nH,M2 U M2 U2 M2 U M2\n', { setKey });
+    expect(sent.status).toBe(422);
+    expect(sent.body.errors).toEqual([expect.objectContaining({ pointer: '/setKey' })]);
   });
 });
 

@@ -1,7 +1,9 @@
 import { randomUUID } from 'node:crypto';
 import { v7 } from 'uuid';
+import { isTradeSet } from '#server/services/catalogue/load-set.ts';
+import { definitionOfRow } from '#server/services/catalogue/set-row.ts';
 import type { AnswerInput, AnswersResult, TodayView } from '#shared/contracts/today.ts';
-import { caseSet, rightAufsBefore } from '#shared/lastlayer/index.ts';
+import { buildCaseSet, type CaseSetDefinition, caseSet, rightAufsBefore } from '#shared/lastlayer/index.ts';
 import type { TestApi } from './api.ts';
 import type { Person } from './factories.ts';
 
@@ -34,10 +36,16 @@ export class Phone {
       case_key: string;
       set_key: string;
       editions_of: string;
+      name: string;
+      entry: string;
+      mix: CaseSetDefinition['mix'];
+      told_apart: string[];
+      solved: string[];
       state: number;
       algorithm: string;
     }>(
-      `select s.case_key, s.set_key, a.set_key as editions_of, s.state, a.algorithm from showing s
+      `select s.case_key, s.set_key, a.set_key as editions_of, s.state, a.algorithm,
+         c.name, c.entry, c.mix, c.told_apart, c.solved from showing s
        join case_set c on c.set_key = s.set_key
        join edition_algorithm a on a.set_key = coalesce(c.parent_key, c.set_key) and a.edition_number = s.edition_number
          and a.case_key = s.case_key and a.rank = 1
@@ -45,7 +53,11 @@ export class Phone {
       [showingId],
     );
     if (!row) throw new Error(`There is no showing ${showingId}.`);
-    const rightAufs = rightAufsBefore(caseSet(row.editions_of), row.algorithm, row.state);
+    const { set_key: setKey, editions_of: whole, told_apart: toldApart } = row;
+    const set = isTradeSet(whole)
+      ? caseSet(whole)
+      : buildCaseSet(definitionOfRow({ ...row, setKey, toldApart }));
+    const rightAufs = rightAufsBefore(set, row.algorithm, row.state);
     return { caseKey: row.case_key, setKey: row.set_key, state: row.state, rightAufs };
   }
 
