@@ -1,18 +1,21 @@
 import { type LedgerColumn, LedgerTable } from '#renderer/ledger-table.tsx';
-import { AlgorithmText, FlatView } from '#renderer/ui/index.ts';
+import { AlgorithmText, AppLink, FlatView } from '#renderer/ui/index.ts';
 import { catalogueText } from '#shared/text/catalogue.ts';
 import { numberText } from '#shared/text/numbers.ts';
+import { caseHref } from '../case-href.ts';
 import type { CaseRow, Sort, SortOrder } from './sort-cases.ts';
 
 const text = catalogueText.edition;
 
 /** The cases of an edition with all their algorithms, the one shown first on top. */
 export function CaseTable({
+  setKey,
   cases,
   order,
   sortHref,
   empty,
 }: {
+  setKey: string;
   cases: readonly CaseRow[];
   order: SortOrder;
   sortHref: (order: SortOrder) => string;
@@ -45,7 +48,11 @@ export function CaseTable({
       sort: sort('name'),
       className: 'lg:w-24',
       stacked: 'col-start-2 row-start-1',
-      cell: ({ name }) => name,
+      cell: ({ key, name }) => (
+        <AppLink href={caseHref(setKey, key)} className="link inline-flex min-h-12 items-center lg:min-h-8">
+          {name}
+        </AppLink>
+      ),
     },
     {
       key: 'group',

@@ -6,7 +6,7 @@ import { downloadCsv } from '#renderer/csv.ts';
 import { Instant } from '#renderer/instant.tsx';
 import { PageLinks, pageOf } from '#renderer/page-links.tsx';
 import { queryHref } from '#renderer/query-href.ts';
-import { AppLink, BigNumber, BigNumbers, Button, cx, TextField } from '#renderer/ui/index.ts';
+import { AppLink, BigNumber, BigNumbers, Button, cx, TextField, TextLink } from '#renderer/ui/index.ts';
 import type { EditionView } from '#shared/contracts/catalogue.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { catalogueText } from '#shared/text/catalogue.ts';
@@ -38,7 +38,10 @@ function EditionHead({ view }: { view: EditionView }) {
   const newest = Math.max(...numbers);
   const algorithms = cases.reduce((sum, c) => sum + c.algorithms.length, 0);
   return (
-    <header className="pt-6">
+    <header className="pt-4">
+      <TextLink href={`/catalogue/${setKey}`} className="inline-flex min-h-12 items-center text-[0.9375rem]">
+        {setName}
+      </TextLink>
       <h1 className="text-[1.75rem] font-bold tracking-[-0.01em] sm:text-[2rem]">
         {text.title(setName, number)}
       </h1>
@@ -118,6 +121,7 @@ function EditionCases({ view }: { view: EditionView }) {
         </p>
       </div>
       <CaseTable
+        setKey={view.setKey}
         cases={rows}
         order={order}
         sortHref={(to) => queryHref(search, pathname, { sort: sortWord(to), page: null })}
