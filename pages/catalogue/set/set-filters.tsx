@@ -42,18 +42,20 @@ export function SetFilters({ view }: { view: CatalogueSetView }) {
         <div className="col-span-2 lg:col-span-1">
           <FindField inAddress={at('q')} onFind={(q) => change({ q })} />
         </div>
-        <SelectField
-          id="set-group"
-          name="group"
-          label={text.group}
-          value={at('group')}
-          disabled={view.groups.length === 0}
-          onChange={(event) => change({ group: event.target.value })}
-          options={[
-            { value: '', label: text.allGroups },
-            ...view.groups.map(({ name, cases }) => ({ value: name, label: text.choice(name, cases) })),
-          ]}
-        />
+        <div className="col-span-2 lg:col-span-1">
+          <SelectField
+            id="set-group"
+            name="group"
+            label={text.group}
+            value={at('group')}
+            disabled={view.groups.length === 0}
+            onChange={(event) => change({ group: event.target.value })}
+            options={[
+              { value: '', label: text.allGroups },
+              ...view.groups.map(({ name, cases }) => ({ value: name, label: text.choice(name, cases) })),
+            ]}
+          />
+        </div>
         <SelectField
           id="set-angles"
           name="angles"

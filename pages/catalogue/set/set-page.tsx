@@ -45,6 +45,11 @@ function SetHead({ view }: { view: CatalogueSetView }) {
   const { setKey, setName, edition, cases, skip, withAlgorithm } = view;
   return (
     <>
+      <p className="screen-only -mb-4 pt-4">
+        <TextLink href="/catalogue" className="inline-flex min-h-12 items-center text-[0.9375rem]">
+          {catalogueText.sets.title}
+        </TextLink>
+      </p>
       <PageTitle title={setName} lead={<SetLead view={view} />}>
         {edition !== null && (
           <LinkButton kind="outlined" href={`/catalogue/${setKey}/sheet`}>

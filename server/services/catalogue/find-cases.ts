@@ -33,9 +33,7 @@ function wordsFit(words: string): (one: CaseOfCatalogue) => boolean {
   return (one) =>
     one.case.number === Number(number) ||
     [one.name, one.alias ?? '', one.group].some((field) => plain(field).includes(text)) ||
-    one.algorithms.some(
-      ({ algorithm, note }) => moves(algorithm).includes(turns) || plain(note).includes(text),
-    );
+    one.algorithms.some(({ algorithm }) => moves(algorithm).includes(turns));
 }
 
 const COMPARE: Readonly<Record<CaseSort, (one: CaseOfCatalogue, other: CaseOfCatalogue) => number>> = {
