@@ -57,8 +57,8 @@ function Pair({
           <figcaption className="pt-2">
             <TextLink href={caseHref(other.setKey, other.key)} className="font-bold">
               {other.alias ?? other.name}
-            </TextLink>
-            {other.alias !== null && <span className="ps-2 text-sm text-ink-2">{other.name}</span>}
+            </TextLink>{' '}
+            {other.alias !== null && <span className="ps-1 text-sm text-ink-2">{other.name}</span>}
           </figcaption>
         </figure>
       </div>

@@ -89,8 +89,8 @@ function Hit({ label, hit }: { label: string; hit: MovesHit | null }) {
       <AppLink href={caseHref(of.setKey, of.key)} className="group flex items-center gap-4">
         <FlatView {...of.picture} className="w-14 shrink-0" />
         <span className="min-w-0">
-          <span className="link font-bold group-hover:decoration-2">{of.alias ?? of.name}</span>
-          <span className="ps-2 text-sm text-ink-2">{of.alias === null ? of.group : of.name}</span>
+          <span className="link font-bold group-hover:decoration-2">{of.alias ?? of.name}</span>{' '}
+          <span className="ps-1 text-sm text-ink-2">{of.alias === null ? of.group : of.name}</span>
           <span className="block break-words text-[0.9375rem] text-ink-2">
             {known
               ? text.known

@@ -43,8 +43,8 @@ function Names({ names, more }: Pick<SearchView, 'names' | 'more'>) {
             >
               <FlatView {...of.picture} className="w-14 shrink-0" />
               <span className="min-w-0">
-                <span className="link font-bold group-hover:decoration-2">{`${set.name} ${of.name}`}</span>
-                {of.alias !== null && <span className="ps-2">{of.alias}</span>}
+                <span className="link font-bold group-hover:decoration-2">{`${set.name} ${of.name}`}</span>{' '}
+                {of.alias !== null && <span className="ps-1">{of.alias}</span>}
                 <span className="block break-words text-sm text-ink-2">
                   {algorithm === null ? of.group : <AlgorithmText text={algorithm} />}
                 </span>
