@@ -76,7 +76,7 @@ const PAGES: readonly PageOfOurs[] = [
     heading: 'Find by drawing',
   },
   { name: 'a set', who: 'ines', path: '/catalogue/oll?group=dot&sort=-prior', heading: 'OLL' },
-  { name: 'a set of thousands', who: 'tobi', path: '/catalogue/1lll?angles=1', heading: '1LLL' },
+  { name: 'a set of thousands', who: 'ines', path: '/catalogue/1lll?angles=1', heading: '1LLL' },
   { name: 'a set in which nothing was found', who: 'desk', path: '/catalogue/pll?q=nothing', heading: 'PLL' },
   { name: 'a case of the catalogue', who: 'ines', path: inCatalogue('pll', 'Ja'), heading: 'PLL Ja' },
   { name: 'a case without inverse', who: 'tobi', path: inCatalogue('oll', '27'), heading: 'OLL 27' },
