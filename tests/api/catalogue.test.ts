@@ -86,3 +86,15 @@ it('counts editions as they are published, newest first', async () => {
     { number: 1, note: '', cases: 1, algorithms: 1 },
   ]);
 });
+
+it('is open to members and captains, closed to the signed-out, and knows no other input', async () => {
+  const member = await api.factory.person();
+  const captain = await api.factory.person({ role: 'captain' });
+  for (const path of ['/api/catalogue', '/api/catalogue/sets/oll/editions/1']) {
+    for (const { claims } of [member, captain]) expect((await api.as(claims).get(path)).status).toBe(200);
+    expect((await api.as(null).get(path)).status).toBe(401);
+    const odd = await api.as(member.claims).get(`${path}?colour=red`);
+    expect(odd.status).toBe(400);
+    expect(odd.body.errors[0].detail).toContain('colour');
+  }
+});
