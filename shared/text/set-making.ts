@@ -76,7 +76,7 @@ export const setMakingText = {
     known: 'Those with an algorithm',
     chosen: (n: number, of: number) => `${whole(n)} of ${count(of, 'case', 'cases')}`,
     dealt: (share: number) => `${percent(share, 1)} of the solves that reach the step`,
-    show: (name: string) => `Choose among the cases of ${name}`,
+    show: (name: string) => `one by one: choose among the cases of ${name}`,
     single: 'one by one',
     noAlgorithm: 'no algorithm yet',
     make: 'Make the set',

@@ -40,10 +40,20 @@ async function inTheme(page: Page, colorScheme: keyof typeof PAPER): Promise<voi
   });
 }
 
+/**
+ * Makes the window as high as the page: what lies under a bar at the window's foot can be scrolled from under it,
+ * and whether anything lies there is chance.
+ */
+async function whole(page: Page, size: (typeof SIZES)[number]): Promise<void> {
+  await page.setViewportSize(size);
+  const height = await page.evaluate(() => document.documentElement.scrollHeight);
+  await page.setViewportSize({ ...size, height: Math.max(size.height, height) });
+}
+
 /** Looks at a page as it stands in both themes and all sizes. */
 export async function expectSound(page: Page): Promise<void> {
   for (const size of SIZES) {
-    await page.setViewportSize(size);
+    await whole(page, size);
     for (const colorScheme of ['light', 'dark'] as const) {
       await inTheme(page, colorScheme);
       const faults = await accessibilityFaults(page, colorScheme === 'light' ? 'all' : 'colours');
