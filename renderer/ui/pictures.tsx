@@ -1,9 +1,6 @@
 import { useMemo } from 'react';
 import {
   type Colouring,
-  CUBE_VIEW_BOX,
-  cubeSeatViewInner,
-  describeCube,
   describeStickers,
   FLAT_VIEW_BOX,
   flatViewInner,
@@ -91,33 +88,6 @@ export function FlatView(props: FlatViewProps) {
       viewBox={FLAT_VIEW_BOX}
       focusable="false"
       className={`flat-view ${className ?? 'w-14'}`}
-      dangerouslySetInnerHTML={html}
-    />
-  );
-}
-
-export interface CubeViewProps {
-  /** 54 stickers: see shared/lastlayer/facelets.ts. */
-  readonly facelets: string;
-  readonly holding: Holding;
-  readonly colouring?: Colouring;
-  readonly className?: string;
-}
-
-/** A whole cube from the seat, described by the stickers of its three faces in view. */
-export function CubeView({ facelets, holding, colouring = TABLE_COLOURING, className }: CubeViewProps) {
-  const { palette, letters } = usePictureLook();
-  const html = useMemo(
-    () => ({ __html: cubeSeatViewInner({ facelets, colouring, holding, palette, letters }) }),
-    [facelets, colouring, holding, palette, letters],
-  );
-  return (
-    <svg
-      role="img"
-      aria-label={describeCube({ facelets, colouring, holding }, pictureText)}
-      viewBox={CUBE_VIEW_BOX}
-      focusable="false"
-      className={`seat-view ${className ?? 'w-full'}`}
       dangerouslySetInnerHTML={html}
     />
   );

@@ -14,7 +14,7 @@ export type Facelets = string;
 export const FACELET_FACES = ['U', 'R', 'F', 'D', 'L', 'B'] as const;
 export type FaceletFace = (typeof FACELET_FACES)[number];
 
-export const SOLVED_FACELETS: Facelets = FACELET_FACES.map((face) => face.repeat(9)).join('');
+export const SOLVED_FACELETS: Facelets = 'UUUUUUUUURRRRRRRRRFFFFFFFFFDDDDDDDDDLLLLLLLLLBBBBBBBBB';
 
 /** x to the right, y up, z towards the holder. */
 type Vector = readonly [x: number, y: number, z: number];
@@ -33,15 +33,14 @@ interface Spot {
   readonly at: Vector;
   readonly out: Vector;
 }
-const SPOTS: readonly Spot[] = FACELET_FACES.flatMap((face) => {
+const spotsOf = (face: FaceletFace): Spot[] => {
   const { out, along, down } = FRAMES[face];
   return Array.from({ length: 9 }, (_, n): Spot => {
     const [column, row] = [(n % 3) - 1, Math.floor(n / 3) - 1];
     const on = (k: 0 | 1 | 2) => out[k] + column * along[k] + row * down[k];
     return { at: [on(0), on(1), on(2)], out };
   });
-});
-const SPOT_AT = new Map(SPOTS.map(({ at, out }, spot) => [`${at} ${out}`, spot]));
+};
 
 const COORDINATE: Readonly<Record<Axis, 0 | 1 | 2>> = { x: 0, y: 1, z: 2 };
 
@@ -76,20 +75,24 @@ const LAYERS: Readonly<Record<Family, readonly [axis: Axis, layers: readonly num
 };
 
 /** Where each sticker comes from, for one clockwise quarter of every family: at family · 54 + spot. */
-const CAME_FROM: Uint8Array = (() => {
+function sources(): Uint8Array {
+  const spots = FACELET_FACES.flatMap(spotsOf);
+  const spotAt = new Map(spots.map(({ at, out }, spot) => [`${at} ${out}`, spot]));
   const table = new Uint8Array(FAMILIES.length * 54);
   FAMILIES.forEach((family, number) => {
     const [axis, layers, sense] = LAYERS[family];
-    SPOTS.forEach((spot, from) => {
+    spots.forEach((spot, from) => {
       let to = spot;
       if (layers.includes(spot.at[COORDINATE[axis]]))
         for (let quarter = 0; quarter < (sense === 1 ? 1 : 3); quarter++)
           to = { at: quarterTurned(to.at, axis), out: quarterTurned(to.out, axis) };
-      table[number * 54 + SPOT_AT.get(`${to.at} ${to.out}`)!] = from;
+      table[number * 54 + spotAt.get(`${to.at} ${to.out}`)!] = from;
     });
   });
   return table;
-})();
+}
+/** Made when the first move is, so that pages without a cube to turn carry none of it. */
+let cameFrom: Uint8Array | undefined;
 
 /** @throws RangeError unless the text is 54 face letters or question marks. */
 export function requireFacelets(facelets: Facelets): void {
@@ -99,13 +102,14 @@ export function requireFacelets(facelets: Facelets): void {
 
 /** The stickers after one move. */
 export function turnFacelets(facelets: Facelets, { code }: Move): Facelets {
+  cameFrom ??= sources();
   const { family, amount } = MOVES[code]!;
   const base = FAMILIES.indexOf(family) * 54;
   let after = facelets;
   for (let quarter = 0; quarter < amount; quarter++) {
     const before = after;
     after = '';
-    for (let spot = 0; spot < 54; spot++) after += before[CAME_FROM[base + spot]!]!;
+    for (let spot = 0; spot < 54; spot++) after += before[cameFrom[base + spot]!]!;
   }
   return after;
 }

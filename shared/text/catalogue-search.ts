@@ -42,7 +42,7 @@ export const catalogueSearchText = {
     title: 'Mistaken for',
     note: 'Held so that they look most alike. Rings mark where they differ.',
     apart: (n: number) =>
-      n === 0 ? 'no visible sticker apart' : n === 1 ? 'one sticker apart' : `${n} stickers apart`,
+      n === 0 ? 'no visible sticker apart' : `${n} ${n === 1 ? 'sticker' : 'stickers'} apart`,
     mirror: 'its mirror',
     held: { right: 'right side in view', left: 'left side in view' },
     missing: 'What it is mistaken for could not be worked out.',
