@@ -1,7 +1,8 @@
 import { useMemo } from 'react';
 import { Notice } from '#renderer/ui/index.ts';
 import type { OwnShades } from '#shared/contracts/pictures.ts';
-import { COLOUR_NAMES, TOLD_APART, tooNear } from '#shared/lastlayer/pictures/index.ts';
+import { COLOUR_NAMES } from '#shared/lastlayer/pictures/index.ts';
+import { TOLD_APART, tooNear } from '#shared/lastlayer/pictures/shade-warnings.ts';
 import { pictureSettingsText as text } from '#shared/text/picture-settings.ts';
 
 /** A shade for each colour, and which of them come too near each other to be told apart. */

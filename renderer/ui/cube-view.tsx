@@ -1,12 +1,6 @@
 import { useMemo } from 'react';
-import {
-  type Colouring,
-  CUBE_VIEW_BOX,
-  cubeSeatViewInner,
-  describeCube,
-  type Holding,
-  TABLE_COLOURING,
-} from '#shared/lastlayer/pictures/index.ts';
+import { CUBE_VIEW_BOX, cubeSeatViewInner, describeCube } from '#shared/lastlayer/pictures/cube-view.ts';
+import { type Colouring, type Holding, TABLE_COLOURING } from '#shared/lastlayer/pictures/index.ts';
 import { pictureText } from '#shared/text/pictures.ts';
 import { usePictureLook } from './picture-look.tsx';
 

@@ -4,7 +4,6 @@ export * from './bottom-nav.tsx';
 export * from './button.tsx';
 export * from './choice-group.tsx';
 export * from './confirm-dialog.tsx';
-export * from './cube-view.tsx';
 export * from './cx.ts';
 export * from './data-table.tsx';
 export * from './definitions.tsx';

@@ -1,4 +1,5 @@
-import type { ColourName, ShadePair } from '../lastlayer/pictures/index.ts';
+import type { ColourName } from '../lastlayer/pictures/index.ts';
+import type { ShadePair } from '../lastlayer/pictures/shade-warnings.ts';
 import { pictureText } from './pictures.ts';
 
 const { colours, palettes } = pictureText;

@@ -10,13 +10,8 @@ import {
   STATES,
 } from '#shared/lastlayer/index.ts';
 import { parseMoves } from '#shared/lastlayer/notation.ts';
-import {
-  cubeSeatViewSvg,
-  flatViewSvg,
-  seatViewSvg,
-  stickersOf,
-  TABLE_COLOURING,
-} from '#shared/lastlayer/pictures/index.ts';
+import { cubeSeatViewSvg } from '#shared/lastlayer/pictures/cube-view.ts';
+import { flatViewSvg, seatViewSvg, stickersOf, TABLE_COLOURING } from '#shared/lastlayer/pictures/index.ts';
 import { type Figure, milliseconds, ratesOf } from './bench.ts';
 
 const colouring = TABLE_COLOURING;

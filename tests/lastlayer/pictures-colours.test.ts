@@ -9,10 +9,9 @@ import {
   PALETTES,
   paint,
   pale,
-  shadesApart,
-  tooNear,
 } from '#shared/lastlayer/pictures/index.ts';
 import { contrast, letterShade } from '#shared/lastlayer/pictures/palettes.ts';
+import { shadesApart, tooNear } from '#shared/lastlayer/pictures/shade-warnings.ts';
 
 describe('ways of holding a cube', () => {
   it('has 24, all different, each with six colours and opposite faces opposite', () => {

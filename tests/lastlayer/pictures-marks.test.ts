@@ -1,8 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { faceletsAfter, parseAlgorithm, STATES } from '#shared/lastlayer/index.ts';
+import { cubeSeatViewSvg, describeCube } from '#shared/lastlayer/pictures/cube-view.ts';
 import {
-  cubeSeatViewSvg,
-  describeCube,
   flatViewSvg,
   type Holding,
   maskStickers,

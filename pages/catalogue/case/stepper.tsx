@@ -1,5 +1,6 @@
 import { type KeyboardEvent, useMemo, useRef, useState } from 'react';
-import { Button, CubeView, cx, printedAlgorithm, Section, SelectField } from '#renderer/ui/index.ts';
+import { CubeView } from '#renderer/ui/cube-view.tsx';
+import { Button, cx, printedAlgorithm, Section, SelectField } from '#renderer/ui/index.ts';
 import type { CatalogueCaseView } from '#shared/contracts/catalogue-case.ts';
 import type { Frame } from '#shared/lastlayer/facelets.ts';
 import type { Holding } from '#shared/lastlayer/pictures/index.ts';

@@ -7,10 +7,10 @@ import {
   readAlgorithm,
   seenThrough,
 } from '#shared/lastlayer/index.ts';
+import { cubeSeatViewSvg } from '#shared/lastlayer/pictures/cube-view.ts';
 import {
   COLOUR_NAMES,
   colouringWith,
-  cubeSeatViewSvg,
   flatViewSvg,
   type Holding,
   maskStickers,
