@@ -14,12 +14,24 @@ function say(line: Record<string, unknown>): void {
   process.stdout.write(`${JSON.stringify(line)}\n`);
 }
 
+/** A request is turned away after a second; a start on a busy machine, or beside a cluster's own, may wait longer. */
+const START_WAIT_MS = 20_000;
+
+async function waitForDatabase(url: string): Promise<void> {
+  const { pool } = openDatabase(url, { max: 1, waitMs: START_WAIT_MS });
+  try {
+    await pool.query('select 1');
+  } finally {
+    await pool.end();
+  }
+}
+
 async function main(): Promise<void> {
   const settings = readSettings(process.env);
   const log = pino({ level: settings.logLevel }, pino.destination(2));
   const keys = readSigningKeys(readFileSync(join(settings.secretsDir, 'keys.json'), 'utf8'));
+  await waitForDatabase(settings.databaseUrl);
   const { pool, db } = openDatabase(settings.databaseUrl);
-  await pool.query('select 1');
   const deps = { db, clock: { now: () => Date.now() }, random: Math.random };
   const { development, demo, secure } = settings;
   const mountPages = await (development ? livePages(demo) : builtPages(demo));

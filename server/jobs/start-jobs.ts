@@ -15,7 +15,8 @@ export interface JobsNeeds {
 
 /** Runs background work from the same database. `stop()` lets running tasks finish. */
 export async function startJobs({ databaseUrl, clock, log }: JobsNeeds): Promise<{ stop(): Promise<void> }> {
-  const { pool, db } = openDatabase(databaseUrl, { max: 2 });
+  // Nobody waits for a job: it may wait for a connection.
+  const { pool, db } = openDatabase(databaseUrl, { max: 2, waitMs: 20_000 });
   const runner = await run({
     connectionString: databaseUrl,
     concurrency: 1,

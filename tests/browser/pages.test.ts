@@ -1,21 +1,12 @@
 import type { BrowserContext } from 'playwright-core';
 import { describe, expect, it } from 'vitest';
-import { caseSet } from '#shared/lastlayer/index.ts';
-import { nonceOf } from './support/documents.ts';
+import { lookAt, type PageOfOurs } from './support/every-page.ts';
 import { expectSound } from './support/looks.ts';
 import { memberOf } from './support/members.ts';
 import { openPage } from './support/open-page.ts';
-import { type DemoName, LAPTOP, type Site, useSite } from './support/site.ts';
+import { LAPTOP, type Site, useSite } from './support/site.ts';
 
 const site = useSite();
-
-interface PageOfOurs {
-  readonly name: string;
-  readonly who: DemoName | null;
-  readonly path: string | ((site: Site, context: BrowserContext) => Promise<string>);
-  readonly heading: string | RegExp;
-  readonly status?: number;
-}
 
 const PAGES: readonly PageOfOurs[] = [
   { name: 'the first page', who: null, path: '/', heading: /last layer/ },
@@ -53,58 +44,7 @@ const PAGES: readonly PageOfOurs[] = [
   { name: 'Intake', who: 'desk', path: '/admin/intake', heading: 'Intake' },
   { name: 'a draft', who: 'desk', path: aDraft, heading: 'faults.csv' },
   { name: 'Pictures', who: 'desk', path: '/admin/pictures', heading: 'Pictures' },
-  { name: 'Catalogue', who: 'desk', path: '/catalogue', heading: 'Catalogue' },
-  { name: 'Catalogue of a member', who: 'tobi', path: '/catalogue', heading: 'Catalogue' },
-  { name: 'a search by name', who: 'tobi', path: '/catalogue?q=T', heading: 'Catalogue' },
-  {
-    name: 'a search by moves',
-    who: 'ines',
-    path: `/catalogue?q=${encodeURIComponent("R U R' U R U2 R'")}`,
-    heading: 'Catalogue',
-  },
-  { name: 'a search by what is no move', who: 'desk', path: '/catalogue?q=R+U+Q', heading: 'Catalogue' },
-  {
-    name: 'a drawing',
-    who: 'ines',
-    path: '/catalogue/draw?d=----y----rrr---------&sets=pll,zbll',
-    heading: 'Find by drawing',
-  },
-  {
-    name: 'a drawing of no cube',
-    who: 'tobi',
-    path: '/catalogue/draw?d=------oy-rrr---------',
-    heading: 'Find by drawing',
-  },
-  { name: 'a set', who: 'ines', path: '/catalogue/oll?group=dot&sort=-prior', heading: 'OLL' },
-  { name: 'a set of thousands', who: 'ines', path: '/catalogue/1lll?angles=1', heading: '1LLL' },
-  { name: 'a set in which nothing was found', who: 'desk', path: '/catalogue/pll?q=nothing', heading: 'PLL' },
-  { name: 'a case of the catalogue', who: 'ines', path: inCatalogue('pll', 'Ja'), heading: 'PLL Ja' },
-  { name: 'a case without inverse', who: 'tobi', path: inCatalogue('oll', '27'), heading: 'OLL 27' },
-  { name: 'a case in two looks', who: 'desk', path: inCatalogue('1lll', '#2001'), heading: '1LLL #2001' },
-  { name: 'the skip', who: 'ines', path: inCatalogue('pll', 'skip'), heading: 'PLL skip' },
-  { name: 'an algorithm sheet', who: 'ines', path: '/catalogue/pll/sheet', heading: 'PLL, algorithm sheet' },
-  {
-    name: 'a case that is none',
-    who: 'ines',
-    path: '/catalogue/pll/cases/none',
-    heading: 'Not here',
-    status: 404,
-  },
-  { name: 'a new case set', who: 'ines', path: '/catalogue/new', heading: 'New case set' },
-  {
-    name: 'a mix of entries',
-    who: 'desk',
-    path: '/catalogue/new?entries=any:3,eo:2&toldApart=co,eo&solved=co,eo',
-    heading: 'New case set',
-  },
-  { name: 'cases to choose', who: 'ines', path: '/catalogue/zbll/subset', heading: 'Cases of ZBLL' },
-  { name: 'an edition', who: 'desk', path: '/catalogue/oll/editions/1', heading: 'OLL, edition 1' },
 ];
-
-/** Address of a case's page in the catalogue. */
-function inCatalogue(setKey: string, name: string): string {
-  return `/catalogue/${setKey}/cases/${encodeURIComponent(caseSet(setKey).byName(name)?.key ?? '')}`;
-}
 
 async function aCase({ sql }: Site): Promise<string> {
   const [row] = await sql<{ case_key: string }>(
@@ -143,18 +83,7 @@ async function aDraft({ url }: Site, context: BrowserContext): Promise<string> {
 }
 
 describe('every page, light and dark, wide and narrow', () => {
-  it.each(PAGES)('$name', async (ours) => {
-    if (ours.status) site.watch.expect(new RegExp(`status of ${ours.status}`));
-    const context = await (ours.who ? site.visitorAs(ours.who, LAPTOP) : site.visitor(LAPTOP));
-    const path = typeof ours.path === 'string' ? ours.path : await ours.path(site, context);
-    const page = await context.newPage();
-    const response = await openPage(page, path);
-    expect(response.status()).toBe(ours.status ?? 200);
-    await page.getByRole('heading', { level: 1, name: ours.heading }).waitFor();
-    await expectSound(page);
-    // The nonce is made anew for each document.
-    expect(await nonceOf(await context.request.get(path))).not.toBe(await nonceOf(response));
-  });
+  lookAt(site, PAGES);
 
   it('the questions before what cannot be undone', async () => {
     const context = await site.visitorAs('desk', LAPTOP);
