@@ -7,6 +7,7 @@ import { doneOn } from './done.ts';
 import { type LedgerForm, ledgerHref, readLedgerQuery } from './ledger-query.ts';
 import { LedgerResult } from './ledger-result.tsx';
 import { StepForm } from './step-form.tsx';
+import { TradeSets } from './trade-sets.tsx';
 
 /** The counts of a step of the last layer, and why they are what they are. */
 export function LedgerPage() {
@@ -32,7 +33,9 @@ export function LedgerPage() {
         <ErrorSummary title={ledgerText.form.problemTitle} errors={errors} />
       </div>
       <div className="grid gap-x-12 gap-y-8 lg:grid-cols-[17rem_minmax(0,1fr)] xl:grid-cols-[20rem_minmax(0,1fr)]">
-        <StepForm id={form} done={doneOn(asked.entry)} {...fields} />
+        <StepForm id={form} done={doneOn(asked.entry)} {...fields}>
+          {input && <TradeSets asked={asked} input={input} />}
+        </StepForm>
         {input && <LedgerResult input={input} form={form} {...fields} />}
       </div>
     </>

@@ -2,7 +2,7 @@ import { useEffect, useState } from 'react';
 import { Button, SelectField, TextField } from '#renderer/ui/index.ts';
 import type { Entry } from '#shared/lastlayer/index.ts';
 import { ledgerText } from '#shared/text/ledger.ts';
-import { FIELDS, type LedgerForm, shareOf } from './ledger-query.ts';
+import { FIELDS, type LedgerForm } from './ledger-query.ts';
 
 const text = ledgerText.mix;
 const ENTRIES = Object.entries(ledgerText.entries) as [Entry, string][];
@@ -17,23 +17,42 @@ export interface MixFieldsProps {
   readonly onChange: (next: LedgerForm) => void;
 }
 
+/** The share as somebody is typing it. */
+export interface TypedShare {
+  readonly typed: string;
+  /** What stands in the field is a share. */
+  readonly right: boolean;
+  readonly onType: (typed: string) => void;
+}
+
+/** Longest that is taken: enough to see what was meant. */
+const MOST_TYPED = 12;
 /** How long after the last keystroke a share counts. */
 const TYPED_MS = 400;
 
 /** The second way to arrive, and how many solves do. */
-export function MixFields({ asked, errorOf, form, atOnce, onChange }: MixFieldsProps) {
-  const [typed, setTyped] = useState(asked.share);
+export function MixFields({
+  asked,
+  errorOf,
+  form,
+  atOnce,
+  onChange,
+  typed,
+  right,
+  onType,
+}: MixFieldsProps & TypedShare) {
   const [left, setLeft] = useState(false);
-  const right = shareOf(typed) !== null;
+  const noMix = asked.with === null;
 
   useEffect(() => {
-    if (typed === asked.share || !right) return;
+    if (noMix || !right || typed.trim() === asked.share) return;
     const later = setTimeout(() => onChange({ ...asked, share: typed.trim() }), TYPED_MS);
     return () => clearTimeout(later);
-  }, [typed, right, asked, onChange]);
+  }, [noMix, typed, right, asked, onChange]);
 
   const shareError = atOnce
-    ? left && !right
+    ? // An empty field is on its way to a number until it is left.
+      !noMix && !right && (left || typed.trim() !== '')
       ? ledgerText.problems.share
       : undefined
     : errorOf(FIELDS.share);
@@ -52,7 +71,13 @@ export function MixFields({ asked, errorOf, form, atOnce, onChange }: MixFieldsP
           ),
         ]}
         value={asked.with ?? ''}
-        onChange={(event) => onChange({ ...asked, with: (event.target.value || null) as Entry | null })}
+        onChange={({ target }) =>
+          onChange({
+            ...asked,
+            with: (target.value || null) as Entry | null,
+            share: right ? typed.trim() : asked.share,
+          })
+        }
       />
       <TextField
         id={FIELDS.share}
@@ -62,10 +87,12 @@ export function MixFields({ asked, errorOf, form, atOnce, onChange }: MixFieldsP
         error={shareError}
         inputMode="numeric"
         autoComplete="off"
-        maxLength={2}
+        maxLength={MOST_TYPED}
+        // Without scripts nothing would wake it when a mix is chosen.
+        disabled={atOnce && noMix}
         value={typed}
         onChange={(event) => {
-          setTyped(event.target.value);
+          onType(event.target.value);
           setLeft(false);
         }}
         onBlur={() => setLeft(true)}

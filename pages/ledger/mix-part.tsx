@@ -1,20 +1,26 @@
+import { useState } from 'react';
 import { LedgerTable } from '#renderer/ledger-table.tsx';
 import { Section } from '#renderer/ui/index.ts';
 import type { LedgerView } from '#shared/contracts/ledger.ts';
 import { ledgerText } from '#shared/text/ledger.ts';
 import { CaseStrip } from './case-strip.tsx';
 import { Figure } from './figure.tsx';
+import { shareOf } from './ledger-query.ts';
 import { MixFields, type MixFieldsProps } from './mix-fields.tsx';
 
 const text = ledgerText.mix;
 
 /** What the priors are for one who arrives now with this done, now with that: exact, like the rest. */
 export function MixPart({ view, ...fields }: { view: LedgerView } & MixFieldsProps) {
-  const { mix, entry } = view;
+  const { entry } = view;
+  const [typed, onType] = useState(fields.asked.share);
+  const right = shareOf(typed) !== null;
+  // Figures of a share that is no longer in the field would pass for those of what is.
+  const mix = right ? view.mix : null;
   return (
     <Section title={text.title} className={mix ? undefined : 'screen-only'}>
       <p className="max-w-[46rem] text-ink-2">{text.lead}</p>
-      <MixFields {...fields} />
+      <MixFields {...fields} typed={typed} right={right} onType={onType} />
       {mix && (
         <>
           <p className="mt-6 pb-2 font-bold">{text.says(mix.share, mix.with, entry)}</p>

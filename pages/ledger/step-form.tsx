@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import { Button, ChoiceGroup, Details } from '#renderer/ui/index.ts';
 import type { Aspect, Entry } from '#shared/lastlayer/index.ts';
 import { ledgerText } from '#shared/text/ledger.ts';
@@ -21,10 +22,12 @@ export interface StepFormProps {
   /** Scripts are at work: a choice counts at once and no key is needed. */
   readonly atOnce: boolean;
   readonly onChange: (next: LedgerForm) => void;
+  /** Under the aspects: where to go on from here. */
+  readonly children?: ReactNode;
 }
 
 /** The step to be counted. A plain form: without scripts its key asks for the page again. */
-export function StepForm({ id, asked, done, errorOf, atOnce, onChange }: StepFormProps) {
+export function StepForm({ id, asked, done, errorOf, atOnce, onChange, children }: StepFormProps) {
   const entry = {
     name: 'entry',
     kind: 'one',
@@ -77,6 +80,7 @@ export function StepForm({ id, asked, done, errorOf, atOnce, onChange }: StepFor
           })
         }
       />
+      {children}
       {!atOnce && <Button type="submit">{text.go}</Button>}
     </form>
   );

@@ -4,7 +4,7 @@ import { lookOf, usePersonPictures } from '#renderer/person-pictures.tsx';
 import { Button, ChoiceGroup, Notice } from '#renderer/ui/index.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import type { PictureSettings } from '#shared/contracts/pictures.ts';
-import { PALETTES } from '#shared/lastlayer/pictures/index.ts';
+import { type CrossColours, PALETTES } from '#shared/lastlayer/pictures/index.ts';
 import { pictureSettingsText as text } from '#shared/text/picture-settings.ts';
 import { OwnShadesFields } from './own-shades.tsx';
 import { PaletteSwatch } from './palette-swatch.tsx';
@@ -14,7 +14,12 @@ type Key = PictureSettings['palette'];
 const KEYS = Object.keys(text.hints) as Key[];
 
 /** How pictures are drawn for whoever is signed in: chosen beside a preview, true everywhere once saved. */
-export function PicturesForm() {
+export function PicturesForm({
+  cross = 'all',
+}: {
+  /** The person's cross colours; whoever does not train sees any. */
+  cross?: CrossColours;
+}) {
   const { settings, change } = usePersonPictures();
   const [form, setForm] = useState(settings);
   const save = useSend(endpoints.changePictures, { onDone: change });
@@ -34,7 +39,7 @@ export function PicturesForm() {
       <div className="grid gap-x-12 gap-y-6 lg:grid-cols-[minmax(0,34rem)_1fr]">
         <section aria-label={text.preview} className="min-w-0 lg:sticky lg:top-6 lg:order-last lg:self-start">
           <p className="pb-2 text-[0.9375rem] text-ink-2">{text.preview}</p>
-          <Preview look={look} />
+          <Preview look={look} cross={cross} />
         </section>
         <div className="flex min-w-0 flex-col gap-6">
           <ChoiceGroup

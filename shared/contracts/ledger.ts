@@ -93,6 +93,8 @@ export const ledgerView = z.strictObject({
   solvable: counted,
   withoutAufAfter: counted,
   cases: z.int(),
+  /** The trade's sets for this entry, each with what it tells apart beyond what is done. */
+  tradeSets: z.array(z.strictObject({ name: z.string(), aspects: z.array(aspect) })),
   /** The likeliest first; `of` is the common denominator of all priors. */
   classes: z.array(caseClass),
   of: z.int(),
@@ -109,6 +111,9 @@ export type LedgerView = z.infer<typeof ledgerView>;
 export const LEDGER_SORTS = ['number', 'name', 'group', 'prior'] as const;
 export type LedgerSort = (typeof LEDGER_SORTS)[number];
 
+/** The longest list that is given on one page: ZBLL fits. */
+export const MOST_ON_ONE_PAGE = 500;
+
 export const ledgerCasesInput = z.strictObject({
   ...step,
   /** Only cases with so many angles. */
@@ -117,6 +122,8 @@ export const ledgerCasesInput = z.strictObject({
   sort: z.enum(LEDGER_SORTS).optional(),
   order: z.enum(['ascending', 'descending']).optional(),
   page: z.coerce.number().int().min(1).max(1000).optional(),
+  /** As much on a page as is ever given, for print; usually 60. */
+  size: z.literal('most').optional(),
 });
 export type LedgerCasesInput = z.infer<typeof ledgerCasesInput>;
 
@@ -139,6 +146,8 @@ export const ledgerCasesView = z.strictObject({
   found: z.int(),
   page: z.int(),
   pages: z.int(),
+  /** Place of the page's first case among those found, from 1. */
+  from: z.int(),
   angles: z.array(angles),
   groups: z.array(z.string()),
   cases: z.array(listedCase),

@@ -30,13 +30,13 @@ export const catalogueSearchText = {
   noAlgorithm: 'the catalogue has no algorithm for it',
   known: 'in the catalogue already',
   broken: (pieces: readonly string[]) =>
-    pieces.length > 4
+    pieces.length > 5
       ? `It breaks the first two layers: ${pieces.slice(0, 4).join(', ')} and ${pieces.length - 4} more are out of place.`
       : `It breaks the first two layers: ${listed(pieces)} ${pieces.length === 1 ? 'is' : 'are'} out of place.`,
   notAMove: (token: string, column: number) =>
     token === ''
       ? `It cannot be read as moves from character ${column} on.`
-      : `As moves it cannot be read: ${token} is none (character ${column}).`,
+      : `It cannot be read as moves: “${token}” at character ${column} is not a move.`,
 
   confusable: {
     title: 'Mistaken for',

@@ -54,6 +54,7 @@ export const drawingText = {
   sets: 'Look in',
   wrong: 'There is no such cube',
   found: (found: number, of: number) => (found === 1 ? `1 case of ${of}` : `${found} of ${of} cases`),
+  foundIn: (set: string, found: number, of: number) => `${set}: ${found} of ${of}`,
   none: 'No case of this set looks like it.',
   more: (n: number) => `and ${n} more; paint more to tell them apart`,
   share: (states: number, of: number) => (states === of ? 'all of its states' : `${states} of ${of} states`),

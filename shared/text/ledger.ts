@@ -81,6 +81,7 @@ export const ledgerText = {
     with: 'Second way to arrive',
     entryMissing: 'Choose what is solved on arrival.',
     asked: (what: string, value: string) => `${what}: “${value}” is none of the choices.`,
+    tradeSets: 'With this entry:',
   },
   /** The step in one line, for print and for assistive technology. */
   step: (entry: Entry, told: readonly Aspect[]) =>
@@ -125,15 +126,31 @@ export const ledgerText = {
   },
 
   three: {
-    title: 'Three counts, equal',
+    title: 'Counts that agree',
+    /** What each line counts. Where no permutation is seen there is no AUF after to leave out. */
+    what: {
+      statesWithoutAuf: 'States without AUF after, by formula',
+      states: 'States, by formula',
+      statesAgain: 'The same states: cases times their angles',
+      cases: 'Cases, by Burnside: the mean of the fixed states',
+      casesAgain: 'The same cases, as listed by symmetry',
+    },
     states: (formula: string, solvable: number, without: number) =>
       without < solvable
-        ? `${formula} = ${whole(solvable)} states; ${whole(solvable)} / 4 = ${whole(without)}`
-        : `${formula} = ${whole(solvable)} states`,
+        ? `${formula} = ${whole(solvable)}; ${whole(solvable)} / 4 = ${count(without, 'state', 'states')}`
+        : formula === whole(solvable)
+          ? count(solvable, 'state', 'states')
+          : `${formula} = ${count(solvable, 'state', 'states')}`,
     classes: (classes: readonly { cases: number; angles: number }[], sum: number) =>
-      `${classes.map(({ cases, angles }) => `${whole(cases)} · ${angles}`).join(' + ')} = ${whole(sum)}`,
+      `${classes.map(({ cases, angles }) => `${whole(cases)} · ${angles}`).join(' + ')} = ${count(sum, 'state', 'states')}`,
     burnside: (fixed: readonly { value: number; times: number }[], cases: number) =>
-      `fixed states (${fixed.map(({ value, times: n }) => (n === 1 ? whole(value) : `${n} · ${whole(value)}`)).join(' + ')}) / 16 = ${count(cases, 'case', 'cases')}`,
+      `(${fixed.map(({ value, times: n }) => (n === 1 ? whole(value) : `${n} · ${whole(value)}`)).join(' + ')}) / 16 = ${count(cases, 'case', 'cases')}`,
+    listed: (classes: readonly { cases: number }[], sum: number) => {
+      const total = count(sum, 'case', 'cases');
+      return classes.length === 1
+        ? total
+        : `${classes.map(({ cases }) => whole(cases)).join(' + ')} = ${total}`;
+    },
   },
 
   burnside: {
@@ -184,6 +201,11 @@ export const ledgerText = {
     caption: 'Cases',
     found: (found: number, all: number) =>
       found === all ? count(all, 'case', 'cases') : `${whole(found)} of ${count(all, 'case', 'cases')}`,
+    /** Which of those found stand on this page. */
+    part: (from: number, to: number, of: number) =>
+      `${whole(from)} to ${whole(to)} of ${whole(of)} on this page`,
+    onePage: (found: number) => `All ${whole(found)} on one page`,
+    pages: 'Page by page',
     columns: {
       picture: 'picture',
       number: 'number',
@@ -207,8 +229,11 @@ export const ledgerText = {
   csvFile: {
     name: (entry: Entry, told: readonly Aspect[]) =>
       `ledger-${entry.replaceAll('+', '-')}-${told.join('-') || 'nothing'}.csv`,
+    broken: 'There is no such file of the Ledger: the address is not right.',
+    /** With its set, as the trade writes it: OLL 28. */
+    caseName: (set: string | null, name: string) => (set === null ? name : `${set} ${name}`),
     head: [
-      'number',
+      'place in this list',
       'name',
       'group',
       'key',

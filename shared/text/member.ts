@@ -3,11 +3,11 @@ const plural = (count: number, one: string, many: string): string => `${count} $
 
 const states = { unmet: 'unmet', settling: 'settling', holding: 'holding', slipping: 'slipping' } as const;
 const outcomes = { held: 'held', late: 'late', missed: 'missed', left: 'left' } as const;
-/** Raw choices that are no case's name. */
+/** What was done where no case was named. */
 const otherNames: Readonly<Record<string, string>> = {
-  solved: 'solved',
-  lost: 'lost it',
-  unrecognised: 'nothing',
+  solved: 'named solved',
+  lost: 'recognised, then lost',
+  unrecognised: 'not recognised',
   left: '–',
 };
 
@@ -22,7 +22,6 @@ export const memberText = {
   percent,
   states,
   outcomes,
-  named: (name: string) => otherNames[name] ?? name,
   prior: oneIn,
   priorExact: (weight: number, total: number) => `${weight}/${total.toLocaleString('en-GB')}`,
   figureLabel: (value: number, low: number, high: number, answers: number) =>
@@ -75,6 +74,7 @@ export const memberText = {
     none: 'No case fits. Take a filter away.',
     clear: 'Show all',
     setRecall: 'dealt recall',
+    toCatalogue: 'Catalogue: all cases and algorithms',
   },
 
   case: {
@@ -99,7 +99,7 @@ export const memberText = {
     latestCaption: 'Answers to this case, newest first',
     noAnswers: 'Not shown to you yet.',
     columns: { when: 'When', outcome: 'Outcome', time: 'Time', lostBy: 'Lost by' },
-    as: (named: string) => `named ${named}`,
+    as: (named: string) => otherNames[named] ?? `named ${named}`,
     notScored: 'not scored',
     misTap: 'mis-tap',
     seconds: (ms: number) => `${(ms / 1000).toFixed(2)} s`,

@@ -12,7 +12,8 @@ export const numberText = {
     `1 in ${(total / weight).toLocaleString('en-GB', { maximumFractionDigits: 2 })}`,
   /** A whole number, thousands set off. */
   whole: (n: number) => n.toLocaleString('en-GB'),
-  count: (n: number, one: string, many: string) => `${n} ${n === 1 ? one : many}`,
+  /** Some of a thing: `1 case`, `3,916 cases`. */
+  count: (n: number, one: string, many: string) => `${n.toLocaleString('en-GB')} ${n === 1 ? one : many}`,
   /** A change with its sign: `+2`, `−6`, `0`. */
   points: (n: number) => {
     const whole = Math.round(n);

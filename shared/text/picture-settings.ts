@@ -1,4 +1,4 @@
-import type { ColourName } from '../lastlayer/pictures/index.ts';
+import { COLOUR_NAMES, type ColourName } from '../lastlayer/pictures/index.ts';
 import type { ShadePair } from '../lastlayer/pictures/shade-warnings.ts';
 import { pictureText } from './pictures.ts';
 
@@ -36,7 +36,11 @@ export const pictureSettingsText = {
   pair: ({ one, other, vision, difference }: ShadePair) =>
     `${colours[one]} and ${colours[other]}: ${Math.floor(difference)} apart${VISIONS[vision]}`,
   preview: 'Preview',
-  seat: 'As in training, white on top',
+  /** The colours that training puts on top for one's cross colours. */
+  seat: (tops: readonly ColourName[]) =>
+    tops.length === COLOUR_NAMES.length
+      ? 'As in training, any colour on top'
+      : `As in training, ${tops.map((top) => colours[top]).join(' or ')} on top`,
   flat: 'As in tables, yellow on top',
   save: 'Save pictures',
   saving: 'Saving',

@@ -79,7 +79,9 @@ export const todayText = {
   notScored: (reason: string | null) => (reason === 'slow naming' ? 'no: naming took over 5 s' : 'no'),
   /** What follows is the AUF that was given, struck through. */
   aufNot: (right: string) => `${right}, not `,
-  lostBy: (aspect: string) => (aspect === 'late' ? 'time' : aspect),
+  /** One who recognised the case and then had no name for it did not lose it by not recognising it. */
+  lostBy: (aspect: string, named: string | null) =>
+    named === 'lost' ? 'its name, gone after recognising' : aspect === 'late' ? 'time' : aspect,
   back: (thisSitting: boolean, when: string | null) =>
     thisSitting && when !== null
       ? `in this sitting, then ${when}`

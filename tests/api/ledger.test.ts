@@ -21,6 +21,11 @@ describe('the Ledger', () => {
       cases: 22,
       of: 72,
       mix: null,
+      // The trade's sets for this entry (common practice).
+      tradeSets: [
+        { name: 'PLL', aspects: ['cp', 'ep'] },
+        { name: 'CPLL', aspects: ['cp'] },
+      ],
     });
     // Sixteen of 1/18, two of 1/36, four of 1/72, the skip among these (common practice).
     expect(body.classes).toMatchObject([
@@ -153,6 +158,19 @@ describe('the list of a step’s cases', () => {
     expect(beyond.page).toBe(first.pages);
   });
 
+  it('says which of the cases a page has, and gives a list for print on one', async () => {
+    // ZBLL: 493 and the skip (common practice).
+    const { body: second } = await list('entry=eo&aspects=co,cp,ep&page=2');
+    expect(second).toMatchObject({ found: 494, from: 61, page: 2, pages: 9 });
+    const { body: whole } = await list('entry=eo&aspects=co,cp,ep&size=most');
+    expect(whole).toMatchObject({ found: 494, from: 1, page: 1, pages: 1 });
+    expect(whole.cases).toHaveLength(494);
+    // Only a list of thousands is still given in pages.
+    const { body: most } = await list('entry=any&aspects=co,eo,cp,ep&size=most&page=2');
+    expect(most).toMatchObject({ from: 501, pages: 8 });
+    expect((await list('entry=any&aspects=co,eo&group=none')).body).toMatchObject({ found: 0, from: 0 });
+  });
+
   it('numbers the cases of a step that the trade has no name for', async () => {
     const { body } = await list('entry=cp%2Beo&aspects=co,ep');
     // Corners permuted, edges oriented: 84 and the skip (common practice).
@@ -190,7 +208,12 @@ describe('the Ledger as a file', () => {
     // 1LLL: 3,916 cases, the skip among them, of 62,208 states (common practice).
     expect(rows).toHaveLength(3916);
     expect(rows.reduce((sum, row) => sum + Number(row['full states']), 0)).toBe(62_208);
-    expect(rows[0]).toMatchObject({ name: 'skip', 'prior numerator': '1', 'prior denominator': '15552' });
+    expect(rows[0]).toMatchObject({
+      'place in this list': '0',
+      name: '1LLL skip',
+      'prior numerator': '1',
+      'prior denominator': '15552',
+    });
     expect(res.text.split('\r\n')).toHaveLength(3918);
   });
 
@@ -207,10 +230,26 @@ describe('the Ledger as a file', () => {
     expect((await file('entry=eo&aspects=co')).headers.etag).toBe(first.headers.etag);
   });
 
-  it('names the field that is wrong', async () => {
-    const res = await file('entry=any&aspects=colour');
+  it('names cases with their set, as the trade does', async () => {
+    const rows = async (query: string) =>
+      parse((await file(query)).text, { bom: true, columns: true }) as Record<string, string>[];
+    const named = (await rows('entry=any&aspects=co,eo')).map(({ name }) => name);
+    expect(named).toContain('OLL 28');
+    // A step that the trade has no name for.
+    expect((await rows('entry=cp%2Beo&aspects=co,ep'))[1]?.name).toMatch(/1$/);
+  });
+
+  it('says in plain sentences what is wrong with an address', async () => {
+    const res = await file('entry=f2l&aspects=colour');
     expect(res.status).toBe(400);
-    expect(res.body.errors).toMatchObject([{ pointer: '/aspects/0' }]);
-    expect(res.headers['cache-control']).toBeUndefined();
+    expect(res.type).toBe('text/plain');
+    expect(res.headers['cache-control']).toBe('no-store');
+    const [first, ...rest] = res.text.trim().split('\n');
+    expect(first).toBe('There is no such file of the Ledger: the address is not right.');
+    expect(rest).toEqual([
+      expect.stringMatching(/^entry is one of any, eo, /),
+      expect.stringMatching(/^aspects is a list of co, eo, cp, ep/),
+    ]);
+    expect((await file('entry=any&aspects=co&page=2')).text).toContain('Not known here: page.');
   });
 });

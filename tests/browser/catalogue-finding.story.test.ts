@@ -42,7 +42,7 @@ it('what is wrong with moves is said, character and pieces', async () => {
   const box = page.getByLabel('Find a case');
   await box.fill('R U Q');
   await page.getByRole('button', { name: 'Find', exact: true }).click();
-  await page.getByText('As moves it cannot be read: Q is none (character 5).').waitFor();
+  await page.getByText('It cannot be read as moves: “Q” at character 5 is not a move.').waitFor();
   await box.fill("R U R'");
   await page.keyboard.press('Enter');
   await page.getByText('It breaks the first two layers: DFR and FR are out of place.').waitFor();

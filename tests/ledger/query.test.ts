@@ -36,6 +36,9 @@ describe('the form in an address', () => {
       ['with=eo&share=0', 'share'],
       ['with=eo&share=100', 'share'],
       ['with=eo&share=ten', 'share'],
+      ['with=eo&share=33.3', 'share'],
+      ['with=eo&share=7,5', 'share'],
+      ['with=eo&share=-5', 'share'],
       ['with=nothing&share=40', 'with'],
       ['with=any&share=40', 'with'],
     ]) {
@@ -75,12 +78,13 @@ describe('the list in an address', () => {
       sort: 'prior',
       order: 'descending',
       page: 3,
+      size: 'most',
     } as const;
     const input = casesInputOf(new URLSearchParams(casesHref(step, chosen).split('?')[1]));
     expect(input).toEqual({ ...step, ...chosen });
     expect(ledgerCasesInput.parse(input)).toEqual(input);
     expect(
-      casesInputOf(new URLSearchParams('entry=any&aspects=co&angles=3&sort=x&page=-1&order=up')),
+      casesInputOf(new URLSearchParams('entry=any&aspects=co&angles=3&sort=x&page=-1&order=up&size=all')),
     ).toEqual({
       entry: 'any',
       aspects: ['co'],

@@ -2,6 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { burnsideSum, gatheredTerms } from '#pages/ledger/burnside-sum.ts';
 import { ledgerOf } from '#shared/lastlayer/index.ts';
 import { ledgerText } from '#shared/text/ledger.ts';
+import { numberText } from '#shared/text/numbers.ts';
 
 const { fraction, mixed, whole, formula, powers, three, symmetry } = ledgerText;
 
@@ -39,15 +40,28 @@ describe('numbers of the Ledger', () => {
     expect(formula({ factors: [], divisors: [] })).toBe('1');
   });
 
-  it('say three times the same', () => {
+  it('agree two by two', () => {
     const pll = ledgerOf('co+eo', ['cp', 'ep']);
     const fixed = pll.burnside.map((row) => row.fixed);
     expect(burnsideSum(fixed)).toBe(352);
     expect(three.states(formula(pll.solvable), pll.solvable.value, pll.withoutAufAfter.value)).toBe(
-      '24 · 24 / 2 = 288 states; 288 / 4 = 72',
+      '24 · 24 / 2 = 288; 288 / 4 = 72 states',
     );
     const classes = [...pll.classes].reverse();
-    expect(three.classes(classes, 72)).toBe('16 · 4 + 2 · 2 + 4 · 1 = 72');
-    expect(three.burnside(gatheredTerms(fixed), 22)).toBe('fixed states (288 + 32 + 4 · 8) / 16 = 22 cases');
+    expect(three.classes(classes, 72)).toBe('16 · 4 + 2 · 2 + 4 · 1 = 72 states');
+    expect(three.burnside(gatheredTerms(fixed), 22)).toBe('(288 + 32 + 4 · 8) / 16 = 22 cases');
+    expect(
+      three.listed(
+        classes.map(({ caseNumbers }) => ({ cases: caseNumbers.length })),
+        22,
+      ),
+    ).toBe('16 + 2 + 4 = 22 cases');
+  });
+
+  it('say a step with one case in words that are no sum', () => {
+    expect(three.states('1', 1, 1)).toBe('1 state');
+    expect(three.classes([{ cases: 1, angles: 1 }], 1)).toBe('1 · 1 = 1 state');
+    expect(three.listed([{ cases: 1 }], 1)).toBe('1 case');
+    expect(numberText.count(3916, 'case', 'cases')).toBe('3,916 cases');
   });
 });

@@ -4,10 +4,18 @@ import { renderToStaticMarkup as markup } from 'react-dom/server';
 import { describe, expect, it } from 'vitest';
 import { OwnShadesFields } from '#pages/pictures/own-shades.tsx';
 import { PicturesForm } from '#pages/pictures/pictures-form.tsx';
+import { trainingTop } from '#pages/pictures/training-top.ts';
 import { lookOf, PersonPicturesProvider } from '#renderer/person-pictures.tsx';
 import { FlatView, SeatView } from '#renderer/ui/index.ts';
 import type { PictureSettings } from '#shared/contracts/pictures.ts';
-import { PALETTES, stickersOf, TABLE_COLOURING } from '#shared/lastlayer/pictures/index.ts';
+import {
+  type CrossColours,
+  colouringsFor,
+  PALETTES,
+  paint,
+  stickersOf,
+  TABLE_COLOURING,
+} from '#shared/lastlayer/pictures/index.ts';
 
 const stickers = stickersOf(0);
 const { standard, safe, greys } = PALETTES;
@@ -70,6 +78,32 @@ describe('the form', () => {
     expect(html).not.toContain('type="color"');
     // The content security policy lets no style attribute through.
     expect(html).not.toContain('style=');
+  });
+
+  it('shows the cube as training does for the cross colours', () => {
+    const form = (cross: CrossColours) =>
+      seenBy(
+        usual,
+        <QueryClientProvider client={new QueryClient()}>
+          <PicturesForm cross={cross} />
+        </QueryClientProvider>,
+      );
+    // Opposite colours: white and yellow, green and blue, orange and red (common practice).
+    for (const [cross, says] of [
+      ['white', 'yellow on top'],
+      ['yellow', 'white on top'],
+      ['green', 'blue on top'],
+      ['red', 'orange on top'],
+      ['white+yellow', 'white or yellow on top'],
+      ['all', 'any colour on top'],
+    ] as const) {
+      expect(form(cross)).toContain(`As in training, ${says}`);
+      const { tops, colouring } = trainingTop(cross);
+      expect(tops).toContain(paint('U', colouring));
+      expect(colouringsFor(cross)).toContain(colouring);
+    }
+    expect(paint('U', trainingTop('white').colouring)).toBe('yellow');
+    expect(paint('U', trainingTop('white+yellow').colouring)).toBe('white');
   });
 
   it('names the shades that come too near each other', () => {

@@ -9,6 +9,7 @@ import { type Cell, EMPTY_DRAWING, painted, writeDrawing } from '#shared/lastlay
 import type { Side, Site } from '#shared/lastlayer/pictures/index.ts';
 import { drawingText } from '#shared/text/drawing.ts';
 import { addressOf, drawnInput, readAddress } from './draw-input.ts';
+import { DrawnAnswer } from './drawn-answer.tsx';
 import { DrawnResults } from './drawn-results.tsx';
 import { PaintChoice } from './paint-choice.tsx';
 import { PaintGrid } from './paint-grid.tsx';
@@ -51,6 +52,7 @@ export function DrawPage() {
       <div className="grid items-start gap-x-14 gap-y-8 lg:grid-cols-[21rem_minmax(0,1fr)] lg:grid-rows-[auto_1fr]">
         <div className="screen-only flex flex-col gap-5">
           <PaintChoice value={paint} onChange={choose} />
+          <DrawnAnswer view={query.data} />
           <PaintGrid drawing={drawing} wrong={wrongSites(query.data)} onPaint={onPaint} />
           <p className="text-sm text-ink-2 max-sm:hidden">
             {text.keys} {text.paintHint}
@@ -64,16 +66,6 @@ export function DrawPage() {
         <Awaited query={query}>
           {({ problems, sets }) => (
             <div className="lg:col-start-2 lg:row-span-2 lg:row-start-1">
-              <div role="status">
-                {problems.length > 0 && (
-                  <div className="border-s-4 border-rose ps-4">
-                    <p className="font-bold">{text.wrong}</p>
-                    {problems.map(({ says }) => (
-                      <p key={says}>{says}</p>
-                    ))}
-                  </div>
-                )}
-              </div>
               {problems.length === 0 && <DrawnResults sets={sets} />}
             </div>
           )}

@@ -54,12 +54,23 @@ function Cases({ view, input }: { view: LedgerCasesView; input: LedgerCasesInput
         title={text.title(view.trade?.name ?? null)}
         lead={
           <>
-            {ledgerText.step(view.entry, view.aspects)} {text.found(view.found, view.all)}.
+            {ledgerText.step(view.entry, view.aspects)} {text.found(view.found, view.all)}
+            {view.pages > 1 && `, ${text.part(view.from, view.from + view.cases.length - 1, view.found)}`}.
           </>
         }
       />
       <ListFilters view={view} input={input} />
       <CaseList view={view} step={step} chosen={chosen} />
+      {input.size === 'most' ? (
+        <p className="screen-only pt-2">
+          <TextLink
+            href={casesHref(step, { ...chosen, size: undefined })}
+            className="inline-flex min-h-12 items-center"
+          >
+            {text.pages}
+          </TextLink>
+        </p>
+      ) : null}
       <PageLinks page={view.page} of={view.pages} hrefOf={(page) => casesHref(step, { ...chosen, page })} />
     </>
   );

@@ -22,6 +22,7 @@ export function casesInputOf(query: URLSearchParams): LedgerCasesInput | null {
     ...(sort ? { sort } : {}),
     ...(order ? { order } : {}),
     ...(page ? { page } : {}),
+    ...(query.get('size') === 'most' ? { size: 'most' as const } : {}),
   };
 }
 

@@ -1,7 +1,7 @@
 import { useNavigate } from 'react-router';
-import { AppLink, Button, cx, SelectField } from '#renderer/ui/index.ts';
+import { AppLink, Button, cx, SelectField, TextLink } from '#renderer/ui/index.ts';
 import { useScripts } from '#renderer/use-scripts.ts';
-import type { LedgerCasesInput, LedgerCasesView } from '#shared/contracts/ledger.ts';
+import { type LedgerCasesInput, type LedgerCasesView, MOST_ON_ONE_PAGE } from '#shared/contracts/ledger.ts';
 import { ledgerText } from '#shared/text/ledger.ts';
 import { stepQuery } from '../ledger-query.ts';
 import { casesHref } from './cases-query.ts';
@@ -13,7 +13,7 @@ export function ListFilters({ view, input }: { view: LedgerCasesView; input: Led
   const navigate = useNavigate();
   const atOnce = useScripts();
   const step = { entry: view.entry, aspects: view.aspects };
-  const { angles, group, sort, order } = input;
+  const { angles, group, sort, order, size } = input;
   const links = [undefined, ...view.angles];
   return (
     <div className="screen-only flex flex-wrap items-end gap-x-8 gap-y-3 pb-5">
@@ -23,7 +23,7 @@ export function ListFilters({ view, input }: { view: LedgerCasesView; input: Led
             {links.map((some) => (
               <li key={some ?? 0}>
                 <AppLink
-                  href={casesHref(step, { angles: some, group, sort, order })}
+                  href={casesHref(step, { angles: some, group, sort, order, size })}
                   aria-current={some === angles ? 'true' : undefined}
                   className={cx(
                     'inline-flex min-h-12 items-center',
@@ -46,6 +46,7 @@ export function ListFilters({ view, input }: { view: LedgerCasesView; input: Led
           {angles && <input type="hidden" name="angles" value={angles} />}
           {sort && <input type="hidden" name="sort" value={sort} />}
           {order && <input type="hidden" name="order" value={order} />}
+          {size && <input type="hidden" name="size" value={size} />}
           <SelectField
             id="group"
             name="group"
@@ -56,7 +57,7 @@ export function ListFilters({ view, input }: { view: LedgerCasesView; input: Led
               ...view.groups.map((one) => ({ value: one, label: one })),
             ]}
             onChange={({ target }) =>
-              navigate(casesHref(step, { angles, group: target.value || undefined, sort, order }))
+              navigate(casesHref(step, { angles, group: target.value || undefined, sort, order, size }))
             }
           />
           {!atOnce && (
@@ -65,6 +66,14 @@ export function ListFilters({ view, input }: { view: LedgerCasesView; input: Led
             </Button>
           )}
         </form>
+      )}
+      {view.pages > 1 && view.found <= MOST_ON_ONE_PAGE && (
+        <TextLink
+          href={casesHref(step, { angles, group, sort, order, size: 'most' })}
+          className="inline-flex min-h-12 items-center"
+        >
+          {text.onePage(view.found)}
+        </TextLink>
       )}
       <a className="link inline-flex min-h-12 items-center" href={`/ledger.csv?${stepQuery(step)}`} download>
         {ledgerText.csv}

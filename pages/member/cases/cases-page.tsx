@@ -1,7 +1,7 @@
 import { useSearchParams } from 'react-router';
 import { useCall } from '#renderer/api.ts';
 import { Awaited } from '#renderer/awaited.tsx';
-import { Button, EmptyState, FigureBar } from '#renderer/ui/index.ts';
+import { Button, EmptyState, FigureBar, TextLink } from '#renderer/ui/index.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import type { MyCasesView } from '#shared/contracts/member.ts';
 import { memberText } from '#shared/text/member.ts';
@@ -24,6 +24,12 @@ export function CasesPage() {
   const aside = query.data ? text.count(shown.length, query.data.cases.length) : undefined;
   return (
     <MemberScreen title={text.title} aside={aside} wide>
+      {/* The bar has it where there is room for a bar. */}
+      <p className="screen-only lg:hidden">
+        <TextLink href="/catalogue" className="inline-flex min-h-12 items-center">
+          {text.toCatalogue}
+        </TextLink>
+      </p>
       <Awaited query={query}>
         {(view) =>
           view.sets.length === 0 ? (

@@ -31,7 +31,7 @@ export function LatestAnswers({ answers }: { answers: MyCaseView['answers'] }) {
             {memberText.outcomes[a.outcome]}
           </span>
           {a.outcome === 'missed' && a.lostBy !== AUF_ONLY && (
-            <span className="text-ink-2">, {memberText.case.as(memberText.named(a.named))}</span>
+            <span className="text-ink-2">, {memberText.case.as(a.named)}</span>
           )}
           {a.misTapped && <span className="text-ink-2">, {text.misTap}</span>}
           {!a.scored && a.outcome !== 'left' && <span className="text-ink-2">, {text.notScored}</span>}
@@ -48,7 +48,7 @@ export function LatestAnswers({ answers }: { answers: MyCaseView['answers'] }) {
     {
       key: 'lostBy',
       header: text.columns.lostBy,
-      cell: (a) => (a.lostBy === null ? memberText.none : todayText.lostBy(a.lostBy)),
+      cell: (a) => (a.lostBy === null ? memberText.none : todayText.lostBy(a.lostBy, a.named)),
     },
   ];
   return (

@@ -57,7 +57,7 @@ export function ClubPage() {
             </Section>
             <Section title={pictureSettingsText.title}>
               <p className="pb-4 text-[0.9375rem] text-ink-2">{pictureSettingsText.lead}</p>
-              <PicturesForm />
+              <PicturesForm cross={view.settings.crossColours} />
             </Section>
             <AlsoHere />
             <Section title={text.account}>

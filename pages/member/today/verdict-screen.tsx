@@ -118,7 +118,7 @@ function rowsOf(verdict: Verdict, answer: AnswerInput | null, today: string): De
     was.algorithm === ''
       ? null
       : { term: rows.algorithm, value: <AlgorithmText text={was.algorithm} className="text-lg" /> },
-    lostBy === null ? null : { term: rows.lostBy, value: todayText.lostBy(lostBy) },
+    lostBy === null ? null : { term: rows.lostBy, value: todayText.lostBy(lostBy, answer?.named ?? null) },
     verdict.scored ? null : { term: rows.score, value: todayText.notScored(verdict.unscoredReason) },
     {
       term: rows.back,

@@ -9,14 +9,14 @@ const keep = keeping<string>(16);
 export function ledgerCsv(step: Step): { name: string; content: string } {
   const { entry, aspects } = step;
   const content = keep(`${entry} ${aspects.join()}`, () => {
-    const { ledger, cases } = countStep(step);
+    const { ledger, trade, cases } = countStep(step);
     return csvOf([
       ledgerText.csvFile.head,
       ...cases.map((one) => {
         const { numerator, denominator } = priorOf(one, ledger);
         return [
           one.number,
-          one.name,
+          ledgerText.csvFile.caseName(trade?.name ?? null, one.name),
           one.group,
           one.key,
           one.angles,

@@ -3,13 +3,14 @@ import {
   type LedgerCasesInput,
   type LedgerCasesView,
   type LedgerSort,
+  MOST_ON_ONE_PAGE,
 } from '#shared/contracts/ledger.ts';
 import { inNameOrder } from '../catalogue/read-edition.ts';
 import type { Ctx } from '../context.ts';
 import { countStep, priorOf, type StepCase, showCase } from './step-cases.ts';
 
-/** Cases on a page of the list. */
-export const PAGE = 60;
+/** Cases on a page of the list, unless the most is asked for. */
+const PAGE = 60;
 
 const BY: Readonly<Record<LedgerSort, (one: StepCase, other: StepCase) => number>> = {
   number: () => 0,
@@ -27,7 +28,8 @@ export async function listLedgerCases(_ctx: Ctx, input: LedgerCasesInput): Promi
     .filter((one) => angles === undefined || one.angles === angles)
     .filter((one) => group === undefined || one.group === group)
     .sort((one, other) => sign * (BY[sort](one, other) || one.number - other.number));
-  const pages = Math.max(1, Math.ceil(found.length / PAGE));
+  const size = input.size === 'most' ? MOST_ON_ONE_PAGE : PAGE;
+  const pages = Math.max(1, Math.ceil(found.length / size));
   const page = Math.min(pages, input.page ?? 1);
   return {
     entry: ledger.entry,
@@ -37,9 +39,10 @@ export async function listLedgerCases(_ctx: Ctx, input: LedgerCasesInput): Promi
     found: found.length,
     page,
     pages,
+    from: Math.min(found.length, (page - 1) * size + 1),
     angles: [...new Set(cases.map((one) => one.angles))].sort((one, other) => other - one),
     groups: [...new Set(cases.map((one) => one.group))].filter((one) => one !== '').sort(inNameOrder),
-    cases: found.slice((page - 1) * PAGE, page * PAGE).map((one) => {
+    cases: found.slice((page - 1) * size, page * size).map((one) => {
       const prior = priorOf(one, ledger);
       return {
         ...showCase(one, ledger.seen),

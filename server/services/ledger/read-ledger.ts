@@ -1,5 +1,5 @@
 import type { LedgerInput, LedgerView } from '#shared/contracts/ledger.ts';
-import type { Ledger } from '#shared/lastlayer/index.ts';
+import { CASE_SETS, type Ledger, openIn } from '#shared/lastlayer/index.ts';
 import type { Ctx } from '../context.ts';
 import { mixPriors } from './mix-priors.ts';
 import { countStep, SHOWN, showCase } from './step-cases.ts';
@@ -18,6 +18,10 @@ export async function readLedger(_ctx: Ctx, input: LedgerInput): Promise<LedgerV
     solvable: plain(ledger.solvable),
     withoutAufAfter: plain(ledger.withoutAufAfter),
     cases: ledger.cases.value,
+    tradeSets: CASE_SETS.filter((set) => set.entry === entry).map((set) => ({
+      name: set.name,
+      aspects: openIn(set),
+    })),
     classes: ledger.classes
       .map(({ angles, prior, dealtOnceIn, caseNumbers }) => ({
         angles,
