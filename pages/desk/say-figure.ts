@@ -6,11 +6,13 @@ const { percent, points } = numberText;
 
 /** A figure in words, with what it rests on and how it moved. */
 export function sayFigure(figure: Figure, change: number | null = null): string {
+  if (figure.rests === 'nothing') return deskText.notBegun;
   return deskText.figureLabel({
     value: percent(figure.value),
     low: percent(figure.low),
     high: percent(figure.high),
     answers: figure.answers,
+    elsewhere: figure.rests === 'elsewhere',
     change: change === null ? null : points(change),
   });
 }

@@ -23,7 +23,7 @@ export interface TopBarProps {
   readonly aside?: ReactNode;
 }
 
-/** The bar over desk, administration and public pages; on narrow screens its links scroll sideways. */
+/** The bar over desk, administration and public pages; on narrow screens its links stand in more lines than one. */
 export function TopBar({ product, homeHref, navigationLabel, skipLabel, items, aside }: TopBarProps) {
   return (
     <header className="rule-b screen-only px-4 sm:px-8">
@@ -37,11 +37,8 @@ export function TopBar({ product, homeHref, navigationLabel, skipLabel, items, a
           {product}
         </AppLink>
         {items.length > 0 && (
-          <nav
-            aria-label={navigationLabel}
-            className="order-3 -mx-4 w-[calc(100%+2rem)] overflow-x-auto px-4 sm:order-none sm:mx-0 sm:w-auto sm:flex-1 sm:px-0"
-          >
-            <ul className="flex h-full items-stretch gap-5 sm:gap-6">
+          <nav aria-label={navigationLabel} className="order-3 w-full sm:order-none sm:w-auto sm:flex-1">
+            <ul className="flex h-full flex-wrap items-stretch gap-x-5 sm:gap-x-6">
               {items.map((item) => (
                 <li key={item.href} className="flex">
                   <AppLink

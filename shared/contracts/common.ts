@@ -5,13 +5,17 @@ export const uuid = z.uuid();
 export const prior = z.strictObject({ weight: z.int(), total: z.int() });
 export type Prior = z.infer<typeof prior>;
 
-/** A figure between 0 and 1 with its 90 % interval; `few` marks one that rests on few answers. */
+/**
+ * A figure between 0 and 1 with its 90 % interval; `few` marks one that rests on few answers. `rests` says on what:
+ * answers in its own set, only answers to the same cases in another set, or nothing, when no case was answered yet.
+ */
 export const figure = z.strictObject({
   value: z.number(),
   low: z.number(),
   high: z.number(),
   answers: z.int(),
   few: z.boolean(),
+  rests: z.enum(['here', 'elsewhere', 'nothing']),
 });
 export type Figure = z.infer<typeof figure>;
 

@@ -22,9 +22,13 @@ function answering(who: readonly string[] | null): string {
   return `${named.slice(0, -1).join(', ')} and ${named.at(-1)} answer`;
 }
 
+const ELSEWHERE = 'from answers in another set';
+
 /** The captain's desk. */
 export const deskText = {
   none: '–',
+  notBegun: 'not begun',
+  elsewhere: ELSEWHERE,
   never: 'never',
   today: 'today',
   yesterday: 'yesterday',
@@ -35,16 +39,17 @@ export const deskText = {
     low: string;
     high: string;
     answers: number;
+    elsewhere: boolean;
     change: string | null;
   }) =>
-    `${figure.value}, between ${figure.low} and ${figure.high}, ${count(figure.answers, 'answer', 'answers')}${figure.change ? `, ${figure.change} points in 28 days` : ''}`,
+    `${figure.value}, between ${figure.low} and ${figure.high}, ${figure.elsewhere ? ELSEWHERE : count(figure.answers, 'answer', 'answers')}${figure.change ? `, ${figure.change} points in 28 days` : ''}`,
 
   squad: {
     title: 'Squad',
     titleOfGroups: (set: string) => `Squad, ${set} by group`,
     lead: (limit: string | null) =>
       `Dealt recall now: the chance that the next case a solve deals is named, with its AUF where it is asked, ${limit === null ? 'inside the limit of its set' : `inside ${limit}`}.`,
-    key: 'The tick is the figure in per cent, the bar its 90 % interval. Hollow: fewer than 20 answers in 28 days.',
+    key: 'The tick is the figure in per cent, the bar its 90 % interval. Hollow: fewer than 20 answers in 28 days. A mean leaves out who has not begun.',
     limit: (limitMs: number) => seconds(limitMs),
     view: 'Show',
     allSets: 'All sets',
@@ -60,6 +65,7 @@ export const deskText = {
     dealt: (share: number) => percent(share),
     dealtLong: ' of solves, ',
     mean: (value: number) => `mean ${Math.round(value * 100)}`,
+    meanWithout: (notBegun: number) => (notBegun > 0 ? `, ${notBegun} not begun` : ''),
     notAnswering: 'not assigned',
     csv: 'Download CSV',
     csvFile: (set: string | null, date: string) => `squad${set ? `-${set}` : ''}-${date}.csv`,
@@ -111,6 +117,7 @@ export const deskText = {
     neverTrained: 'Has not trained yet.',
     captain: 'Captain, trains like the others.',
     trend: (set: string) => `${set}: dealt recall over 90 days`,
+    notBegun: 'Not begun: no case of it has been answered yet.',
     trendTooShort: 'A line appears after two days of answers.',
     interval: (low: string, high: string) => `${low} to ${high}`,
     now: 'now',
@@ -215,6 +222,8 @@ export const deskText = {
     pinned: (edition: number, newest: number | null) =>
       newest !== null && newest > edition ? `${edition}, newest is ${newest}` : `${edition}`,
     limit: (limitMs: number) => seconds(limitMs),
+    inShort: (edition: string, limit: string, asksAuf: boolean) =>
+      `Edition ${edition}; limit ${limit}; AUF ${asksAuf ? 'asked' : 'not asked'}.`,
     asked: 'asked',
     notAsked: 'not asked',
     everyone: 'everyone',
@@ -277,7 +286,9 @@ export const deskText = {
       casesTwice: ({ set, other, cases, who }: CasesTwice) =>
         `${set} and ${other} share ${cases === 1 ? 'a case' : `${cases} cases`}, and ${answering(who)} for ${
           cases === 1 ? 'it' : 'them'
-        } through ${other} already. Withdraw ${other} there first: what was learned stays.`,
+        } through ${other} already. First edit ${other} to Chosen members without ${
+          who?.length === 1 ? who[0] : `those who are to answer for ${set}`
+        }, or withdraw ${other} if nobody needs it. What was learned stays.`,
     },
   },
   points,

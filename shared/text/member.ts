@@ -1,3 +1,5 @@
+import type { Figure } from '../contracts/common.ts';
+
 const percent = (share: number): string => `${Math.round(share * 100)}%`;
 const plural = (count: number, one: string, many: string): string => `${count} ${count === 1 ? one : many}`;
 
@@ -24,8 +26,12 @@ export const memberText = {
   outcomes,
   prior: oneIn,
   priorExact: (weight: number, total: number) => `${weight}/${total.toLocaleString('en-GB')}`,
-  figureLabel: (value: number, low: number, high: number, answers: number) =>
-    `${percent(value)}, between ${percent(low)} and ${percent(high)}, from ${plural(answers, 'answer', 'answers')}`,
+  notBegun: 'not begun',
+  figure: ({ value, rests }: Figure) => (rests === 'nothing' ? '–' : percent(value)),
+  figureLabel: ({ value, low, high, answers, rests }: Figure) =>
+    rests === 'nothing'
+      ? 'not begun'
+      : `${percent(value)}, between ${percent(low)} and ${percent(high)}, from ${rests === 'elsewhere' ? 'answers in another set' : plural(answers, 'answer', 'answers')}`,
   teamLabel: (value: number, low: number, high: number) =>
     `${percent(value)}, between ${percent(low)} and ${percent(high)}`,
   answers: (count: number) => plural(count, 'answer', 'answers'),

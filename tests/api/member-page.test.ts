@@ -54,6 +54,7 @@ describe('a member’s page', () => {
       high: expect.closeTo(high, 12),
       answers: 25,
       few: false,
+      rests: 'here',
     });
     expect(view.rates).toEqual({ answers: 25, held: 18, late: 3, missed: 4, left: 2, misTaps: 1 });
   });

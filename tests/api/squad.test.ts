@@ -60,6 +60,7 @@ describe('the grid', () => {
       high: expect.closeTo(high, 12),
       answers: 34,
       few: false,
+      rests: 'here',
     });
     // 172/284 now, 142/284 when the period began.
     expect(row?.cells[0]?.change).toBeCloseTo((30 / 284) * 100, 9);
@@ -77,7 +78,14 @@ describe('the grid', () => {
     expect(own?.cells[0]?.change).toBeNull();
     const other = view.rows.find((row) => row.memberId === member.memberId);
     expect(other).toMatchObject({ answers: 0, lastTrained: null, minutesPerDay: 0 });
-    expect(other?.cells[0]?.figure).toEqual({ value: 0, low: 0, high: 0, answers: 0, few: true });
+    expect(other?.cells[0]?.figure).toEqual({
+      value: 0,
+      low: 0,
+      high: 0,
+      answers: 0,
+      few: true,
+      rests: 'nothing',
+    });
   });
 
   it('leaves the cell empty for a set a member does not answer for', async () => {

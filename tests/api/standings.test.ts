@@ -74,6 +74,7 @@ describe('the board', () => {
         high: expect.closeTo(top, 12),
         answers: 100,
         few: false,
+        rests: 'here',
       },
     });
   });
@@ -104,6 +105,7 @@ describe('the board', () => {
       value: 0,
       answers: 0,
       few: true,
+      rests: 'nothing',
     });
   });
 

@@ -1,11 +1,13 @@
 import { expect, it } from 'vitest';
 import { openDatabase } from '#database/client.ts';
 import { rebuildMember } from '#server/services/rollups/rebuild-member.ts';
-import type { AssignSetInput } from '#shared/contracts/desk.ts';
+import type { AssignSetInput, SquadView } from '#shared/contracts/desk.ts';
 import type { MyCasesView } from '#shared/contracts/member.ts';
 import { caseSet } from '#shared/lastlayer/index.ts';
+import { recall } from '#shared/memory/index.ts';
 import { useApi } from '../support/api.ts';
 import type { Person } from '../support/factories.ts';
+import { insertMemory, insertRollup, londonDay } from '../support/figures.ts';
 import { Phone } from '../support/training.ts';
 
 const api = useApi();
@@ -167,17 +169,67 @@ it('an answer given through a subset that was withdrawn meanwhile still counts, 
   expect(await derived(member)).toEqual(before);
 }, 60_000);
 
+it('who moves to a set that shares cases has the true figure of it at once, and it says what it rests on', async () => {
+  const { captain, member, edges } = await clubWithSubset();
+  await assign(captain, 'pll');
+  const phone = new Phone(api, member);
+  await phone.today();
+  // Known from PLL: the log and the memory of the edges' cases, as answers would have left them.
+  const day = londonDay(api.clock.now());
+  for (const caseName of EDGES) {
+    await insertMemory(api.factory, member, { caseName, stability: 100, lastDay: day - 1 });
+  }
+  await withdraw(captain, 'pll');
+  expect((await assign(captain, edges)).status).toBe(200);
+
+  const read = async () => (await api.as(captain.claims).get('/api/desk/squad')).body as SquadView;
+  const figureOf = (view: SquadView, { memberId }: Person) =>
+    view.rows.find((row) => row.memberId === memberId)?.cells[0]?.figure;
+  const view = await read();
+  const figure = figureOf(view, member);
+  const memory = { stability: 100, lastDay: day - 1 } as Parameters<typeof recall>[0];
+  // Nothing was answered first on a day before, so no calibration shifts the curve: recall at the coming rollover.
+  expect(figure?.value).toBeCloseTo(recall(memory, day + 1), 9);
+  expect(figure).toMatchObject({ answers: 0, rests: 'elsewhere' });
+  expect(figureOf(view, captain)).toMatchObject({ value: 0, rests: 'nothing' });
+  const page = await api.as(captain.claims).get(`/api/desk/members/${member.memberId}`);
+  expect(page.body.sets[0].now).toEqual(figure);
+  const form = await api.as(member.claims).get('/api/form');
+  expect(form.body.sets[0].now).toMatchObject({ value: figure?.value, rests: 'elsewhere' });
+
+  // Reading wrote nothing, and the first answer here is one it rests on.
+  expect(await read()).toEqual(view);
+  api.clock.advance(200 * DAY);
+  await phone.answerNext();
+  expect(figureOf(await read(), member)).toMatchObject({ answers: 1, rests: 'here' });
+});
+
+it('answers from before the last 28 days are answers in the set', async () => {
+  const club = await api.factory.club();
+  const captain = await api.factory.person({ club, role: 'captain' });
+  await api.factory.assign(club, 'pll');
+  const day = londonDay(api.clock.now());
+  await insertRollup(api.factory, captain, { day: day - 40, sumPe: 100, answers: 30 });
+  await insertRollup(api.factory, captain, { day, sumPe: 90, answers: 0 });
+  for (const query of ['', '?setKey=pll']) {
+    const { rows } = (await api.as(captain.claims).get(`/api/desk/squad${query}`)).body as SquadView;
+    expect(rows[0]?.cells.at(-1)?.figure).toMatchObject({ answers: 0, rests: 'here' });
+  }
+});
+
 it('nobody answers for a case through two sets: the refusal names both and who', async () => {
   const { club, captain, member, edges } = await clubWithSubset();
   await assign(captain, edges);
   const everyone = await assign(captain, 'pll');
   expect(everyone.status).toBe(422);
-  expect(everyone.body.errors).toEqual([expect.objectContaining({ pointer: '/setKey' })]);
+  expect(everyone.body.errors).toEqual([expect.objectContaining({ pointer: '/forEveryone' })]);
   expect(everyone.body.detail).toBe(
-    'PLL and Edges only share 4 cases, and everyone answers for them through Edges only already. Withdraw Edges only there first: what was learned stays.',
+    'PLL and Edges only share 4 cases, and everyone answers for them through Edges only already. First edit Edges only to Chosen members without those who are to answer for PLL, or withdraw Edges only if nobody needs it. What was learned stays.',
   );
   const one = await assign(captain, 'pll', { forEveryone: false, memberIds: [member.memberId] });
   expect(one.body.detail).toContain(`and ${member.nickname} answers for them`);
+  expect(one.body.detail).toContain(`edit Edges only to Chosen members without ${member.nickname}, or`);
+  expect(one.body.errors).toEqual([expect.objectContaining({ pointer: '/memberIds' })]);
 
   // Handed to different people the two stand side by side; widening either is refused.
   const second = await api.factory.person({ club });

@@ -39,13 +39,19 @@ describe('the squad as a file', () => {
     nickname: '=Kofi, "K"',
     role: 'member',
     cells: [
-      { figure: { value: 0.9136, low: 0.8, high: 1, answers: 31, few: false }, change: -2.04 },
+      { figure: { value: 0.9136, low: 0.8, high: 1, answers: 31, few: false, rests: 'here' }, change: -2.04 },
       { figure: null, change: null },
     ],
     answers: 31,
     lastTrained: '2026-11-30',
     minutesPerDay: 4.26,
   };
+  it('says who has not begun a set, in place of a figure', () => {
+    const figure = { value: 0, low: 0, high: 0, answers: 0, few: true, rests: 'nothing' } as const;
+    const begun = { ...row, cells: [{ figure, change: null }, ...row.cells.slice(1)] };
+    expect(parse(squadCsv({ columns }, [begun]))[1]?.slice(2, 7)).toEqual(['not begun', '', '', '0', '']);
+  });
+
   const columns = [
     { key: 'pll', name: 'PLL', dealt: null },
     { key: 'oll', name: 'OLL', dealt: null },

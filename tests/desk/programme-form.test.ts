@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import {
+  choosing,
   fieldOfPointer,
   type ProgrammeValues,
   readValues,
@@ -65,17 +66,25 @@ describe('the programme’s form', () => {
     for (const limit of ['0.5', '60']) expect(wrong({ limit }), limit).toEqual([]);
   });
 
+  it('starts choosing members from everyone, and keeps a choice that was made', () => {
+    const members = [
+      { memberId: somebody, nickname: 'Ines' },
+      { memberId: '0193d1a0-0000-7000-8000-000000000002', nickname: 'Kofi' },
+    ];
+    const all = choosing(typed, false, members);
+    expect(all).toMatchObject({ forEveryone: false, memberIds: members.map(({ memberId }) => memberId) });
+    const one = { ...all, memberIds: [somebody] };
+    expect(choosing(one, false, members)).toEqual(one);
+  });
+
   it('shows a row as it stands, and the server’s refusals at their fields', () => {
     const row = {
       ...{ setKey: 'pll', name: 'PLL', pinnedEdition: 2, newestEdition: 3, limitMs: 2500 },
       ...{ asksAuf: false, forEveryone: true, memberIds: [], version: 7 },
     };
     expect(valuesOf(row)).toMatchObject({ edition: '2', limit: '2.5', asksAuf: false, version: 7 });
-    expect(['/limitMs', '/pinnedEdition', '/memberIds/0', '/setKey'].map(fieldOfPointer)).toEqual([
-      'limit',
-      'edition',
-      'members',
-      'set',
-    ]);
+    expect(
+      ['/limitMs', '/pinnedEdition', '/forEveryone', '/memberIds/0', '/setKey'].map(fieldOfPointer),
+    ).toEqual(['limit', 'edition', 'who', 'members', 'set']);
   });
 });

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { type SortKey, sortOf, sortRows } from '#pages/desk/squad/squad-sort.ts';
+import type { Figure } from '#shared/contracts/common.ts';
 import type { SquadRow } from '#shared/contracts/desk.ts';
 
 const columns = [
@@ -13,7 +14,8 @@ function row(
   change: number | null,
   more: Partial<SquadRow> = {},
 ): SquadRow {
-  const figure = value === null ? null : { value, low: value, high: value, answers: 30, few: false };
+  const figure: Figure | null =
+    value === null ? null : { value, low: value, high: value, answers: 30, few: false, rests: 'here' };
   return {
     memberId: nickname,
     nickname,

@@ -17,19 +17,26 @@ const TICKS_AGO = [84, 56, 28, 0];
 export function SetTrend({ set, date }: { set: MemberSet; date: string }) {
   return (
     <Section title={set.name} aside={text.edition(set.edition)} ruled>
-      <div className="grid grid-cols-[auto_minmax(0,1fr)] items-center gap-x-5 py-3">
-        <span className="text-[2.125rem] font-bold leading-tight">{percent(set.now.value)}</span>
-        <div>
-          <FigureBar bare figure={set.now} text="" label={sayFigure(set.now)} hollow={set.now.few} />
-          <p className="text-sm text-ink-2">
-            {text.interval(percent(set.now.low), percent(set.now.high))}, {text.answers(set.now.answers)}
-          </p>
-        </div>
-      </div>
-      {set.days.length < 2 ? (
-        <p className="py-3 text-ink-2">{text.trendTooShort}</p>
+      {set.now.rests === 'nothing' ? (
+        <p className="py-3 text-ink-2">{text.notBegun}</p>
       ) : (
-        <Trend set={set} today={dayOf(date)} />
+        <>
+          <div className="grid grid-cols-[auto_minmax(0,1fr)] items-center gap-x-5 py-3">
+            <span className="text-[2.125rem] font-bold leading-tight">{percent(set.now.value)}</span>
+            <div>
+              <FigureBar bare figure={set.now} text="" label={sayFigure(set.now)} hollow={set.now.few} />
+              <p className="text-sm text-ink-2">
+                {text.interval(percent(set.now.low), percent(set.now.high))},{' '}
+                {set.now.rests === 'elsewhere' ? deskText.elsewhere : text.answers(set.now.answers)}
+              </p>
+            </div>
+          </div>
+          {set.days.length < 2 ? (
+            <p className="py-3 text-ink-2">{text.trendTooShort}</p>
+          ) : (
+            <Trend set={set} today={dayOf(date)} />
+          )}
+        </>
       )}
     </Section>
   );

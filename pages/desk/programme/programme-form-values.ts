@@ -44,6 +44,20 @@ export function valuesOfNew(set: ProgrammeView['available'][number]): ProgrammeV
   };
 }
 
+/** Who answers, as chosen: from everyone to chosen members all are ticked, so that some can be taken out. */
+export function choosing(
+  values: ProgrammeValues,
+  forEveryone: boolean,
+  members: ProgrammeView['members'],
+): ProgrammeValues {
+  const all = values.forEveryone && !forEveryone;
+  return {
+    ...values,
+    forEveryone,
+    memberIds: all ? members.map(({ memberId }) => memberId) : values.memberIds,
+  };
+}
+
 /** Checks the form as the server will: what to send, or what is wrong at which field. */
 export function readValues(
   values: ProgrammeValues,
@@ -73,6 +87,7 @@ export function readValues(
 export function fieldOfPointer(pointer: string): ProgrammeField {
   if (pointer.startsWith('/limitMs')) return 'limit';
   if (pointer.startsWith('/pinnedEdition')) return 'edition';
+  if (pointer.startsWith('/forEveryone')) return 'who';
   if (pointer.startsWith('/memberIds')) return 'members';
   return 'set';
 }

@@ -1,10 +1,11 @@
-import { type FormEvent, useState } from 'react';
+import { type FormEvent, useEffect, useState } from 'react';
 import { type ApiError, useSend } from '#renderer/api.ts';
 import { Button, ChoiceGroup, ErrorSummary, SelectField, TextField } from '#renderer/ui/index.ts';
 import type { ProgrammeView } from '#shared/contracts/desk.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { deskText } from '#shared/text/desk.ts';
 import {
+  choosing,
   fieldOfPointer,
   type ProgrammeField,
   type ProgrammeValues,
@@ -35,6 +36,18 @@ export function ProgrammeForm(props: ProgrammeFormProps) {
   const change = (part: Partial<ProgrammeValues>) => setValues({ ...values, ...part });
   const fieldId = (field: ProgrammeField) => `${id}-${field === 'set' ? 'edition' : field}`;
 
+  const errors = Object.entries(wrong).map(([field, message]) => ({
+    fieldId: fieldId(field as ProgrammeField),
+    message,
+  }));
+  // One error stands once, at its field, and the field takes the focus; several stand in a summary too.
+  const only = errors.length === 1 ? errors[0]?.fieldId : undefined;
+  useEffect(() => {
+    const field = only === undefined || send.isPending ? null : document.getElementById(only);
+    field?.scrollIntoView({ block: 'center' });
+    field?.focus({ preventScroll: true });
+  }, [only, send.isPending]);
+
   const submit = (event: FormEvent) => {
     event.preventDefault();
     if (send.isPending) return;
@@ -51,13 +64,7 @@ export function ProgrammeForm(props: ProgrammeFormProps) {
 
   return (
     <form onSubmit={submit} noValidate className="grid max-w-[38rem] gap-6">
-      <ErrorSummary
-        title={text.problemTitle}
-        errors={Object.entries(wrong).map(([field, message]) => ({
-          fieldId: fieldId(field as ProgrammeField),
-          message,
-        }))}
-      />
+      {errors.length > 1 && <ErrorSummary title={text.problemTitle} errors={errors} />}
       <div className="grid items-start gap-6 sm:grid-cols-2">
         <SelectField
           id={fieldId('edition')}
@@ -104,7 +111,8 @@ export function ProgrammeForm(props: ProgrammeFormProps) {
             { value: 'some', label: text.whoChosen },
           ]}
           value={[values.forEveryone ? 'all' : 'some']}
-          onChange={(event) => change({ forEveryone: event.currentTarget.value === 'all' })}
+          error={wrong.who}
+          onChange={(event) => setValues(choosing(values, event.currentTarget.value === 'all', members))}
         />
       </div>
       {!values.forEveryone && (

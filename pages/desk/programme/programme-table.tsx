@@ -4,6 +4,9 @@ import { deskText } from '#shared/text/desk.ts';
 
 const text = deskText.programme;
 
+/** Columns that a phone has no room for. */
+const WIDER = 'hidden md:table-cell';
+
 export type ProgrammeRow = ProgrammeView['rows'][number];
 
 interface RowActions {
@@ -28,8 +31,11 @@ export function ProgrammeTable({ view, onEdit, onWithdraw }: { view: ProgrammeVi
       cell: (row) => (
         <>
           {row.name}
-          {/* On a phone the last column would lie out of sight. */}
-          <span className="mt-2 flex flex-col items-start gap-2 sm:hidden">
+          {/* On a phone there is room for who answers; the other columns stand under the name. */}
+          <span className="block text-sm font-normal text-ink-2 md:hidden">
+            {text.inShort(editionOf(row), text.limit(row.limitMs), row.asksAuf)}
+          </span>
+          <span className="mt-2 flex flex-wrap items-start gap-2 md:hidden">
             <Actions row={row} onEdit={onEdit} onWithdraw={onWithdraw} />
           </span>
         </>
@@ -38,28 +44,33 @@ export function ProgrammeTable({ view, onEdit, onWithdraw }: { view: ProgrammeVi
     {
       key: 'edition',
       header: text.columns.edition,
-      cell: (row) =>
-        row.pinnedEdition === null
-          ? text.newest(row.newestEdition)
-          : text.pinned(row.pinnedEdition, row.newestEdition),
+      className: WIDER,
+      cell: editionOf,
     },
     {
       key: 'limit',
       header: text.columns.limit,
       nowrap: true,
+      className: WIDER,
       cell: (row) => text.limit(row.limitMs),
     },
     {
       key: 'auf',
       header: text.columns.auf,
+      className: WIDER,
       cell: (row) => (row.asksAuf ? text.asked : text.notAsked),
     },
-    { key: 'who', header: text.columns.who, className: 'min-w-40', cell: (row) => whoAnswers(row, view) },
+    {
+      key: 'who',
+      header: text.columns.who,
+      className: 'w-[45%] md:w-auto md:min-w-40',
+      cell: (row) => whoAnswers(row, view),
+    },
     {
       key: 'actions',
       header: text.columns.actions,
       nowrap: true,
-      className: 'hidden sm:table-cell',
+      className: WIDER,
       cell: (row) => (
         <span className="inline-flex gap-2">
           <Actions row={row} onEdit={onEdit} onWithdraw={onWithdraw} />
@@ -84,7 +95,7 @@ function Actions({ row, onEdit, onWithdraw }: { row: ProgrammeRow } & RowActions
       <Button
         kind="outlined"
         size="small"
-        className="max-sm:min-h-12"
+        className="max-md:min-h-12"
         aria-label={text.editOf(row.name)}
         onClick={() => onEdit(row)}
       >
@@ -93,7 +104,7 @@ function Actions({ row, onEdit, onWithdraw }: { row: ProgrammeRow } & RowActions
       <Button
         kind="outlined"
         size="small"
-        className="max-sm:min-h-12"
+        className="max-md:min-h-12"
         aria-label={text.withdrawOf(row.name)}
         onClick={() => onWithdraw(row)}
       >
@@ -101,6 +112,10 @@ function Actions({ row, onEdit, onWithdraw }: { row: ProgrammeRow } & RowActions
       </Button>
     </>
   );
+}
+
+function editionOf({ pinnedEdition, newestEdition }: ProgrammeRow): string {
+  return pinnedEdition === null ? text.newest(newestEdition) : text.pinned(pinnedEdition, newestEdition);
 }
 
 function whoAnswers(row: ProgrammeRow, { members }: ProgrammeView): string {

@@ -26,15 +26,17 @@ export function squadCsv(view: Pick<SquadView, 'columns'>, rows: readonly SquadR
       row.nickname,
       text.roles[row.role],
       ...row.cells.flatMap(({ figure, change }): CsvValue[] =>
-        figure
-          ? [
-              tenths(figure.value * 100),
-              tenths(figure.low * 100),
-              tenths(figure.high * 100),
-              figure.answers,
-              change === null ? null : tenths(change),
-            ]
-          : [null, null, null, null, null],
+        figure?.rests === 'nothing'
+          ? [deskText.notBegun, null, null, 0, null]
+          : figure
+            ? [
+                tenths(figure.value * 100),
+                tenths(figure.low * 100),
+                tenths(figure.high * 100),
+                figure.answers,
+                change === null ? null : tenths(change),
+              ]
+            : [null, null, null, null, null],
       ),
       row.answers,
       row.lastTrained,

@@ -63,5 +63,6 @@ function valueIn(
   if (key === 'minutes') return row.minutesPerDay;
   if (key === 'trained') return row.lastTrained === null ? null : Date.parse(row.lastTrained);
   const cell = row.cells[columns.findIndex((column) => column.key === key.slice(2))];
+  if (cell?.figure?.rests === 'nothing') return null;
   return (key.startsWith('r.') ? cell?.figure?.value : cell?.change) ?? null;
 }

@@ -3,6 +3,7 @@ import { AppLink, type Column, DataTable, FigureBar, VisuallyHidden } from '#ren
 import type { SquadRow, SquadView } from '#shared/contracts/desk.ts';
 import { deskText } from '#shared/text/desk.ts';
 import { printFigure, sayFigure, sayPastDate } from '../say-figure.ts';
+import { meanOf, notBegun } from './squad-mean.ts';
 import { firstDirection, type Sort, type SortKey } from './squad-sort.ts';
 
 const text = deskText.squad;
@@ -35,7 +36,7 @@ export function SquadTable({ view, rows, sort }: { view: SquadView; rows: readon
     return [
       {
         key: `r.${column.key}`,
-        header: <FigureHead column={column} mean={meanOf(view, index)} />,
+        header: <FigureHead column={column} mean={meanOf(view, index)} notBegun={notBegun(view, index)} />,
         cell: (row) => <FigureCell row={row} index={index} strong={byGroup && whole} />,
         className: whole ? (byGroup ? 'w-28 min-w-22' : 'w-40 min-w-26') : CLOSE,
         sort: sorting(`r.${column.key}`),
@@ -126,7 +127,15 @@ function Name({ row }: { row: SquadRow }) {
   );
 }
 
-function FigureHead({ column, mean }: { column: SquadView['columns'][number]; mean: number | null }) {
+function FigureHead({
+  column,
+  mean,
+  notBegun,
+}: {
+  column: SquadView['columns'][number];
+  mean: number | null;
+  notBegun: number;
+}) {
   return (
     <>
       {column.dealt !== null && (
@@ -136,22 +145,21 @@ function FigureHead({ column, mean }: { column: SquadView['columns'][number]; me
         </span>
       )}
       {column.dealt === null && mean !== null && (
-        <span className="block text-xs font-normal text-ink-2">{text.mean(mean)}</span>
+        <span className="block text-xs font-normal text-ink-2">
+          {text.mean(mean)}
+          {text.meanWithout(notBegun)}
+        </span>
       )}
       {column.name}
     </>
   );
 }
 
-function meanOf(view: SquadView, index: number): number | null {
-  const values = view.rows.flatMap((row) => row.cells[index]?.figure?.value ?? []);
-  return values.length === 0 ? null : values.reduce((sum, value) => sum + value, 0) / values.length;
-}
-
 function FigureCell({ row, index, strong }: { row: SquadRow; index: number; strong: boolean }) {
   const cell = row.cells[index];
   if (!cell?.figure) return <span className="text-sm text-ink-2">{text.notAnswering}</span>;
   const { figure, change } = cell;
+  if (figure.rests === 'nothing') return <span className="text-sm text-ink-2">{deskText.notBegun}</span>;
   return (
     <FigureBar
       figure={figure}

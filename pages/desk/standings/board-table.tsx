@@ -10,9 +10,12 @@ const { percent } = numberText;
 type Row = StandingsBoard['rows'][number];
 
 function RestsOn({ row, className }: { row: Row; className?: string }) {
+  if (row.figure.rests === 'nothing') return null;
   return (
     <span className={cx('whitespace-nowrap text-[0.8125rem] text-ink-2 sm:text-[0.9375rem]', className)}>
-      {text.restsOn(row.figure.answers, row.daysCounted)}
+      {row.figure.rests === 'elsewhere'
+        ? deskText.elsewhere
+        : text.restsOn(row.figure.answers, row.daysCounted)}
     </span>
   );
 }
@@ -34,18 +37,21 @@ const figure: Column<Row> = {
   key: 'figure',
   header: text.figure,
   className: 'w-[40%] min-w-38',
-  cell: (row) => (
-    <>
-      <FigureBar
-        figure={row.figure}
-        text={percent(row.figure.value, 1)}
-        label={sayFigure(row.figure)}
-        hollow={row.figure.few}
-        strong
-      />
-      <RestsOn row={row} className="block sm:hidden" />
-    </>
-  ),
+  cell: (row) =>
+    row.figure.rests === 'nothing' ? (
+      <span className="text-sm text-ink-2">{deskText.notBegun}</span>
+    ) : (
+      <>
+        <FigureBar
+          figure={row.figure}
+          text={percent(row.figure.value, 1)}
+          label={sayFigure(row.figure)}
+          hollow={row.figure.few}
+          strong
+        />
+        <RestsOn row={row} className="block sm:hidden" />
+      </>
+    ),
 };
 
 const rests: Column<Row> = {

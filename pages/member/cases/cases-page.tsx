@@ -85,9 +85,9 @@ function SetFigures({ sets }: { sets: MyCasesView['sets'] }) {
             <span className="text-ink-2">{text.setRecall}</span>
           </span>
           <FigureBar
-            figure={recall}
-            text={memberText.percent(recall.value)}
-            label={memberText.figureLabel(recall.value, recall.low, recall.high, recall.answers)}
+            figure={recall.rests === 'nothing' ? null : recall}
+            text={memberText.figure(recall)}
+            label={memberText.figureLabel(recall)}
             hollow={recall.few}
             strong
           />

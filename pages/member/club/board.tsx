@@ -30,15 +30,18 @@ export function Board({ board }: { board: StandingsBoard }) {
       key: 'recall',
       header: text.recall,
       className: 'w-2/5',
-      cell: ({ figure, isMe }) => (
-        <FigureBar
-          figure={figure}
-          text={memberText.percent(figure.value)}
-          label={memberText.figureLabel(figure.value, figure.low, figure.high, figure.answers)}
-          hollow={figure.few}
-          strong={isMe}
-        />
-      ),
+      cell: ({ figure, isMe }) =>
+        figure.rests === 'nothing' ? (
+          <span className="text-sm text-ink-2">{memberText.notBegun}</span>
+        ) : (
+          <FigureBar
+            figure={figure}
+            text={memberText.percent(figure.value)}
+            label={memberText.figureLabel(figure)}
+            hollow={figure.few}
+            strong={isMe}
+          />
+        ),
     },
   ];
   const rows = [...board.rows, ...board.unranked];

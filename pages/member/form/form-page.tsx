@@ -58,12 +58,12 @@ function SetForm({ set }: { set: FormView['sets'][number] }) {
         </h3>
         <div>
           <p className="text-end text-[2.125rem] font-bold leading-none" aria-hidden="true">
-            {memberText.percent(now.value)}
+            {memberText.figure(now)}
           </p>
           <FigureBar
-            figure={now}
-            text={memberText.percent(now.value)}
-            label={memberText.figureLabel(now.value, now.low, now.high, now.answers)}
+            figure={now.rests === 'nothing' ? null : now}
+            text={memberText.figure(now)}
+            label={memberText.figureLabel(now)}
             hollow={now.few}
             bare
           />

@@ -4,6 +4,7 @@ import { recall } from '#shared/memory/index.ts';
 import { dealtRecall } from '#shared/standing/index.ts';
 import { groupBy } from '../group-by.ts';
 import { readCalibrations } from '../rollups/read-calibration.ts';
+import { answeredBefore } from '../standing/answered-before.ts';
 import { dayFigures, presentFigure } from '../standing/read-figures.ts';
 import { cardsOf } from '../training/cards.ts';
 import type { MemberDay } from '../training/member-day.ts';
@@ -24,6 +25,11 @@ export async function figuresNow(tx: Transaction, day: MemberDay): Promise<(setK
     toDay: day.day,
   });
   const rowsOf = groupBy(rows, (row) => row.setKey);
+  const before = await answeredBefore(
+    tx,
+    clubId,
+    day.sets.map(({ entry }) => ({ memberId, setKey: entry.setKey, group: null })),
+  );
   const cardsOfSet = groupBy(cardsOf(day), (card) => card.trained.entry.setKey);
   const figures = new Map<string, Figure>();
   for (const { entry, set } of day.sets) {
@@ -42,10 +48,13 @@ export async function figuresNow(tx: Transaction, day: MemberDay): Promise<(setK
       })),
       calibrations(day.day),
     );
-    figures.set(entry.setKey, presentFigure(estimate, answers));
+    figures.set(
+      entry.setKey,
+      presentFigure(estimate, answers, before({ memberId, setKey: entry.setKey, group: null })),
+    );
   }
   return (setKey) => figures.get(setKey) ?? NOTHING;
 }
 
 /** A set without cases: nothing can be dealt. */
-const NOTHING: Figure = { value: 0, low: 0, high: 0, answers: 0, few: true };
+const NOTHING: Figure = { value: 0, low: 0, high: 0, answers: 0, few: true, rests: 'nothing' };

@@ -6,6 +6,7 @@ import { notFound, Problem, stale } from '../../http/problem.ts';
 import { holdSet } from '../case-sets/hold-set.ts';
 import { editionNumbers } from '../catalogue/read-edition.ts';
 import { asCaptain, type Ctx } from '../context.ts';
+import { beginSet } from '../rollups/begin-set.ts';
 import { requireOneSetACase } from './one-set-a-case.ts';
 import { programmeView } from './read-programme-view.ts';
 
@@ -13,19 +14,22 @@ const text = deskText.programme.problems;
 
 /**
  * Puts a set on the club's programme (`version` 0) or changes how it is trained (`version` as it was read). Who
- * trains it sees it in their next Today: nothing is copied, Today reads the programme.
+ * trains it sees it in their next Today: nothing is copied, Today reads the programme. Whoever
+ * knows cases of it already has their figure of it at once.
  * @throws Problem not-found for no such set, cannot-take for an edition or a member that cannot be and for
  *   cases that somebody answers for through another set, stale when
  *   someone else was quicker.
  */
 export async function assignSet(ctx: Ctx, input: AssignSetInput): Promise<ProgrammeView> {
-  return asCaptain(ctx, async (tx, { clubId }) => {
+  return asCaptain(ctx, async (tx, captain) => {
+    const { clubId } = captain;
     await checkEdition(tx, input);
     const memberIds = await checkMembers(tx, clubId, input);
     await requireOneSetACase(tx, clubId, input);
     if (input.version === 0) await insert(tx, clubId, input);
     else await update(tx, clubId, input);
     await writeMembers(tx, clubId, input.setKey, memberIds);
+    await beginSet(ctx, tx, captain, input.setKey);
     return programmeView(tx, clubId);
   });
 }

@@ -36,7 +36,9 @@ export async function requireOneSetACase(
       cases: shared,
       who: everyone ? null : who.map(({ nickname }) => nickname),
     });
-    throw new Problem('cannot-take', detail, { errors: [{ pointer: '/setKey', detail }] });
+    throw new Problem('cannot-take', detail, {
+      errors: [{ pointer: input.forEveryone ? '/forEveryone' : '/memberIds', detail }],
+    });
   }
 }
 

@@ -8,8 +8,8 @@ import { type MemberDay, readMemberDay } from '../training/member-day.ts';
 const NOT_HERE = 'There is no such member in your club.';
 
 /**
- * A member's day as their captain looks at it: the same as the member's own, but nothing is held and nothing
- * is issued.
+ * A member's day as their captain looks at it: the same as the member's own, but nothing is issued, and nothing is
+ * held unless `hold` asks for it.
  * @throws Problem not-found for somebody who is not in the club (any more).
  */
 export async function dayOfMember(
@@ -17,6 +17,7 @@ export async function dayOfMember(
   tx: Transaction,
   captain: ClubActor,
   memberId: string,
+  { hold = false } = {},
 ): Promise<MemberDay> {
   const { membership } = tables;
   if (!uuid.safeParse(memberId).success) throw notFound(NOT_HERE);
@@ -32,5 +33,6 @@ export async function dayOfMember(
     );
   if (!member) throw notFound(NOT_HERE);
   const { accountId, role, nickname, timeZone, rolloverHour } = member;
-  return readMemberDay(ctx, tx, { ...captain, accountId, memberId, role, nickname, timeZone, rolloverHour });
+  const actor = { ...captain, accountId, memberId, role, nickname, timeZone, rolloverHour };
+  return readMemberDay(ctx, tx, actor, { hold });
 }

@@ -1,6 +1,7 @@
 import type { MemberPageView } from '#shared/contracts/desk.ts';
 import { interval } from '#shared/standing/index.ts';
 import { asCaptain, type Ctx } from '../context.ts';
+import { answeredBefore } from '../standing/answered-before.ts';
 import { isoDate } from '../standing/local-date.ts';
 import { type DayFigure, dayFigures, latestFigures, presentFigure } from '../standing/read-figures.ts';
 import { dayOfMember } from './day-of-member.ts';
@@ -30,6 +31,11 @@ export async function readMemberPage(ctx: Ctx, { memberId }: { memberId: string 
     });
     const lately = days.filter((one) => one.day >= fromDay);
     const newest = await latestFigures(tx, { clubId, memberId });
+    const before = await answeredBefore(
+      tx,
+      clubId,
+      day.sets.map(({ entry }) => ({ memberId, setKey: entry.setKey, group: null })),
+    );
     const last = (await lastTrainedDays(tx, { clubId, memberIds: [memberId] })).get(memberId);
     return {
       date: isoDate(day.day),
@@ -48,6 +54,7 @@ export async function readMemberPage(ctx: Ctx, { memberId }: { memberId: string 
           now: presentFigure(
             now,
             total(lately.filter(ofSet), (one) => one.answers),
+            before({ memberId, setKey: entry.setKey, group: null }),
           ),
           days: days.filter(ofSet).map(presentDay),
         };

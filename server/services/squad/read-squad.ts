@@ -4,6 +4,7 @@ import { notFound } from '../../http/problem.ts';
 import { loadCaseSet } from '../catalogue/load-set.ts';
 import { readEditionContent } from '../catalogue/read-edition.ts';
 import { asCaptain, type Ctx } from '../context.ts';
+import { answeredBefore } from '../standing/answered-before.ts';
 import { dayOf, isoDate } from '../standing/local-date.ts';
 import { BOARD_DAYS, buildBoard } from '../standings/build-board.ts';
 import { readProgramme } from '../training/read-programme.ts';
@@ -12,7 +13,7 @@ import { columnsOfGroups, columnsOfSets } from './squad-columns.ts';
 import { activitySince, lastTrainedDays, newestSums } from './squad-figures.ts';
 import { squadLosses } from './squad-losses.ts';
 import { type SquadMember, squadMembers } from './squad-members.ts';
-import { squadRows } from './squad-rows.ts';
+import { squadRows, unanswered } from './squad-rows.ts';
 
 const LOST_SHOWN = 6;
 
@@ -45,6 +46,7 @@ export async function readSquad(ctx: Ctx, input: { setKey?: string | undefined }
       setKeys: entries.map((entry) => entry.setKey),
     };
     const now = await newestSums(tx, whose, period.all);
+    const activity = await activitySince(tx, whose, period.fromDay);
     const board = entries[0] ?? null;
     return {
       date: isoDate(today),
@@ -61,7 +63,8 @@ export async function readSquad(ctx: Ctx, input: { setKey?: string | undefined }
         columns,
         now,
         before: await newestSums(tx, whose, period.start),
-        activity: await activitySince(tx, whose, period.fromDay),
+        activity,
+        answeredBefore: await answeredBefore(tx, clubId, unanswered({ members, columns, activity })),
         lastTrained: await lastTrainedDays(tx, whose),
         daysOf: (member) => Math.min(PERIOD_DAYS, Math.max(1, today - joinedDay(member) + 1)),
       }),

@@ -1,6 +1,7 @@
 import type { SquadRow } from '#shared/contracts/desk.ts';
 import { dealtFromSums, type Estimate } from '#shared/standing/index.ts';
 import { groupBy } from '../group-by.ts';
+import type { FigureOf } from '../standing/answered-before.ts';
 import { isoDate } from '../standing/local-date.ts';
 import { presentFigure } from '../standing/read-figures.ts';
 import type { Column } from './squad-columns.ts';
@@ -15,6 +16,8 @@ export interface SquadData {
   readonly before: readonly GroupSums[];
   readonly activity: readonly Activity[];
   readonly lastTrained: ReadonlyMap<string, number>;
+  /** Whether a figure without answers in the period rests on earlier ones. */
+  answeredBefore(figure: FigureOf): boolean;
   /** Training days of the period a member has been in the club for, at least 1. */
   daysOf(member: SquadMember): number;
 }
@@ -40,7 +43,11 @@ export function squadRows(data: SquadData): SquadRow[] {
         const here = estimate(now.get(member.memberId) ?? [], column);
         const then = estimate(before.get(member.memberId) ?? [], column);
         return {
-          figure: presentFigure(here ?? NOTHING, answersIn(own, column)),
+          figure: presentFigure(
+            here ?? NOTHING,
+            answersIn(own, column),
+            data.answeredBefore(figureOf(member, column)),
+          ),
           change: here && then ? (here.theta - then.theta) * 100 : null,
         };
       }),
@@ -49,6 +56,25 @@ export function squadRows(data: SquadData): SquadRow[] {
       minutesPerDay: own.reduce((sum, row) => sum + row.spentMs, 0) / 60_000 / data.daysOf(member),
     };
   });
+}
+
+/** The figures of the grid without an answer in the period. */
+export function unanswered({
+  members,
+  columns,
+  activity,
+}: Pick<SquadData, 'members' | 'columns' | 'activity'>): FigureOf[] {
+  const own = groupBy(activity, (row) => row.memberId);
+  return members.flatMap((member) =>
+    columns
+      .filter((column) => answersFor(column.entry, member))
+      .filter((column) => answersIn(own.get(member.memberId) ?? [], column) === 0)
+      .map((column) => figureOf(member, column)),
+  );
+}
+
+function figureOf({ memberId }: SquadMember, { entry, group }: Column): FigureOf {
+  return { memberId, setKey: entry.setKey, group };
 }
 
 function answersFor({ memberIds }: Column['entry'], member: SquadMember): boolean {

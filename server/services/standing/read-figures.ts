@@ -98,8 +98,19 @@ export async function dayFigures(
   return rows.map(present);
 }
 
-/** A figure as pages show it: 90 % interval within 0..1. */
-export function presentFigure({ theta, se }: { theta: number; se: number }, answers: number): Figure {
+/**
+ * A figure as pages show it: 90 % interval within 0..1, and what it rests on. A case that was ever answered counts for
+ * more than nothing, so 0 means that none was.
+ *
+ * @param answers scored answers of the period, through the figure's own set
+ * @param before whether there were any before the period
+ */
+export function presentFigure(
+  { theta, se }: { theta: number; se: number },
+  answers: number,
+  before = answers > 0,
+): Figure {
   const [low, high] = interval(theta, se);
-  return { value: theta, low, high, answers, few: answers < FEW_ANSWERS };
+  const rests = answers > 0 || before ? 'here' : theta > 0 ? 'elsewhere' : 'nothing';
+  return { value: theta, low, high, answers, few: answers < FEW_ANSWERS, rests };
 }

@@ -3,6 +3,7 @@ import { type Transaction, tables } from '#database/client.ts';
 import type { StandingsBoard } from '#shared/contracts/member.ts';
 import { type Estimate, lowerBound, periodMean, rank } from '#shared/standing/index.ts';
 import { groupBy } from '../group-by.ts';
+import { answeredBefore } from '../standing/answered-before.ts';
 import { dayFigures, FEW_ANSWERS, presentFigure } from '../standing/read-figures.ts';
 import { type ProgrammeEntry, readProgramme } from '../training/read-programme.ts';
 
@@ -24,6 +25,8 @@ interface Standing {
   readonly estimate: Estimate;
   readonly answers: number;
   readonly daysCounted: number;
+  /** Whether there are answers from before the period. */
+  readonly before: boolean;
 }
 
 const NOTHING: Estimate = { theta: 0, se: 0 };
@@ -44,6 +47,11 @@ export async function buildBoard(tx: Transaction, request: BoardRequest): Promis
   const figures =
     toDay === null ? [] : await dayFigures(tx, { clubId, setKey, fromDay: toDay - days + 1, toDay });
   const byMember = groupBy(figures, (figure) => figure.memberId);
+  const before = await answeredBefore(
+    tx,
+    clubId,
+    members.map(({ memberId }) => ({ memberId, setKey, group: null })),
+  );
   const standings = members.map(({ memberId, nickname }): Standing => {
     const own = byMember.get(memberId) ?? [];
     return {
@@ -52,6 +60,7 @@ export async function buildBoard(tx: Transaction, request: BoardRequest): Promis
       estimate: own.length > 0 ? periodMean(own) : NOTHING,
       answers: own.reduce((sum, day) => sum + day.answers, 0),
       daysCounted: own.length,
+      before: before({ memberId, setKey, group: null }),
     };
   });
   const ranked = rank(
@@ -74,8 +83,8 @@ export async function buildBoard(tx: Transaction, request: BoardRequest): Promis
 }
 
 function present(standing: Standing, rank: number | null): StandingsBoard['rows'][number] {
-  const { nickname, isMe, estimate, answers, daysCounted } = standing;
-  return { rank, nickname, isMe, daysCounted, figure: presentFigure(estimate, answers) };
+  const { nickname, isMe, estimate, answers, daysCounted, before } = standing;
+  return { rank, nickname, isMe, daysCounted, figure: presentFigure(estimate, answers, before) };
 }
 
 function byNickname(a: Standing, b: Standing): number {
