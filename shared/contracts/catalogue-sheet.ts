@@ -28,7 +28,13 @@ export const catalogueSheetView = z.strictObject({
           alias: z.string().nullable(),
           picture,
           prior,
-          algorithms: z.array(z.string()),
+          algorithms: z.array(
+            z.strictObject({
+              algorithm: z.string(),
+              /** AUF that it needs before it from where the picture shows the case, in quarter turns U 0..3. */
+              auf: z.int().min(0).max(3),
+            }),
+          ),
         }),
       ),
     }),

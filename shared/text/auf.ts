@@ -1,8 +1,11 @@
 /** AUFs as they are printed, by quarter turns of the top: 0..3. */
 const names = ['none', 'U', 'U2', 'U′'] as const;
+const spoken = ['none', 'U', 'U two', 'U prime'] as const;
 
 export const aufText = {
   names,
+  /** One AUF as it is read aloud. */
+  spoken: (turns: number): string => spoken[turns] ?? '–',
   /** One AUF; a number outside 0..3 is a dash. */
   name: (turns: number): string => names[turns] ?? '–',
   /** All that are right, as one phrase. */

@@ -1,4 +1,8 @@
+import { greatestDivisor } from '../lastlayer/fractions.ts';
+
 const MINUS = '−';
+
+const whole = (n: number) => n.toLocaleString('en-GB');
 
 /** Numbers as every page writes them: figures whole, a true minus, a unit a space away. */
 export const numberText = {
@@ -10,13 +14,18 @@ export const numberText = {
   /** A prior as one in how many: whole where it is, else with two decimals at most. */
   oneIn: ({ weight, total }: { readonly weight: number; readonly total: number }) =>
     `1 in ${(total / weight).toLocaleString('en-GB', { maximumFractionDigits: 2 })}`,
+  /** A prior exactly, in lowest terms: 1/18, 2/27, 19/19,440. */
+  fraction: ({ weight, total }: { readonly weight: number; readonly total: number }) => {
+    const divisor = greatestDivisor(weight, total);
+    return `${whole(weight / divisor)}/${whole(total / divisor)}`;
+  },
   /** A whole number, thousands set off. */
-  whole: (n: number) => n.toLocaleString('en-GB'),
+  whole,
   /** Some of a thing: `1 case`, `3,916 cases`. */
   count: (n: number, one: string, many: string) => `${n.toLocaleString('en-GB')} ${n === 1 ? one : many}`,
   /** A change with its sign: `+2`, `−6`, `0`. */
   points: (n: number) => {
-    const whole = Math.round(n);
-    return whole === 0 ? '0' : whole > 0 ? `+${whole}` : `${MINUS}${-whole}`;
+    const rounded = Math.round(n);
+    return rounded === 0 ? '0' : rounded > 0 ? `+${rounded}` : `${MINUS}${-rounded}`;
   },
 } as const;

@@ -21,6 +21,18 @@ it('has every case of the edition once, by group, for whoever is signed in', asy
   }
 });
 
+it('has the AUF that each algorithm needs from the picture', async () => {
+  const { claims } = await api.factory.person();
+  const res = await api.as(claims).get('/api/catalogue/sets/oll/sheet');
+  const view = res.body as CatalogueSheetView;
+  const oll27 = view.groups.flatMap(({ cases }) => cases).find(({ name }) => name === '27');
+  // Derived: the first is what the picture is taken from; the puzzle model shows U' to be right for the second.
+  expect(oll27?.algorithms).toEqual([
+    { algorithm: "R U R' U R U2 R'", auf: 0 },
+    { algorithm: "R' U2 R U R' U R", auf: 3 },
+  ]);
+});
+
 it('can be of one group only, and still knows the others', async () => {
   const { claims } = await api.factory.person();
   const res = await api.as(claims).get('/api/catalogue/sets/oll/sheet?group=dot');

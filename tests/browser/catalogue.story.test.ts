@@ -100,7 +100,10 @@ it('takes all that a filter finds away as a file, and a sheet to the printer', a
   await page.waitForURL('**/sheet?algorithms=first');
   // One algorithm for each of the 21.
   expect(await page.getByRole('main').locator('ol > li').count()).toBe(21);
+  const running = page.getByText(/^PLL, edition \d+$/);
+  expect(await running.isVisible()).toBe(false);
   await page.emulateMedia({ media: 'print' });
+  expect(await running.isVisible()).toBe(true);
   expect(await page.getByRole('button', { name: 'Print' }).isVisible()).toBe(false);
   expect(await page.getByRole('navigation').first().isVisible()).toBe(false);
 });

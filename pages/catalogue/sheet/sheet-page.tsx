@@ -27,21 +27,26 @@ export function SheetPage() {
   return (
     <Awaited query={query}>
       {(view) => (
-        <>
-          <SheetHead view={view} />
-          <SheetChoices view={view} />
-          {view.groups.map(({ name, cases }) => (
-            <section key={name} className="pt-5">
-              {name && (
-                <h2 className="rule-b pb-1 text-lg font-bold">
-                  {name}
-                  <span className="ps-3 text-sm font-normal text-ink-2">{text.cases(cases.length)}</span>
-                </h2>
-              )}
-              <SheetCases setKey={setKey} cases={cases} look={lookOf(words)} />
-            </section>
-          ))}
-        </>
+        <div className="print-pages">
+          <p aria-hidden className="print-running">
+            {text.running(view.setName, view.edition)}
+          </p>
+          <div className="print-body">
+            <SheetHead view={view} />
+            <SheetChoices view={view} />
+            {view.groups.map(({ name, cases }) => (
+              <section key={name} className="pt-5 print:grid print:grid-cols-2 print:gap-x-[6mm]">
+                {name && (
+                  <h2 className="rule-b pb-1 text-lg font-bold print:col-span-2">
+                    {name}
+                    <span className="ps-3 text-sm font-normal text-ink-2">{text.cases(cases.length)}</span>
+                  </h2>
+                )}
+                <SheetCases setKey={setKey} cases={cases} look={lookOf(words)} />
+              </section>
+            ))}
+          </div>
+        </div>
       )}
     </Awaited>
   );

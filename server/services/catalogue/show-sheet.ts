@@ -2,12 +2,12 @@ import type { CatalogueSheetInput, CatalogueSheetView } from '#shared/contracts/
 import { notFound } from '../../http/problem.ts';
 import { asSignedIn, type Ctx } from '../context.ts';
 import { groupBy } from '../group-by.ts';
-import { casePicture } from './case-picture.ts';
 import { casesOfCatalogue } from './cases-of-catalogue.ts';
 import { orderOf } from './find-cases.ts';
 import { readAliases } from './read-aliases.ts';
 import { inNameOrder } from './read-edition.ts';
 import { readShownSet } from './read-shown-set.ts';
+import { pictureAndAufs } from './sheet-aufs.ts';
 
 /**
  * The algorithm sheet of an edition: every case that has an algorithm, by group and name.
@@ -38,9 +38,12 @@ export async function showSheet(ctx: Ctx, input: CatalogueSheetInput): Promise<C
             key: one.case.key,
             name: one.name,
             alias: one.alias,
-            picture: casePicture(set, one.case, one.algorithms[0]?.algorithm),
             prior: { weight: one.case.weight, total: set.total },
-            algorithms: one.algorithms.map(({ algorithm }) => algorithm),
+            ...pictureAndAufs(
+              set,
+              one.case,
+              one.algorithms.map(({ algorithm }) => algorithm),
+            ),
           })),
         })),
     };
