@@ -1,7 +1,7 @@
 import { aufText } from './auf.ts';
 import { numberText } from './numbers.ts';
 
-const { count, whole } = numberText;
+const { count, fraction, whole } = numberText;
 
 interface Turns {
   readonly before: number;
@@ -16,16 +16,6 @@ function turns({ before, after }: Turns): string {
   ]
     .filter(Boolean)
     .join(' with ');
-}
-
-function gcd(a: number, b: number): number {
-  return b === 0 ? a : gcd(b, a % b);
-}
-
-/** A prior in lowest terms, as 1/18 or 2/27. */
-function fraction({ weight, total }: { weight: number; total: number }): string {
-  const divisor = gcd(weight, total);
-  return `${whole(weight / divisor)}/${whole(total / divisor)}`;
 }
 
 /** Words of the Catalogue's page of a case. */
@@ -106,6 +96,9 @@ export const catalogueCaseText = {
     oriented: 'nothing to orient',
     permuted: 'nothing to permute',
     notDefined: 'not defined here',
+    /** Said of a case that has to be oriented first. */
+    otherPermutation:
+      'The permutation is that of the pieces as they lie. OLL algorithms permute pieces too, so the PLL that two looks leave can be another.',
     whyNot: 'The set tells how pieces are turned but not where they come from.',
   },
 

@@ -1,6 +1,6 @@
 import { numberText } from './numbers.ts';
 
-const { count, oneIn, percent, whole } = numberText;
+const { count, fraction, percent, whole } = numberText;
 
 const ASPECTS = {
   co: 'corner orientation',
@@ -44,7 +44,6 @@ export const setMakingText = {
     cases: (n: number) => (n === 1 ? 'case beside the skip' : 'cases beside the skip'),
     states: 'states reach the step',
     skip: 'solves skip it',
-    oneIn,
     whole,
     meet: (entry: string) => `All ways to arrive have in common: ${entry}.`,
     like: (name: string) => `The same cases as ${name}.`,
@@ -53,7 +52,7 @@ export const setMakingText = {
       'Algorithms come through Intake: an administrator brings a file in and publishes an edition.',
     classes: 'Cases by angles and prior',
     columns: { cases: 'cases', angles: 'angles', prior: 'prior', dealt: 'dealt once in' },
-    fraction: (weight: number, total: number) => `${whole(weight)}/${whole(total)}`,
+    fraction,
     once: (weight: number, total: number) =>
       (total / weight).toLocaleString('en-GB', { maximumFractionDigits: 2 }),
   },

@@ -99,7 +99,7 @@ it('brings in a file with two wrong lines, settles them, and publishes an editio
   await page.getByRole('heading', { level: 1, name: 'PLL, edition 2' }).waitFor();
   const cases = page.getByRole('table', { name: 'Cases of the edition' });
   expect(await cases.getByRole('row').count()).toBe(22);
-  expect(await cases.getByRole('row', { name: /\bT\b.*1 in 18/ }).textContent()).toContain(
+  expect(await cases.getByRole('row', { name: /\bT\b.*1\/18/ }).textContent()).toContain(
     'R U R′ U′ R′ F R2 U′ R′ U′ R U R′ F′',
   );
 

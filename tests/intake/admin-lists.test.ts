@@ -2,6 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { wrongPart } from '#pages/admin/intake/line-edit.tsx';
 import { isShown, SHOWS, showFrom } from '#pages/admin/intake/line-filter.ts';
 import { reportCsv } from '#pages/admin/intake/report-csv.ts';
+import { stepDone } from '#pages/admin/intake/step-done.ts';
 import { editionCsv } from '#pages/catalogue/edition/edition-csv.ts';
 import {
   type CaseRow,
@@ -14,6 +15,7 @@ import { pageOf } from '#renderer/page-links.tsx';
 import { queryHref } from '#renderer/query-href.ts';
 import type { DraftLine } from '#shared/contracts/intake.ts';
 import { catalogueText } from '#shared/text/catalogue.ts';
+import { intakeText } from '#shared/text/intake.ts';
 import { numberText } from '#shared/text/numbers.ts';
 
 function line(number: number, more: Partial<DraftLine> = {}): DraftLine {
@@ -150,6 +152,11 @@ it('says priors and aspects in words', () => {
   expect(numberText.oneIn({ weight: 16, total: 288 })).toBe('1 in 18');
   // 4/27 of OCLL's states: common practice.
   expect(numberText.oneIn({ weight: 4, total: 27 })).toBe('1 in 6.75');
+  expect(numberText.fraction({ weight: 16, total: 288 })).toBe('1/18');
+  expect(numberText.fraction({ weight: 4, total: 27 })).toBe('4/27');
+  // Lowest terms by the greatest common divisors, 4 and 16 (derived by hand).
+  expect(numberText.fraction({ weight: 76, total: 77_760 })).toBe('19/19,440');
+  expect(numberText.fraction({ weight: 16, total: 1296 })).toBe('1/81');
   const { aspects } = catalogueText.sets;
   expect(
     [['co', 'eo'], ['co', 'cp'], ['co', 'eo', 'cp'], ['co', 'eo', 'cp', 'ep'], ['ep']].map(aspects),
@@ -160,4 +167,15 @@ it('says priors and aspects in words', () => {
     'everything',
     'permutation of edges',
   ]);
+});
+
+describe('what is said after a step', () => {
+  it('tells taken, dropped, changed and taken back apart', () => {
+    const original = { caseName: 'T', algorithm: 'R' };
+    expect(stepDone({ decision: 'drop', original })).toBe('drop');
+    expect(stepDone({ decision: 'take', original: null })).toBe('take');
+    expect(stepDone({ decision: 'none', original })).toBe('edit');
+    expect(stepDone({ decision: 'none', original: null })).toBe('none');
+    expect(intakeText.draft.settled(5, 'drop', 0)).toBe('Line 5 is dropped. Nothing is left to settle.');
+  });
 });

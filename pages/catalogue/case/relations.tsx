@@ -42,6 +42,9 @@ export function Relations({ view }: { view: CatalogueCaseView }) {
           />
         )}
       </dl>
+      {permutation && orientation && !orientation.skip && (
+        <p className="pt-3 text-sm text-ink-2">{text.otherPermutation}</p>
+      )}
     </Section>
   );
 }

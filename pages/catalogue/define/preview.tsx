@@ -23,7 +23,7 @@ const COLUMNS: readonly Column<Class>[] = [
     header: text.columns.prior,
     align: 'end',
     nowrap: true,
-    cell: ({ prior }) => text.fraction(prior.weight, prior.total),
+    cell: ({ prior }) => text.fraction(prior),
   },
   {
     key: 'dealt',
@@ -65,7 +65,7 @@ function Counted({
           <BigNumbers>
             <BigNumber value={text.whole(counts.cases)} label={text.cases(counts.cases)} />
             <BigNumber tone="quiet" value={text.whole(counts.states)} label={text.states} />
-            <BigNumber tone="quiet" value={text.oneIn(counts.skip)} label={text.skip} />
+            <BigNumber tone="quiet" value={text.fraction(counts.skip)} label={text.skip} />
           </BigNumbers>
           <div className="text-ink-2">
             {mixed && <p>{text.meet(catalogueText.sets.entry(counts.entry))}</p>}

@@ -130,7 +130,7 @@ function columnsOf(
       sort: sort('prior'),
       className: 'lg:w-28 whitespace-nowrap',
       stacked: 'col-start-2 row-start-2 text-ink-2 lg:text-ink',
-      cell: ({ prior }) => numberText.oneIn(prior),
+      cell: ({ prior }) => numberText.fraction(prior),
     },
     {
       key: 'angles',

@@ -62,7 +62,7 @@ function SetHead({ view }: { view: CatalogueSetView }) {
       <div className="flex flex-wrap items-end justify-between gap-x-8 gap-y-4 pb-5">
         <BigNumbers>
           <BigNumber value={numberText.whole(cases)} label={text.cases(cases)} />
-          <BigNumber tone="quiet" value={numberText.oneIn(skip.prior)} label={text.skip} />
+          <BigNumber tone="quiet" value={numberText.fraction(skip.prior)} label={text.skip} />
           <BigNumber
             tone="quiet"
             value={text.withAlgorithm(withAlgorithm, cases)}
