@@ -55,11 +55,11 @@ export const catalogueSearchText = {
     moves: 'Moves',
     start: 'Start',
     back: 'Back',
-    on: 'On',
+    next: 'Next',
     end: 'End',
     atStart: (of: number) => `Before the first of ${of} moves.`,
     at: (n: number, of: number, move: string) => `After move ${n} of ${of}: ${move}.`,
-    keys: 'Arrow keys step, Home and End go to the ends.',
+    keys: 'Left and right arrow keys step. From one of these keys, Home and End go to the ends.',
     /** The moves button at the beginning. */
     before: 'start',
     holding: 'Side in view',

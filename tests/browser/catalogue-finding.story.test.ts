@@ -31,6 +31,16 @@ it('a pasted algorithm leads to its case, and is stepped through by keyboard', a
   );
   await page.keyboard.press('Home');
   expect(await seen()).toBe(begins);
+  // With the focus on nothing the arrows step all the same; in a field they are the field's own.
+  await page.evaluate(() => (document.activeElement as HTMLElement | null)?.blur());
+  await page.keyboard.press('ArrowRight');
+  await page.keyboard.press('ArrowRight');
+  expect(await says()).toMatch(/^After move 2 of /);
+  await page.getByLabel('Side in view').focus();
+  await page.keyboard.press('ArrowLeft');
+  expect(await says()).toMatch(/^After move 2 of /);
+  await steps.getByRole('button', { name: 'Next', exact: true }).click();
+  expect(await says()).toMatch(/^After move 3 of /);
 
   const mistaken = page.getByRole('region', { name: 'Mistaken for' });
   expect(await mistaken.getByRole('listitem').count()).toBe(6);

@@ -1,4 +1,4 @@
-import { type KeyboardEvent, useMemo, useRef, useState } from 'react';
+import { type KeyboardEvent, useEffect, useMemo, useRef, useState } from 'react';
 import { CubeView } from '#renderer/ui/cube-view.tsx';
 import { Button, cx, printedAlgorithm, Section, SelectField } from '#renderer/ui/index.ts';
 import type { CatalogueCaseView } from '#shared/contracts/catalogue-case.ts';
@@ -6,6 +6,7 @@ import type { Frame } from '#shared/lastlayer/facelets.ts';
 import type { Holding } from '#shared/lastlayer/pictures/index.ts';
 import { catalogueSearchText } from '#shared/text/catalogue-search.ts';
 import { framesOf } from './play.ts';
+import { stepAfter } from './step-keys.ts';
 
 const text = catalogueSearchText.steps;
 
@@ -50,13 +51,6 @@ export function Stepper({ view }: { view: CatalogueCaseView }) {
   );
 }
 
-const STEP_OF: Readonly<Record<string, (at: number, last: number) => number>> = {
-  ArrowLeft: (at) => at - 1,
-  ArrowRight: (at) => at + 1,
-  Home: () => 0,
-  End: (_at, last) => last,
-};
-
 /** The picture, the keys, and a key for every move. One of the moves is in the tab order: the one shown. */
 function Steps({ frames, holding }: { frames: readonly Frame[]; holding: Holding }) {
   const [at, setAt] = useState(0);
@@ -65,13 +59,23 @@ function Steps({ frames, holding }: { frames: readonly Frame[]; holding: Holding
   const frame = frames[at]!;
   const go = (to: number) => setAt(Math.max(0, Math.min(last, to)));
   const onKeyDown = (event: KeyboardEvent<HTMLElement>) => {
-    const step = STEP_OF[event.key];
-    if (!step || event.altKey || event.ctrlKey || event.metaKey) return;
+    const to = stepAfter(event, 'steps', at, last);
+    if (to === null) return;
     event.preventDefault();
-    const to = Math.max(0, Math.min(last, step(at, last)));
     setAt(to);
     if (moves.current?.contains(event.target as Node)) moves.current.querySelectorAll('button')[to]?.focus();
   };
+  useEffect(() => {
+    const onPageKey = (event: globalThis.KeyboardEvent) => {
+      if (event.defaultPrevented || event.target !== document.body) return;
+      const to = stepAfter(event, 'page', at, last);
+      if (to === null) return;
+      event.preventDefault();
+      setAt(to);
+    };
+    document.addEventListener('keydown', onPageKey);
+    return () => document.removeEventListener('keydown', onPageKey);
+  }, [at, last]);
   const says = frame.move ? text.at(at, last, printedAlgorithm(frame.move.text)) : text.atStart(last);
   return (
     <fieldset
@@ -111,7 +115,7 @@ function Steps({ frames, holding }: { frames: readonly Frame[]; holding: Holding
             {text.back}
           </Button>
           <Button size="small" onClick={() => go(at + 1)}>
-            {text.on}
+            {text.next}
           </Button>
           <Button kind="outlined" size="small" onClick={() => go(last)}>
             {text.end}
