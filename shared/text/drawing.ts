@@ -37,7 +37,7 @@ function says(problem: DrawingProblem): string {
 /** Words of the page where a case is drawn. */
 export const drawingText = {
   title: 'Find by drawing',
-  lead: 'Paint what you saw, as much of it as you know. Cases that look like it are found as you paint.',
+  lead: 'Paint as much as you know. Cases that look like it are found as you paint.',
   toDrawing: 'Find by drawing',
   says,
   colour: 'Colour',

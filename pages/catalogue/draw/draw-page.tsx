@@ -50,7 +50,7 @@ export function DrawPage() {
     <>
       <PageTitle title={text.title} lead={text.lead} />
       <div className="grid items-start gap-x-14 gap-y-8 lg:grid-cols-[21rem_minmax(0,1fr)] lg:grid-rows-[auto_1fr]">
-        <div className="screen-only flex flex-col gap-5">
+        <div className="screen-only flex flex-col gap-3 sm:gap-5">
           <PaintChoice value={paint} onChange={choose} />
           <DrawnAnswer view={query.data} />
           <PaintGrid drawing={drawing} wrong={wrongSites(query.data)} onPaint={onPaint} />
