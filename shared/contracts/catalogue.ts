@@ -90,7 +90,12 @@ export const setHead = {
   mix,
   toldApart: z.array(z.string()),
   solved: z.array(z.string()),
-  parent,
+  /** A club's own, not the installation's. */
+  ofClub: z.boolean(),
+  /** When it was retired; null for a set in use. */
+  retiredAt: z.number().nullable(),
+  /** The set whose editions serve this one, with how many cases it has beside the skip. */
+  parent: z.strictObject({ setKey: z.string(), name: z.string(), cases: z.int() }).nullable(),
 };
 
 /** What the catalogue's lists say of a case. */
@@ -131,6 +136,8 @@ export const catalogueSetView = z.strictObject({
   ),
   /** Whether the reader could retire the set, were it in no use. */
   retirable: z.boolean(),
+  /** What it is in use for, in a sentence, where the reader could retire it otherwise. */
+  inUse: z.string().nullable(),
   /** Key to go on from, and to go back from. */
   next: z.string().nullable(),
   previous: z.string().nullable(),

@@ -10,23 +10,24 @@ const list = (words: readonly string[]): string =>
 const problems = {
   whoDefines: 'Only a captain or an administrator can do this.',
   thisSet: 'This set',
-  taken: (name: string) => `There is a set called ${name} already.`,
+  taken: (name: string) => `There is a set called “${name}” already.`,
   tooMany: (most: number) => `A club can have ${most} sets of its own. Retire one first.`,
-  sameSet: (name: string) => `${name} is this very set already.`,
-  allOf: (name: string) => `These are all cases of ${name}: assign ${name} itself.`,
-  noCase: (name: string, key: string) => `${name} has no case ${key}.`,
-  tradeStays: (name: string) => `${name} is one of the trade’s own sets and stays.`,
-  notYours: (name: string) => `${name} belongs to all clubs: only an administrator can retire it.`,
-  retiredAlready: (name: string) => `${name} is retired already.`,
-  onProgramme: (name: string, clubs: number) =>
-    `${name} is on the programme of ${count(clubs, 'club', 'clubs')}. It has to be withdrawn there first.`,
-  hasEditions: (name: string) => `${name} has editions: what is published stays.`,
-  hasSubsets: (name: string, of: readonly string[]) =>
-    `${list(of)} ${of.length === 1 ? 'is' : 'are'} made of ${name}. Retire ${of.length === 1 ? 'it' : 'them'} first.`,
-  onBoard: (name: string) => `${name} is on a board that clubs share.`,
+  sameSet: (name: string) => `“${name}” is this very set already.`,
+  allOf: (name: string) => `These are all cases of “${name}”: assign that set itself.`,
+  noCase: (name: string, key: string) => `The set “${name}” has no case ${key}.`,
+  tradeStays: 'It is one of the trade’s own sets and stays.',
+  notYours: 'It belongs to all clubs: only an administrator can retire it.',
+  retiredAlready: 'It is retired already.',
+  onYourProgramme: 'It is on your programme: withdraw it there first.',
+  onProgrammes: (clubs: number) =>
+    `It is on the programme of ${count(clubs, 'club', 'clubs')}: it has to be withdrawn there first.`,
+  hasEditions: 'It has editions: what is published stays.',
+  hasSubsets: (of: readonly string[]) =>
+    `${of.length === 1 ? 'A set is' : 'Sets are'} made of it: ${list(of.map((name) => `“${name}”`))}. Retire ${of.length === 1 ? 'it' : 'them'} first.`,
+  onBoard: 'It is on a board that clubs share.',
   skipHasNone: 'The skip has no name to be changed.',
-  nameOfOther: (alias: string, name: string) => `${alias} is how ${name} is called already.`,
-  ownName: (alias: string) => `The case is called ${alias} already.`,
+  nameOfOther: (alias: string, name: string) => `“${alias}” is how ${name} is called already.`,
+  ownName: (alias: string) => `The case is called “${alias}” already.`,
 } as const;
 
 export const caseSetText = { problems } as const;

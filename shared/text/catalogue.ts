@@ -62,7 +62,8 @@ export const catalogueText = {
       if (all === 0) return entryWords(entry);
       return mix.map((one) => `${one.parts} of ${all} ${entryWords(one.entry)}`).join(', ');
     },
-    ofClub: 'a club’s own',
+    ofClub: (setKey: string | null) => (setKey === null ? 'a club’s own' : `a club’s own, key ${setKey}`),
+    retired: (name: string) => `“${name}” is retired`,
     madeOf: (name: string) => `from ${name}`,
     csv: 'Sets, CSV',
     csvFile: 'case-sets.csv',
@@ -89,7 +90,15 @@ export const catalogueText = {
     title: 'Case set',
     lead: (entry: string, toldApart: string, solved: string) =>
       `Reached with ${entry}. Told apart: ${toldApart}. Solved: ${solved}.`,
-    casesOf: 'Its cases are those of',
+    casesOf: (cases: number, of: number) =>
+      cases === of
+        ? 'Its cases are those of'
+        : `${numberText.whole(cases)} of the ${numberText.whole(of)} cases of`,
+    key: (setKey: string) => `Key ${setKey}: name it to the administrator who brings in its algorithms.`,
+    keyOnly: (setKey: string) => `A club’s own, key ${setKey}.`,
+    /** Before the day, and after it. */
+    retired: 'Retired on',
+    retiredDetail: 'it cannot be put on a programme any more.',
     cases: (n: number) => (n === 1 ? 'case beside the skip' : 'cases beside the skip'),
     skip: 'solves skip it',
     withAlgorithm: (n: number, of: number) => (n === of ? 'all' : `${numberText.whole(n)}`),

@@ -162,6 +162,9 @@ const list = {
   discarded: 'discarded',
 } as const;
 
+/** What a step does to a line. */
+const DONE = { take: 'taken', drop: 'dropped', none: 'taken back', edit: 'changed' } as const;
+
 const draft = {
   loading: 'Turning every algorithm on the cube',
   cannotLoad: 'The draft could not be loaded',
@@ -253,8 +256,8 @@ const draft = {
   dropped: 'Dropped',
   fileSaid: (words: string) => `the file said ${words}`,
   fileSaidNothing: 'nothing stood there in the file',
-  settled: (line: number, left: number) =>
-    `Line ${line} is written. ${left === 0 ? 'Nothing is left to settle.' : `${count(left, 'line is', 'lines are')} left to settle.`}`,
+  settled: (line: number, step: keyof typeof DONE, left: number) =>
+    `Line ${line} is ${DONE[step]}. ${left === 0 ? 'Nothing is left to settle.' : `${count(left, 'line is', 'lines are')} left to settle.`}`,
   stale: {
     title: 'Someone else was quicker',
     detail: 'It was read again. Your last step was not written.',
@@ -301,7 +304,7 @@ const draft = {
   openEdition: 'Open the edition',
 } as const;
 
-/** A club's own set, as the administrator's lists name it. */
-const ofAClub = (name: string) => `${name} (a club’s own)`;
+/** A club's own set, with its key: two clubs may have one of the same name. As the administrator's lists name it. */
+const ofAClub = (name: string, setKey: string) => `${name} (a club’s own, key ${setKey})`;
 
 export const intakeText = { ofAClub, says, hint, printed, grouped, problems, list, draft } as const;

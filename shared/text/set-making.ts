@@ -84,6 +84,7 @@ export const setMakingText = {
   },
   retire: {
     link: 'Retire the set',
+    cannot: 'It cannot be retired now',
     title: (name: string) => `Retire ${name}?`,
     body: 'It goes from every list and can be assigned no more. This cannot be undone.',
     keeps: 'Answers given through it and its figures stay.',
@@ -93,7 +94,7 @@ export const setMakingText = {
   alias: {
     open: (has: boolean) => (has ? 'Change your club’s name for it' : 'Give it a name of your club'),
     label: 'Your club’s name for the case',
-    hint: 'Up to 24 characters. It stands on Today, My cases and Squad, with the trade’s name beside it.',
+    hint: 'Up to 24 characters. It stands on Today, My cases, Squad and the algorithm sheet, in the Catalogue and its search, with the trade’s name beside it where there is room.',
     save: 'Save the name',
     saving: 'Saving',
     saved: 'Saved.',

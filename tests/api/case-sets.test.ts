@@ -71,7 +71,7 @@ describe('looking at a definition before it is made', () => {
   it('names the set that a definition is already, and the one that serves a mix', async () => {
     const { captain } = await club();
     const same = await preview(captain.claims, 'entries=any&toldApart=co,eo&solved=co,eo');
-    expect(same.body).toMatchObject({ problem: 'OLL is this very set already.', like: 'OLL' });
+    expect(same.body).toMatchObject({ problem: '“OLL” is this very set already.', like: 'OLL' });
     const mix = await preview(captain.claims, 'entries=any:3,eo:2&toldApart=co,eo&solved=co,eo');
     expect(mix.body).toMatchObject({ problem: null, algorithmsFrom: { setKey: 'oll', name: 'OLL' } });
   });
@@ -269,12 +269,17 @@ describe('algorithms of a club’s own set', () => {
     const { body: intake } = await api.as(administrator.claims).get('/api/admin/intake');
     const listed = (intake as IntakeView).sets.find((set) => set.setKey === setKey);
     // Three ways to flip an even number of four edges beside none, from every side (common practice).
-    expect(listed).toMatchObject({ name: 'Edges alone (a club’s own)', cases: 3, newestEdition: null });
+    expect(listed).toMatchObject({
+      name: `Edges alone (a club’s own, key ${setKey})`,
+      cases: 3,
+      newestEdition: null,
+    });
     // From memory; that it leaves the corners as they are and flips two edges is proved by the draft's finding.
     const csv = "case,algorithm\nline,R U R' U' M' U R U' r'\n";
     const sent = await upload(administrator, csv, { setKey });
     expect(sent.status).toBe(200);
     const draft = await read(administrator, sent.body.draftId);
+    expect(draft.draft.setName).toBe(`Edges alone (a club’s own, key ${setKey})`);
     expect(draft.lines).toMatchObject([{ finding: 'agrees', solves: 'line' }]);
     expect((await publish(administrator, draft)).body).toEqual({ setKey, edition: 1 });
     await api.factory.assign(made, setKey);
@@ -359,7 +364,7 @@ describe('retiring a set', () => {
     const forAll = await define({ claims }, edgesOnly('Edges for all'));
     await api.factory.assign(await api.factory.club(), forAll);
     for (const [who, setKey, says] of [
-      [captain.claims, onProgramme, 'programme of 1 club'],
+      [captain.claims, onProgramme, 'It is on your programme: withdraw it there first.'],
       [captain.claims, whole, 'Three of them'],
       [claims, forAll, 'programme of 1 club'],
       [claims, 'zbll', 'the trade’s own'],
@@ -368,6 +373,29 @@ describe('retiring a set', () => {
       expect(res.status).toBe(409);
       expect(res.body.detail).toContain(says);
     }
+    // The set's own page knows it before anyone asks.
+    const page = await api.as(captain.claims).get(`/api/catalogue/sets/${onProgramme}`);
+    expect(page.body).toMatchObject({
+      retirable: true,
+      inUse: 'It is on your programme: withdraw it there first.',
+    });
+  });
+
+  it('is told on its page, which still opens, with how much of its whole it is', async () => {
+    const { captain } = await club();
+    const setKey = await define(captain, edgesOnly());
+    const page = async () => (await api.as(captain.claims).get(`/api/catalogue/sets/${setKey}`)).body;
+    expect(await page()).toMatchObject({
+      ofClub: true,
+      retiredAt: null,
+      retirable: true,
+      inUse: null,
+      cases: 4,
+      // 21 permutations beside the skip (common practice).
+      parent: { setKey: 'pll', name: 'PLL', cases: 21 },
+    });
+    expect((await retire(captain.claims, setKey)).status).toBe(200);
+    expect(await page()).toMatchObject({ retiredAt: expect.any(Number), retirable: false, inUse: null });
   });
 
   it('is for the club’s captain; everyone’s sets are an administrator’s', async () => {

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { readDefinition, sharesOf, writeDefinition } from '#pages/catalogue/define/definition.ts';
+import { readDefinition, sharesOf, wholeOf, writeDefinition } from '#pages/catalogue/define/definition.ts';
+import { stillWrong, wrongShares } from '#pages/catalogue/define/wrong.ts';
 import {
   type CaseChoice,
   dealtShare,
@@ -42,6 +43,11 @@ describe('cases to choose from', () => {
     expect(groupCases(CASES, null)).toHaveLength(1);
   });
 
+  it('stand in the order of their names, as people count', () => {
+    const cases = ['T 10', 'T 2', 'T 1'].map((name) => choice(name, { group: 'T' }));
+    expect(groupCases(cases, 'group')[0]?.cases.map(({ name }) => name)).toEqual(['T 1', 'T 2', 'T 10']);
+  });
+
   it('are taken and left as a group, the others staying as they are', () => {
     const chosen = withCases(new Set(['c']), CASES.slice(0, 2), true);
     expect([...chosen].sort()).toEqual(['a', 'b', 'c']);
@@ -77,5 +83,32 @@ describe('a definition in an address', () => {
       { entry: 'eo', parts: 1 },
       { entry: 'co', parts: 1 },
     ]);
+  });
+});
+
+describe('what is wrong with a definition', () => {
+  const typed = (...parts: string[]) => ({
+    entries: parts.map((one, at) => ({ entry: (['any', 'eo', 'co'] as const)[at] ?? 'any', parts: one })),
+    toldApart: [],
+    solved: [],
+  });
+
+  it('is each share that is no number from 1 to 1000; there is no whole then', () => {
+    expect(wrongShares(typed('40', 'x', '0')).map(({ fieldId }) => fieldId)).toEqual([
+      'define-parts-1',
+      'define-parts-2',
+    ]);
+    expect(wrongShares(typed('x'))).toEqual([]);
+    expect(wholeOf(typed('40', 'x').entries)).toBeNull();
+    expect(wholeOf(typed('40', '60').entries)).toBe(100);
+  });
+
+  it('goes when it is mended, and no complaint comes before one was made', () => {
+    const name = { fieldId: 'define-name', message: 'Taken.' };
+    const told = { fieldId: 'define-told', message: 'It is that set.' };
+    const shares = wrongShares(typed('x', '2'));
+    expect(stillWrong([name, told, ...shares], typed('x', '3'))).toEqual([name, ...shares]);
+    expect(stillWrong([name, ...shares], typed('1', '3'))).toEqual([name]);
+    expect(stillWrong([told], typed('x', '3'))).toEqual([]);
   });
 });

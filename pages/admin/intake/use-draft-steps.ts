@@ -5,6 +5,7 @@ import { endpoints } from '#shared/contracts/endpoints.ts';
 import type { DraftView, SettleLineInput } from '#shared/contracts/intake.ts';
 import { intakeText } from '#shared/text/intake.ts';
 import { isBlocking } from './line-filter.ts';
+import { stepDone } from './step-done.ts';
 
 export type Step = Pick<SettleLineInput, 'line' | 'decision' | 'caseName' | 'algorithm'>;
 
@@ -50,7 +51,9 @@ export function useDraftSteps({ draft, version }: DraftView): DraftSteps {
   const settling = useSend(endpoints.settleLine, {
     onDone: (view, { line }) => {
       store.put(endpoints.draft, { draftId }, view);
-      setSaid(intakeText.draft.settled(line, view.lines.filter(isBlocking).length));
+      const settled = view.lines.find((one) => one.line === line);
+      const step = settled ? stepDone(settled) : 'none';
+      setSaid(intakeText.draft.settled(line, step, view.lines.filter(isBlocking).length));
     },
   });
   const publishing = useSend(endpoints.publish, {

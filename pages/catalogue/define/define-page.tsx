@@ -6,16 +6,12 @@ import { Button, ErrorSummary, PageTitle, TextField, TextLink } from '#renderer/
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { setMakingText } from '#shared/text/set-making.ts';
 import { AspectChoices } from './aspect-choices.tsx';
-import { type Definition, isShare, readDefinition, sharesOf, writeDefinition } from './definition.ts';
+import { type Definition, readDefinition, sharesOf, writeDefinition } from './definition.ts';
 import { EntryFields } from './entry-fields.tsx';
 import { Preview } from './preview.tsx';
+import { stillWrong, type Wrong, wrongShares } from './wrong.ts';
 
 const text = setMakingText.define;
-
-interface Wrong {
-  readonly fieldId: string;
-  readonly message: string;
-}
 
 /** A set is defined: its entries, what is told apart and solved, with what that comes to beside. */
 export function DefinePage() {
@@ -37,15 +33,13 @@ export function DefinePage() {
   const change = (part: Partial<Definition>) => {
     const next = { ...definition, ...part };
     setDefinition(next);
+    setWrong((all) => stillWrong(all, next));
     setSearch(writeDefinition(next), { replace: true, preventScrollReset: true });
   };
   const submit = (event: FormEvent) => {
     event.preventDefault();
     if (send.isPending) return;
-    const mixed = definition.entries.length > 1;
-    const shares = definition.entries.flatMap(({ parts }, at) =>
-      mixed && !isShare(parts) ? [{ fieldId: `define-parts-${at}`, message: text.partsWrong }] : [],
-    );
+    const shares = wrongShares(definition);
     setWrong(shares);
     if (shares.length > 0) return;
     const { toldApart, solved } = definition;
@@ -83,7 +77,10 @@ export function DefinePage() {
             maxLength={40}
             error={errorAt('define-name')}
             value={name}
-            onChange={(event) => setName(event.currentTarget.value)}
+            onChange={(event) => {
+              setName(event.currentTarget.value);
+              setWrong((all) => all.filter(({ fieldId }) => fieldId !== 'define-name'));
+            }}
           />
           <EntryFields
             entries={definition.entries}

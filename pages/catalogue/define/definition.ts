@@ -55,6 +55,13 @@ export function isShare(typed: string): boolean {
   return /^\d{1,4}$/.test(typed) && Number(typed) >= 1 && Number(typed) <= 1000;
 }
 
+/** What the shares are parts of: their sum; null while one of them is none yet. */
+export function wholeOf(entries: Definition['entries']): number | null {
+  return entries.every(({ parts }) => isShare(parts))
+    ? entries.reduce((sum, { parts }) => sum + Number(parts), 0)
+    : null;
+}
+
 /** The definition as addresses and the preview write it; shares that are none yet count as 1. */
 export function writeDefinition({ entries, toldApart, solved }: Definition): PreviewSetInput {
   return {

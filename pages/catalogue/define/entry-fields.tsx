@@ -1,7 +1,7 @@
 import { Button, SelectField, TextField } from '#renderer/ui/index.ts';
 import { catalogueText } from '#shared/text/catalogue.ts';
 import { setMakingText } from '#shared/text/set-making.ts';
-import { type Definition, ENTRIES, isShare } from './definition.ts';
+import { type Definition, ENTRIES, wholeOf } from './definition.ts';
 
 const text = setMakingText.define;
 const { entry: inWords } = catalogueText.sets;
@@ -18,7 +18,7 @@ export function EntryFields({
   onChange(entries: Entries): void;
 }) {
   const mixed = entries.length > 1;
-  const all = entries.reduce((sum, { parts }) => sum + (isShare(parts) ? Number(parts) : 0), 0);
+  const all = wholeOf(entries);
   const taken = new Set(entries.map(({ entry }) => entry));
   const free = ENTRIES.find((entry) => !taken.has(entry));
   const replace = (at: number, part: Partial<Entries[number]>) =>
@@ -51,7 +51,7 @@ export function EntryFields({
               <TextField
                 id={`define-parts-${at}`}
                 label={text.parts(at + 1)}
-                hint={isShare(parts) && all > 0 ? text.share(Number(parts) / all) : undefined}
+                hint={all === null ? undefined : text.share(Number(parts) / all)}
                 error={errorAt(at)}
                 inputMode="numeric"
                 autoComplete="off"

@@ -2,7 +2,7 @@ import { useState } from 'react';
 import { useNavigate } from 'react-router';
 import { useSend, useStore } from '#renderer/api.ts';
 import { useSession } from '#renderer/session.tsx';
-import { Button, ConfirmDialog, LinkButton } from '#renderer/ui/index.ts';
+import { Button, ConfirmDialog, LinkButton, Notice } from '#renderer/ui/index.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { setMakingText } from '#shared/text/set-making.ts';
 
@@ -12,42 +12,58 @@ const text = setMakingText.retire;
 export function SetActions({
   setKey,
   name,
+  retired,
   retirable,
+  inUse,
 }: {
   setKey: string;
   name: string;
+  retired: boolean;
   retirable: boolean;
+  /** What it is in use for, in a sentence. */
+  inUse: string | null;
 }) {
   const { role } = useSession();
-  if (role === 'member') return null;
+  if (role === 'member' || retired) return null;
   return (
     <>
       <LinkButton kind="outlined" href={`/catalogue/${setKey}/subset`}>
         {setMakingText.subset.link}
       </LinkButton>
-      {retirable && <Retire setKey={setKey} name={name} />}
+      {retirable && <Retire setKey={setKey} name={name} inUse={inUse} />}
     </>
   );
 }
 
-/** Asks before a set is retired, and says what stays. */
-function Retire({ setKey, name }: { setKey: string; name: string }) {
+/** Says what stands in the way of retiring a set; where nothing does, asks first and says what stays. */
+function Retire({ setKey, name, inUse }: { setKey: string; name: string; inUse: string | null }) {
   const [asking, setAsking] = useState(false);
   const navigate = useNavigate();
   const store = useStore();
   const send = useSend(endpoints.retireSet, {
     onDone: () => {
       void store.refresh(endpoints.catalogue);
-      void navigate('/catalogue');
+      void store.refresh(endpoints.catalogueSet);
+      void navigate('/catalogue', { state: { retired: name } });
     },
   });
+  const ask = () => {
+    setAsking(true);
+    // It may have been withdrawn since the page was read.
+    if (inUse !== null) void store.refresh(endpoints.catalogueSet);
+  };
   return (
     <>
-      <Button kind="outlined" tone="rose" onClick={() => setAsking(true)}>
+      <Button kind="outlined" tone="rose" onClick={ask}>
         {text.link}
       </Button>
+      {asking && inUse !== null && (
+        <Notice tone="ochre" title={text.cannot} live>
+          <p>{inUse}</p>
+        </Notice>
+      )}
       <ConfirmDialog
-        open={asking}
+        open={asking && inUse === null}
         title={text.title(name)}
         confirmLabel={text.confirm}
         cancelLabel={text.cancel}

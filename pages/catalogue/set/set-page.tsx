@@ -2,7 +2,9 @@ import { useEffect } from 'react';
 import { useParams, useSearchParams } from 'react-router';
 import { useCall } from '#renderer/api.ts';
 import { Awaited } from '#renderer/awaited.tsx';
-import { BigNumber, BigNumbers, LinkButton, PageTitle, TextLink } from '#renderer/ui/index.ts';
+import { Instant } from '#renderer/instant.tsx';
+import { useSession } from '#renderer/session.tsx';
+import { BigNumber, BigNumbers, LinkButton, Notice, PageTitle, TextLink } from '#renderer/ui/index.ts';
 import type { CatalogueSetView } from '#shared/contracts/catalogue.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { catalogueText } from '#shared/text/catalogue.ts';
@@ -57,8 +59,23 @@ function SetHead({ view }: { view: CatalogueSetView }) {
           </LinkButton>
         )}
         <CasesCsvButton setKey={setKey} />
-        <SetActions setKey={setKey} name={setName} retirable={view.retirable} />
+        <SetActions
+          setKey={setKey}
+          name={setName}
+          retired={view.retiredAt !== null}
+          retirable={view.retirable}
+          inUse={view.inUse}
+        />
       </PageTitle>
+      {view.retiredAt !== null && (
+        <div className="pb-5">
+          <Notice tone="ochre">
+            <p>
+              {text.retired} <Instant at={view.retiredAt} />: {text.retiredDetail}
+            </p>
+          </Notice>
+        </div>
+      )}
       <div className="flex flex-wrap items-end justify-between gap-x-8 gap-y-4 pb-5">
         <BigNumbers>
           <BigNumber value={numberText.whole(cases)} label={text.cases(cases)} />
@@ -75,7 +92,9 @@ function SetHead({ view }: { view: CatalogueSetView }) {
   );
 }
 
-function SetLead({ view: { entry, mix, toldApart, solved, parent } }: { view: CatalogueSetView }) {
+function SetLead({ view }: { view: CatalogueSetView }) {
+  const { setKey, entry, mix, toldApart, solved, ofClub, retiredAt, cases, parent } = view;
+  const { role } = useSession();
   const { entryOrMix, aspects } = catalogueText.sets;
   return (
     <>
@@ -83,9 +102,12 @@ function SetLead({ view: { entry, mix, toldApart, solved, parent } }: { view: Ca
       {parent && (
         <>
           {' '}
-          {text.casesOf} <TextLink href={`/catalogue/${parent.setKey}`}>{parent.name}</TextLink>.
+          {text.casesOf(cases, parent.cases)}{' '}
+          <TextLink href={`/catalogue/${parent.setKey}`}>{parent.name}</TextLink>.
         </>
       )}
+      {role === 'captain' && ofClub && parent === null && retiredAt === null && <> {text.key(setKey)}</>}
+      {role === 'administrator' && ofClub && <> {text.keyOnly(setKey)}</>}
     </>
   );
 }

@@ -1,9 +1,9 @@
-import { useSearchParams } from 'react-router';
+import { useLocation, useSearchParams } from 'react-router';
 import { useCall } from '#renderer/api.ts';
 import { Awaited } from '#renderer/awaited.tsx';
 import { downloadCsv } from '#renderer/csv.ts';
 import { useSession } from '#renderer/session.tsx';
-import { Button, LinkButton, PageTitle } from '#renderer/ui/index.ts';
+import { Button, LinkButton, Notice, PageTitle } from '#renderer/ui/index.ts';
 import { endpoints } from '#shared/contracts/endpoints.ts';
 import { catalogueText } from '#shared/text/catalogue.ts';
 import { drawingText } from '#shared/text/drawing.ts';
@@ -22,6 +22,7 @@ export function SetsPage() {
   const query = useCall(endpoints.catalogue, {});
   const [search] = useSearchParams();
   const sought = searchInput(search.get('q'));
+  const retired = retiredIn(useLocation().state);
   return (
     <>
       <PageTitle title={text.title} lead={text.lead}>
@@ -47,6 +48,11 @@ export function SetsPage() {
           </LinkButton>
         )}
       </PageTitle>
+      {retired !== null && (
+        <div className="pb-5">
+          <Notice title={text.retired(retired)} live />
+        </div>
+      )}
       <SearchBox q={sought?.q ?? ''} />
       {sought ? (
         <SearchResults input={sought} />
@@ -55,4 +61,10 @@ export function SetsPage() {
       )}
     </>
   );
+}
+
+/** The name of the set that was retired just before this page was come to. */
+function retiredIn(state: unknown): string | null {
+  const named = typeof state === 'object' && state !== null && 'retired' in state ? state.retired : null;
+  return typeof named === 'string' ? named : null;
 }

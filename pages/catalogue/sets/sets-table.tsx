@@ -2,6 +2,7 @@ import { useLocation, useSearchParams } from 'react-router';
 import { Instant } from '#renderer/instant.tsx';
 import { type LedgerColumn, LedgerTable } from '#renderer/ledger-table.tsx';
 import { queryHref } from '#renderer/query-href.ts';
+import { useSession } from '#renderer/session.tsx';
 import { TextLink } from '#renderer/ui/index.ts';
 import { catalogueText } from '#shared/text/catalogue.ts';
 import { numberText } from '#shared/text/numbers.ts';
@@ -92,7 +93,10 @@ function columnsWith(sort: (by: SetSort) => LedgerColumn<SetRow>['sort']): reado
 }
 
 function SetName({ set: { setKey, name, ofClub, parent } }: { set: SetRow }) {
-  const says = [ofClub ? text.ofClub : '', parent ? text.madeOf(parent.name) : ''].filter(Boolean).join(', ');
+  // Two clubs may have sets of one name: whoever sees both sees their keys.
+  const { role } = useSession();
+  const own = ofClub ? text.ofClub(role === 'administrator' ? setKey : null) : '';
+  const says = [own, parent ? text.madeOf(parent.name) : ''].filter(Boolean).join(', ');
   return (
     <>
       <TextLink

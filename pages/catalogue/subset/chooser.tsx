@@ -35,6 +35,11 @@ export function Chooser({ view }: { view: CaseChoices }) {
   const groups = groupCases(view.cases, by);
   const known = view.cases.filter((c) => c.known);
 
+  /** What is chosen anew; what was wrong with the choice before is gone with it. */
+  const choose = (next: ReadonlySet<string>) => {
+    setChosen(next);
+    setWrong((all) => all.filter(({ fieldId }) => fieldId !== 'subset-all'));
+  };
   const submit = (event: FormEvent) => {
     event.preventDefault();
     if (send.isPending) return;
@@ -69,18 +74,14 @@ export function Chooser({ view }: { view: CaseChoices }) {
               />
             </div>
           )}
-          <Button
-            id="subset-all"
-            kind="outlined"
-            onClick={() => setChosen(withCases(chosen, view.cases, true))}
-          >
+          <Button id="subset-all" kind="outlined" onClick={() => choose(withCases(chosen, view.cases, true))}>
             {text.all}
           </Button>
-          <Button kind="outlined" onClick={() => setChosen(new Set())}>
+          <Button kind="outlined" onClick={() => choose(new Set())}>
             {text.none}
           </Button>
           {known.length > 0 && known.length < view.cases.length && (
-            <Button kind="outlined" onClick={() => setChosen(withCases(new Set(), known, true))}>
+            <Button kind="outlined" onClick={() => choose(withCases(new Set(), known, true))}>
               {text.known}
             </Button>
           )}
@@ -92,7 +93,7 @@ export function Chooser({ view }: { view: CaseChoices }) {
               group={group}
               alone={groups.length === 1}
               chosen={chosen}
-              onTake={(cases, take) => setChosen(withCases(chosen, cases, take))}
+              onTake={(cases, take) => choose(withCases(chosen, cases, take))}
             />
           ))}
         </ul>
@@ -111,7 +112,10 @@ export function Chooser({ view }: { view: CaseChoices }) {
           maxLength={40}
           error={wrong.find(({ fieldId }) => fieldId === 'subset-name')?.message}
           value={name}
-          onChange={(event) => setName(event.currentTarget.value)}
+          onChange={(event) => {
+            setName(event.currentTarget.value);
+            setWrong((all) => all.filter(({ fieldId }) => fieldId !== 'subset-name'));
+          }}
         />
         <p>
           <Button type="submit" busy={send.isPending}>

@@ -19,7 +19,7 @@ export interface CaseGroup {
   readonly cases: readonly CaseChoice[];
 }
 
-/** The cases by group, in the order of the groups' names, those without a group last. */
+/** The cases by group, in the order of the groups' names, those without a group last; within each by name. */
 export function groupCases(cases: readonly CaseChoice[], by: Grouping | null): CaseGroup[] {
   const groups = new Map<string, CaseChoice[]>();
   for (const c of cases) {
@@ -29,7 +29,7 @@ export function groupCases(cases: readonly CaseChoice[], by: Grouping | null): C
     else groups.set(name, [c]);
   }
   return [...groups]
-    .map(([name, of]) => ({ name, cases: of }))
+    .map(([name, of]) => ({ name, cases: of.sort((one, other) => inOrder.compare(one.name, other.name)) }))
     .sort(
       (one, other) =>
         Number(one.name === '') - Number(other.name === '') || inOrder.compare(one.name, other.name),

@@ -2,9 +2,10 @@ import type { SearchInput, SearchView } from '#shared/contracts/catalogue-search
 import { readAlgorithm } from '#shared/lastlayer/index.ts';
 import { asSignedIn, type Ctx } from '../context.ts';
 import { type CaseOfCatalogue, casesOfCatalogue } from './cases-of-catalogue.ts';
-import { filterCases } from './find-cases.ts';
+import { type Match, matchWords, RANKS } from './match-words.ts';
 import { readAliases } from './read-aliases.ts';
 import { readAllSets } from './read-all-sets.ts';
+import { inNameOrder } from './read-edition.ts';
 import type { ShownSet } from './read-shown-set.ts';
 import { referencesIn } from './refer-to-case.ts';
 import { searchMoves } from './search-moves.ts';
@@ -20,7 +21,7 @@ export async function searchCatalogue(ctx: Ctx, { q }: SearchInput): Promise<Sea
     const sets = await readAllSets(tx);
     const aliases = await readAliases(tx, actor);
     const found = sets.flatMap((shown) => foundIn(shown, q, aliases));
-    found.sort((one, other) => one.rank - other.rank);
+    found.sort((one, other) => RANKS.indexOf(one.rank) - RANKS.indexOf(other.rank));
     const moves = searchMoves(q, sets, aliases);
     return {
       q,
@@ -41,38 +42,18 @@ function beginsWithMoves(q: string, { column, token }: { column: number; token: 
   return 'normalised' in read && read.normalised.split(' ').length > 1;
 }
 
-interface Found {
+interface Found extends Match {
   readonly shown: ShownSet;
   readonly one: CaseOfCatalogue;
-  readonly algorithm: string | null;
-  /** 0: called exactly so; 1: the words are in its name, or are its number; 2: in its group; 3: in an algorithm. */
-  readonly rank: 0 | 1 | 2 | 3;
 }
-
-/** From this many letters on, words may stand inside others: a T is no Antisune. */
-const LETTERS_INSIDE = 3;
-const unspaced = (moves: string): string => moves.replaceAll(/[’′‘`´]/gu, "'").replaceAll(/\s+/gu, '');
 
 function foundIn(shown: ShownSet, q: string, aliases: ReadonlyMap<string, string>): readonly Found[] {
   const { set, content } = shown;
-  const cases = casesOfCatalogue(set, content, aliases);
-  const exact = set.byName(q)?.key;
-  const words = q.toLowerCase();
-  const has = (text: string | null): boolean => {
-    const letters = text?.toLowerCase() ?? '';
-    return words.length < LETTERS_INSIDE ? letters.split(/\s/u).includes(words) : letters.includes(words);
-  };
-  const wanted = [
-    ...cases.filter((one) => one.case.key === exact),
-    ...filterCases(cases, { q }).filter((one) => one.case.key !== exact),
-  ];
-  return wanted.flatMap((one): Found[] => {
-    const found = (rank: Found['rank'], algorithm: string | null = null) => [{ shown, one, algorithm, rank }];
-    if (one.case.key === exact || one.alias?.toLowerCase() === words) return found(0);
-    if (has(one.name) || has(one.alias) || String(one.case.number) === words.replace('#', ''))
-      return found(1);
-    if (has(one.group)) return found(2);
-    const algorithm = one.algorithms.find(({ algorithm: text }) => unspaced(text).includes(unspaced(q)));
-    return algorithm && words.length >= LETTERS_INSIDE ? found(3, algorithm.algorithm) : [];
-  });
+  const asked = { q, setName: set.definition.name, exactKey: set.byName(q)?.key };
+  return casesOfCatalogue(set, content, aliases)
+    .flatMap((one): Found[] => {
+      const match = matchWords(one, asked);
+      return match ? [{ shown, one, ...match }] : [];
+    })
+    .sort((one, other) => inNameOrder(one.one.name, other.one.name));
 }

@@ -11,6 +11,7 @@ export interface SetRow {
   /** null: the installation's. */
   readonly clubId: string | null;
   readonly retired: boolean;
+  readonly retiredAt: Date | null;
 }
 
 type Stored = typeof tables.caseSet.$inferSelect;
@@ -27,6 +28,7 @@ export async function readSetRow(tx: Transaction, setKey: string): Promise<SetRo
     parentKey: row.parentKey,
     clubId: row.clubId,
     retired: row.retiredAt !== null,
+    retiredAt: row.retiredAt,
   };
 }
 

@@ -1,5 +1,6 @@
 import type { CatalogueSetInput, CatalogueSetView } from '#shared/contracts/catalogue.ts';
 import { mayRetire } from '../case-sets/may-retire.ts';
+import { whatFor } from '../case-sets/what-for.ts';
 import { asSignedIn, type Ctx } from '../context.ts';
 import { casePicture } from './case-picture.ts';
 import { type CaseOfCatalogue, caseOfCatalogue, casesOfCatalogue } from './cases-of-catalogue.ts';
@@ -26,6 +27,7 @@ export async function showSet(ctx: Ctx, input: CatalogueSetInput): Promise<Catal
       const c = key === undefined ? undefined : set.byKey(key);
       return c && caseOfCatalogue(c, content, aliases);
     };
+    const retirable = await mayRetire(tx, actor, input.setKey);
     const page = pageOfCases(found, order, { after: at(input.after), before: at(input.before), size: PAGE });
     return {
       ...(await presentSet(tx, shown)),
@@ -47,7 +49,8 @@ export async function showSet(ctx: Ctx, input: CatalogueSetInput): Promise<Catal
         algorithm: one.algorithms[0]?.algorithm ?? null,
         algorithms: one.algorithms.length,
       })),
-      retirable: await mayRetire(tx, actor, input.setKey),
+      retirable,
+      inUse: retirable ? await whatFor(tx, input.setKey, actor?.clubId ?? null) : null,
       next: page.next,
       previous: page.previous,
     };

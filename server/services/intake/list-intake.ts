@@ -35,7 +35,7 @@ export async function intakeView(tx: Transaction): Promise<IntakeView> {
       .sort((one, other) => inTradeOrder(one.setKey, other.setKey))
       .map(({ clubId, name, ...set }) => ({
         ...set,
-        name: clubId === null ? name : intakeText.ofAClub(name),
+        name: clubId === null ? name : intakeText.ofAClub(name, set.setKey),
         newestEdition: newest.get(set.setKey) ?? null,
       })),
     drafts: await readDraftSummaries(tx, MOST_DRAFTS),

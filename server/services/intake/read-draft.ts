@@ -21,6 +21,7 @@ const SUMMARY = {
   draftId: intakeDraft.draftId,
   setKey: intakeDraft.setKey,
   setName: caseSet.name,
+  clubId: caseSet.clubId,
   fileName: intakeDraft.fileName,
   state: intakeDraft.state,
   lines: sql<number>`(select count(*)::int from intake_line l where l.draft_id = intake_draft.draft_id)`,
@@ -36,7 +37,7 @@ export async function readDraftSummaries(tx: Transaction, most: number): Promise
     .innerJoin(caseSet, eq(caseSet.setKey, intakeDraft.setKey))
     .orderBy(sql`${intakeDraft.state} <> 'open'`, desc(intakeDraft.createdAt), asc(intakeDraft.draftId))
     .limit(most);
-  return rows.map((row) => ({ ...row, createdAt: row.createdAt.getTime() }));
+  return rows.map(summaryOf);
 }
 
 /**
@@ -70,7 +71,16 @@ export async function readDraft(
     .from(intakeLine)
     .where(eq(intakeLine.draftId, draftId))
     .orderBy(asc(intakeLine.line));
-  return { ...row, createdAt: row.createdAt.getTime(), kept };
+  return { ...summaryOf(row), kept };
+}
+
+/** A row as its readers have it: a club's own set by name and key. */
+function summaryOf<Row extends { clubId: string | null; setKey: string; setName: string; createdAt: Date }>({
+  clubId,
+  ...row
+}: Row) {
+  const setName = clubId === null ? row.setName : intakeText.ofAClub(row.setName, row.setKey);
+  return { ...row, setName, createdAt: row.createdAt.getTime() };
 }
 
 /**
