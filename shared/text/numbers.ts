@@ -22,7 +22,7 @@ export const numberText = {
   /** A whole number, thousands set off. */
   whole,
   /** Some of a thing: `1 case`, `3,916 cases`. */
-  count: (n: number, one: string, many: string) => `${n.toLocaleString('en-GB')} ${n === 1 ? one : many}`,
+  count: (n: number, one: string, many: string) => `${whole(n)} ${n === 1 ? one : many}`,
   /** A change with its sign: `+2`, `−6`, `0`. */
   points: (n: number) => {
     const rounded = Math.round(n);
