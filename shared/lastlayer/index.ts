@@ -58,6 +58,7 @@ export {
   permutationOf,
   stabiliser,
 } from './relations.ts';
+export { requireDefinition } from './requirements.ts';
 export { type Look, type TwoLookRoute, twoLookRoutes } from './routes.ts';
 export { cancelledKey, sameAlgorithm } from './same-algorithm.ts';
 export { AlgorithmSyntaxError } from './scanner.ts';

@@ -209,6 +209,10 @@ describe('defining a set', () => {
       422,
       '/toldApart',
     );
+    const odd = { ...TWO_FACE, name: 'Nothing', toldApart: [], solved: [] };
+    expect((await api.as(captain.claims).post('/api/case-sets', odd)).body.errors).toEqual([
+      { pointer: '/toldApart', detail: expect.stringMatching(/^This set /u) },
+    ]);
     const mixed = [
       { entry: 'eo', parts: 1 },
       { entry: 'eo', parts: 2 },

@@ -9,7 +9,9 @@ import {
   isAspect,
   isEntry,
   meetOf,
+  requireDefinition,
 } from '#shared/lastlayer/index.ts';
+import { caseSetText } from '#shared/text/case-sets.ts';
 import { Problem } from '../../http/problem.ts';
 import type { Definer } from './as-definer.ts';
 
@@ -54,14 +56,17 @@ export function buildDefinition(
   { key, name }: { key: string; name: string },
   { entries, toldApart, solved }: Structure,
 ): CaseSet {
-  return buildCaseSet({
+  const definition = {
     key,
     name,
     entry: meetOf(entries.map(({ entry }) => entry)),
     mix: entries.length > 1 ? entries : [],
     toldApart: inOrder(toldApart),
     solved: inOrder(solved),
-  });
+  };
+  // A sentence that began with a name of somebody's choice could be read in any way.
+  requireDefinition({ ...definition, name: caseSetText.problems.thisSet });
+  return buildCaseSet(definition);
 }
 
 /**
