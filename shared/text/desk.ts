@@ -259,6 +259,8 @@ export const deskText = {
     whoEveryone: 'Everyone in the club',
     whoChosen: 'Chosen members',
     whoMembers: 'Members',
+    whoTickAll: 'Tick all',
+    whoTickNone: 'Tick none',
     problemTitle: 'This cannot be saved yet',
     limitMissing: 'Type a limit in seconds, like 3 or 2.5.',
     limitOutside: 'The limit lies between 0.5 and 60 seconds.',

@@ -60,10 +60,12 @@ it('hands a set to chosen members: only they find it in Today', async () => {
   expect(await oll.textContent()).toContain('everyone');
   await oll.getByRole('button', { name: 'Edit OLL' }).click();
   await page.getByRole('group', { name: 'Who answers' }).getByText('Chosen members').click();
-  // Nobody is chosen yet: said, and not saved.
-  await page.getByRole('button', { name: 'Save' }).click();
-  await page.getByRole('link', { name: 'Choose at least one member.' }).waitFor();
+  // All are ticked, so that one can be taken out. Nobody at all: said, and not saved.
   const members = page.getByRole('group', { name: 'Members' });
+  expect(await members.getByRole('checkbox', { checked: false }).count()).toBe(0);
+  await page.getByRole('button', { name: 'Tick none' }).click();
+  await page.getByRole('button', { name: 'Save' }).click();
+  await page.getByText('Choose at least one member.').first().waitFor();
   for (const name of ['Tobi', 'Ines']) await members.getByText(name, { exact: true }).click();
   expect(await members.getByRole('checkbox', { checked: true }).count()).toBe(2);
   await page.getByRole('button', { name: 'Save' }).click();

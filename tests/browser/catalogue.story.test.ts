@@ -62,7 +62,10 @@ it('a member goes through a set of thousands on the phone, page by page, and can
   expect(await names(other)).toEqual(seen);
   await other.getByRole('rowheader').first().getByRole('link').tap();
   // Oriented by OLL and permuted by PLL: the whole last layer has both.
-  await other.getByRole('region', { name: 'Related cases' }).getByText('permutation').waitFor();
+  await other
+    .getByRole('region', { name: 'Related cases' })
+    .getByText('permutation', { exact: true })
+    .waitFor();
 });
 
 it('filters and sorts without a script, by the plain form and plain links', async () => {

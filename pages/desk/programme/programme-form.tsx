@@ -116,20 +116,34 @@ export function ProgrammeForm(props: ProgrammeFormProps) {
         />
       </div>
       {!values.forEveryone && (
-        <ChoiceGroup
-          id={fieldId('members')}
-          name={`${id}-members`}
-          kind="many"
-          legend={text.whoMembers}
-          error={wrong.members}
-          choices={members.map(({ memberId, nickname }) => ({ value: memberId, label: nickname }))}
-          value={values.memberIds}
-          onChange={(event) => {
-            const { checked, value } = event.currentTarget;
-            const others = values.memberIds.filter((memberId) => memberId !== value);
-            change({ memberIds: checked ? [...others, value] : others });
-          }}
-        />
+        <div className="space-y-2">
+          <ChoiceGroup
+            id={fieldId('members')}
+            name={`${id}-members`}
+            kind="many"
+            legend={text.whoMembers}
+            error={wrong.members}
+            choices={members.map(({ memberId, nickname }) => ({ value: memberId, label: nickname }))}
+            value={values.memberIds}
+            onChange={(event) => {
+              const { checked, value } = event.currentTarget;
+              const others = values.memberIds.filter((memberId) => memberId !== value);
+              change({ memberIds: checked ? [...others, value] : others });
+            }}
+          />
+          <div className="flex flex-wrap gap-3">
+            <Button
+              kind="plain"
+              size="small"
+              onClick={() => change({ memberIds: members.map(({ memberId }) => memberId) })}
+            >
+              {text.whoTickAll}
+            </Button>
+            <Button kind="plain" size="small" onClick={() => change({ memberIds: [] })}>
+              {text.whoTickNone}
+            </Button>
+          </div>
+        </div>
       )}
       <div className="flex flex-wrap gap-3">
         <Button type="submit" busy={send.isPending}>
