@@ -102,7 +102,7 @@ it('takes all that a filter finds away as a file, and a sheet to the printer', a
   await page.getByLabel('Algorithms').selectOption('first');
   await page.waitForURL('**/sheet?algorithms=first');
   // One algorithm for each of the 21.
-  expect(await page.getByRole('main').locator('ol > li').count()).toBe(21);
+  await expect.poll(() => page.getByRole('main').locator('ol > li').count()).toBe(21);
   const running = page.getByText(/^PLL, edition \d+$/);
   expect(await running.isVisible()).toBe(false);
   await page.emulateMedia({ media: 'print' });
