@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { ASPECTS, type Aspect, EVERY_ENTRY } from '../lastlayer/index.ts';
 import { ledgerText } from '../text/ledger.ts';
 import { picture } from './common.ts';
+import { LEDGER_SORTS } from './ledger-lists.ts';
 
 const { problems } = ledgerText;
 
@@ -107,12 +108,6 @@ export const ledgerView = z.strictObject({
   mix: z.strictObject({ with: entry, share: z.int(), cases: z.int(), classes: z.array(mixClass) }).nullable(),
 });
 export type LedgerView = z.infer<typeof ledgerView>;
-
-export const LEDGER_SORTS = ['number', 'name', 'group', 'prior'] as const;
-export type LedgerSort = (typeof LEDGER_SORTS)[number];
-
-/** The longest list that is given on one page: ZBLL fits. */
-export const MOST_ON_ONE_PAGE = 500;
 
 export const ledgerCasesInput = z.strictObject({
   ...step,

@@ -44,8 +44,16 @@ it('finds imports that go the wrong way', () => {
     "import type { App } from '#server/app.ts';\nimport { app } from '#server/app.ts';\n",
   );
   write('server/start.mjs', "import pg from 'pg';\n");
+  write('shared/contracts/thing.ts', "import { z } from 'zod';\n");
+  write('shared/contracts/sizes.ts', 'export const MOST = 5;\n');
+  write(
+    'renderer/thing.tsx',
+    "import type { Thing } from '#shared/contracts/thing.ts';\nimport { type Thing, thing } from '#shared/contracts/thing.ts';\nimport { MOST } from '#shared/contracts/sizes.ts';\n",
+  );
+  write('pages/+data.server.ts', "import { thing } from '#shared/contracts/thing.ts';\n");
   expect(checkImports(repository)).toEqual([
     'pages/page.tsx:2: pages/ may not import from server/',
+    "renderer/thing.tsx:2: '#shared/contracts/thing.ts' brings the schema library to the browser: import its types, or a file without schemas",
     "server/app.ts:1: './gone.ts' does not exist",
     "server/app.ts:2: '#database/query' has no file extension",
     "server/start.mjs:1: 'pg': this script runs before the packages are installed, it may only import from Node",

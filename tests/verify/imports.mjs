@@ -1,4 +1,4 @@
-import { existsSync } from 'node:fs';
+import { existsSync, readFileSync } from 'node:fs';
 import { dirname, join, normalize } from 'node:path';
 import { lineAt, sourceFiles, TOP_FOLDERS } from './sources.mjs';
 
@@ -48,10 +48,22 @@ function checkOne(root, file, specifier, typeOnly) {
     return `'${specifier}' goes into another top folder: write '#${path}'`;
   if (!relative && other === own && own !== 'tests')
     return `'${specifier}' is in the same top folder: write it relative`;
+  if (!typeOnly && bringsSchemas(root, file, path))
+    return `'${specifier}' brings the schema library to the browser: import its types, or a file without schemas`;
   if (MAY_IMPORT[own].includes(other) || typeOnly) return '';
   // The cluster is started by the same small helpers as the server.
   if (own === 'database' && PLAIN.test(file) && path.startsWith('server/toolbox/')) return '';
   return `${own}/ may not import from ${other}/`;
+}
+
+/** Whether a page would load the schemas of a contract: what runs on the server alone may. */
+function bringsSchemas(root, file, path) {
+  return (
+    /^(pages|renderer)\//.test(file) &&
+    !/\.server\.tsx?$/.test(file) &&
+    path.startsWith('shared/contracts/') &&
+    readFileSync(join(root, path), 'utf8').includes("from 'zod'")
+  );
 }
 
 /** The scripts that install the packages cannot use any. */

@@ -1,7 +1,8 @@
 import { LedgerTable } from '#renderer/ledger-table.tsx';
 import { useVisitor } from '#renderer/session.tsx';
 import { FlatView, TextLink } from '#renderer/ui/index.ts';
-import type { LedgerCasesInput, LedgerCasesView, LedgerSort, ListedCase } from '#shared/contracts/ledger.ts';
+import type { LedgerCasesInput, LedgerCasesView, ListedCase } from '#shared/contracts/ledger.ts';
+import type { LedgerSort } from '#shared/contracts/ledger-lists.ts';
 import { ledgerText } from '#shared/text/ledger.ts';
 import { Figure } from '../figure.tsx';
 import type { Step } from '../ledger-query.ts';

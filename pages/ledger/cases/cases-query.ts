@@ -1,9 +1,10 @@
-import type { LedgerCasesInput, LedgerSort } from '#shared/contracts/ledger.ts';
+import type { LedgerCasesInput } from '#shared/contracts/ledger.ts';
+import { LEDGER_SORTS, type LedgerSort } from '#shared/contracts/ledger-lists.ts';
 import { readStep, type Step, stepQuery } from '../ledger-query.ts';
 
 type Chosen = Omit<LedgerCasesInput, keyof Step>;
 
-const SORTS: readonly LedgerSort[] = ['number', 'name', 'group', 'prior'];
+const SORTS: readonly LedgerSort[] = LEDGER_SORTS;
 const ANGLES = [1, 2, 4] as const;
 
 /** The list that an address asks for; null where it names no step. What else is not right in it is left out. */

@@ -1,7 +1,8 @@
 import { useNavigate } from 'react-router';
 import { AppLink, Button, cx, SelectField, TextLink } from '#renderer/ui/index.ts';
 import { useScripts } from '#renderer/use-scripts.ts';
-import { type LedgerCasesInput, type LedgerCasesView, MOST_ON_ONE_PAGE } from '#shared/contracts/ledger.ts';
+import type { LedgerCasesInput, LedgerCasesView } from '#shared/contracts/ledger.ts';
+import { MOST_ON_ONE_PAGE } from '#shared/contracts/ledger-lists.ts';
 import { ledgerText } from '#shared/text/ledger.ts';
 import { stepQuery } from '../ledger-query.ts';
 import { casesHref } from './cases-query.ts';

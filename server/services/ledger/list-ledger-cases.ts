@@ -1,10 +1,5 @@
-import {
-  LEDGER_SORTS,
-  type LedgerCasesInput,
-  type LedgerCasesView,
-  type LedgerSort,
-  MOST_ON_ONE_PAGE,
-} from '#shared/contracts/ledger.ts';
+import type { LedgerCasesInput, LedgerCasesView } from '#shared/contracts/ledger.ts';
+import { LEDGER_SORTS, type LedgerSort, MOST_ON_ONE_PAGE } from '#shared/contracts/ledger-lists.ts';
 import { inNameOrder } from '../catalogue/read-edition.ts';
 import type { Ctx } from '../context.ts';
 import { countStep, priorOf, type StepCase, showCase } from './step-cases.ts';
