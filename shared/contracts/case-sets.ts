@@ -1,24 +1,9 @@
 import { z } from 'zod';
 import { picture, prior } from './common.ts';
+import { ASPECTS, ENTRIES } from './entries.ts';
 
-const aspect = z.enum(['co', 'eo', 'cp', 'ep']);
-const entry = z.enum([
-  'any',
-  'eo',
-  'co',
-  'co+eo',
-  'corners',
-  'corners+eo',
-  'cp',
-  'cp+eo',
-  'ep',
-  'co+ep',
-  'edges',
-  'co+edges',
-  'cp+ep',
-  'corners+ep',
-  'cp+edges',
-]);
+const aspect = z.enum(ASPECTS);
+const entry = z.enum(ENTRIES);
 const name = z
   .string()
   .trim()

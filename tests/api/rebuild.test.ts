@@ -1,35 +1,10 @@
 import { expect, it } from 'vitest';
-import { openDatabase } from '#database/client.ts';
-import { rebuildMember } from '#server/services/rollups/rebuild-member.ts';
 import { useApi } from '../support/api.ts';
-import type { Person } from '../support/factories.ts';
+import { derivedOf, rebuild } from '../support/derived.ts';
 import { Phone } from '../support/training.ts';
 
 const api = useApi();
 const DAY = 86_400_000;
-
-async function derived(person: Person): Promise<Record<string, unknown[]>> {
-  const read = (table: string, order: string) =>
-    api.factory.sql(`select * from ${table} where club_id = $1 and member_id = $2 order by ${order}`, [
-      person.clubId,
-      person.memberId,
-    ]);
-  return {
-    states: await read('case_state', 'case_key'),
-    firsts: await read('first_answer', 'case_key, local_day'),
-    rollups: await read('rollup', 'set_key, day, group_name'),
-  };
-}
-
-/** Rebuilds as a job does: as the owner, in one transaction. */
-async function rebuild(person: Person): Promise<void> {
-  const owner = openDatabase(api.urls.ownerUrl, { max: 1 });
-  try {
-    await owner.db.transaction((tx) => rebuildMember(tx, person));
-  } finally {
-    await owner.pool.end();
-  }
-}
 
 it('memory, first answers and rollups made again from the log differ by nothing', async () => {
   const club = await api.factory.club();
@@ -68,11 +43,11 @@ it('memory, first answers and rollups made again from the log differ by nothing'
     }
     api.clock.advance((day === 2 ? 2 : 1) * DAY);
   }
-  const before = await derived(person);
+  const before = await derivedOf(api, person);
   expect(before.states?.length).toBeGreaterThan(5);
   expect(before.rollups?.length).toBeGreaterThan(20);
-  await rebuild(person);
-  expect(await derived(person)).toEqual(before);
+  await rebuild(api, person);
+  expect(await derivedOf(api, person)).toEqual(before);
 }, 60_000);
 
 it('an answer that comes late is folded in where it belongs, and its days are written again', async () => {
@@ -100,7 +75,7 @@ it('an answer that comes late is folded in where it belongs, and its days are wr
     [person.memberId],
   );
   expect(missed[0]?.missed).toBe(1);
-  const before = await derived(person);
-  await rebuild(person);
-  expect(await derived(person)).toEqual(before);
+  const before = await derivedOf(api, person);
+  await rebuild(api, person);
+  expect(await derivedOf(api, person)).toEqual(before);
 }, 60_000);

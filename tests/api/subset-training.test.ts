@@ -1,11 +1,10 @@
 import { expect, it } from 'vitest';
-import { openDatabase } from '#database/client.ts';
-import { rebuildMember } from '#server/services/rollups/rebuild-member.ts';
 import type { AssignSetInput, SquadView } from '#shared/contracts/desk.ts';
 import type { MyCasesView } from '#shared/contracts/member.ts';
 import { caseSet } from '#shared/lastlayer/index.ts';
 import { recall } from '#shared/memory/index.ts';
 import { useApi } from '../support/api.ts';
+import { derivedOf, rebuild } from '../support/derived.ts';
 import type { Person } from '../support/factories.ts';
 import { insertMemory, insertRollup, londonDay } from '../support/figures.ts';
 import { Phone } from '../support/training.ts';
@@ -45,28 +44,6 @@ async function assign(captain: Person, setKey: string, change: Partial<AssignSet
 
 const withdraw = (captain: Person, setKey: string) =>
   api.as(captain.claims).delete(`/api/desk/programme/${setKey}`, { version: 1 });
-
-async function derived({ clubId, memberId }: Person): Promise<Record<string, unknown[]>> {
-  const read = (table: string, order: string) =>
-    api.factory.sql(`select * from ${table} where club_id = $1 and member_id = $2 order by ${order}`, [
-      clubId,
-      memberId,
-    ]);
-  return {
-    states: await read('case_state', 'case_key'),
-    firsts: await read('first_answer', 'case_key, local_day'),
-    rollups: await read('rollup', 'set_key, day, group_name'),
-  };
-}
-
-async function rebuild(person: Person): Promise<void> {
-  const owner = openDatabase(api.urls.ownerUrl, { max: 1 });
-  try {
-    await owner.db.transaction((tx) => rebuildMember(tx, person));
-  } finally {
-    await owner.pool.end();
-  }
-}
 
 it('a subset is trained like any set: its own names, its parent’s algorithms and editions', async () => {
   const { captain, member, edges } = await clubWithSubset();
@@ -145,9 +122,9 @@ it('moving from a subset to the whole and back keeps what was learned, and rebui
     [member.memberId],
   );
   expect(sets.map((row) => row.set_key).sort()).toEqual([edges, 'pll'].sort());
-  const before = await derived(member);
-  await rebuild(member);
-  expect(await derived(member)).toEqual(before);
+  const before = await derivedOf(api, member);
+  await rebuild(api, member);
+  expect(await derivedOf(api, member)).toEqual(before);
 }, 90_000);
 
 it('an answer given through a subset that was withdrawn meanwhile still counts, in both sets’ days', async () => {
@@ -164,9 +141,9 @@ it('an answer given through a subset that was withdrawn meanwhile still counts, 
   await phone.answerNext();
   api.clock.advance(DAY);
   expect((await phone.send(late)).status).toBe(200);
-  const before = await derived(member);
-  await rebuild(member);
-  expect(await derived(member)).toEqual(before);
+  const before = await derivedOf(api, member);
+  await rebuild(api, member);
+  expect(await derivedOf(api, member)).toEqual(before);
 }, 60_000);
 
 it('who moves to a set that shares cases has the true figure of it at once, and it says what it rests on', async () => {

@@ -1,6 +1,7 @@
 import { ChoiceGroup } from '#renderer/ui/index.ts';
+import { ASPECTS } from '#shared/contracts/entries.ts';
 import { setMakingText } from '#shared/text/set-making.ts';
-import { ASPECTS, type Definition } from './definition.ts';
+import type { Definition } from './definition.ts';
 
 type Aspects = Definition['toldApart'];
 

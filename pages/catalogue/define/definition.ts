@@ -1,27 +1,7 @@
 import type { EntryPart, PreviewSetInput } from '#shared/contracts/case-sets.ts';
+import { ASPECTS, ENTRIES } from '#shared/contracts/entries.ts';
 
-/** The aspects of a last layer, in the order they are offered. */
-export const ASPECTS = ['co', 'eo', 'cp', 'ep'] as const;
 type Aspect = (typeof ASPECTS)[number];
-
-/** The entry conditions, in the order they are offered: the trade's own sets begin from the first six. */
-export const ENTRIES: readonly EntryPart['entry'][] = [
-  'any',
-  'eo',
-  'co',
-  'co+eo',
-  'corners',
-  'corners+eo',
-  'cp',
-  'cp+eo',
-  'ep',
-  'co+ep',
-  'edges',
-  'co+edges',
-  'cp+ep',
-  'corners+ep',
-  'cp+edges',
-];
 
 /** A definition as it is being made. Shares are as typed. */
 export interface Definition {

@@ -1,7 +1,8 @@
 import { Button, SelectField, TextField } from '#renderer/ui/index.ts';
+import { ENTRIES } from '#shared/contracts/entries.ts';
 import { catalogueText } from '#shared/text/catalogue.ts';
 import { setMakingText } from '#shared/text/set-making.ts';
-import { type Definition, ENTRIES, wholeOf } from './definition.ts';
+import { type Definition, wholeOf } from './definition.ts';
 
 const text = setMakingText.define;
 const { entry: inWords } = catalogueText.sets;

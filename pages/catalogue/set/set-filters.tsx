@@ -1,15 +1,13 @@
-import { type FormEvent, useEffect, useRef, useState } from 'react';
+import type { FormEvent } from 'react';
 import { useLocation, useNavigate, useSearchParams } from 'react-router';
 import { queryHref } from '#renderer/query-href.ts';
 import { Button, SelectField, TextField } from '#renderer/ui/index.ts';
+import { useRestingText } from '#renderer/use-resting-text.ts';
 import { useScripts } from '#renderer/use-scripts.ts';
 import type { CatalogueSetView } from '#shared/contracts/catalogue.ts';
 import { catalogueText } from '#shared/text/catalogue.ts';
 
 const text = catalogueText.set;
-
-/** A moment's rest in typing: browsers limit how often an address may change. */
-const REST_MS = 250;
 
 /** What narrows the list. It all stands in the address, and works as a plain form before scripts are there. */
 export function SetFilters({ view }: { view: CatalogueSetView }) {
@@ -92,27 +90,8 @@ export function SetFilters({ view }: { view: CatalogueSetView }) {
   );
 }
 
-/** The letters are the field's own; the address follows when typing rests, and leads when it changes by itself. */
 function FindField({ inAddress, onFind }: { inAddress: string; onFind: (text: string) => void }) {
-  const [letters, setLetters] = useState(inAddress);
-  const written = useRef(inAddress);
-  const find = useRef(onFind);
-  useEffect(() => {
-    find.current = onFind;
-  });
-  useEffect(() => {
-    if (inAddress === written.current) return;
-    written.current = inAddress;
-    setLetters(inAddress);
-  }, [inAddress]);
-  useEffect(() => {
-    if (letters === written.current) return;
-    const timer = setTimeout(() => {
-      written.current = letters;
-      find.current(letters);
-    }, REST_MS);
-    return () => clearTimeout(timer);
-  }, [letters]);
+  const [letters, setLetters] = useRestingText(inAddress, onFind);
   return (
     <TextField
       id="set-find"

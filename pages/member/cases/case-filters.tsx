@@ -1,5 +1,5 @@
-import { useEffect, useRef, useState } from 'react';
 import { SelectField, TextField } from '#renderer/ui/index.ts';
+import { useRestingText } from '#renderer/use-resting-text.ts';
 import type { MyCasesView } from '#shared/contracts/member.ts';
 import { memberText } from '#shared/text/member.ts';
 import { type CaseFilter, SORTS } from './filter-cases.ts';
@@ -50,30 +50,8 @@ export function CaseFilters({
   );
 }
 
-/** A moment's rest in typing: browsers limit how often an address may change. */
-const REST_MS = 250;
-
-/** The letters are the field's own; the address follows when typing rests, and leads when it changes by itself. */
 function FindField({ text: inAddress, onFind }: { text: string; onFind: (text: string) => void }) {
-  const [letters, setLetters] = useState(inAddress);
-  const written = useRef(inAddress);
-  const find = useRef(onFind);
-  useEffect(() => {
-    find.current = onFind;
-  });
-  useEffect(() => {
-    if (inAddress === written.current) return;
-    written.current = inAddress;
-    setLetters(inAddress);
-  }, [inAddress]);
-  useEffect(() => {
-    if (letters === written.current) return;
-    const timer = setTimeout(() => {
-      written.current = letters;
-      find.current(letters);
-    }, REST_MS);
-    return () => clearTimeout(timer);
-  }, [letters]);
+  const [letters, setLetters] = useRestingText(inAddress, onFind);
   return (
     <TextField
       id="case-find"
